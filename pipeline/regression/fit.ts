@@ -1,0 +1,127 @@
+import type { Law } from '../algebra/form.ts';
+import type { Note } from '../base/message.ts';
+import type { SourceId } from '../rules/rule.ts';
+
+/** Why a minimiser stopped, with the number and the limit it was held against. */
+export interface Stop {
+  readonly why:
+    | 'not started'
+    | 'converged'
+    | 'direct solution'
+    | 'on a bound'
+    | 'rank deficient'
+    | 'no further descent'
+    | 'iterations used up'
+    | 'not finite';
+  readonly value: number;
+  readonly limit: number;
+  readonly iterations: number;
+}
+
+/** Settings of a fit, all from the study file. */
+export interface FitOptions {
+  readonly scale: 'relative' | 'absolute';
+  readonly weights: 'uncertainty' | 'equal' | 'column';
+  readonly scatter: 'estimate' | 'none';
+  readonly campaignEffect: 'auto' | 'none' | 'intercept';
+  readonly confidence: number;
+  readonly resamples: number;
+  readonly seed: number;
+}
+
+/**
+ * What a law's fit sees: n trials, response first. No heat, no mass.
+ * `relative`: y and x are natural logarithms; `absolute`: values.
+ */
+export interface FitData {
+  readonly trials: readonly string[];
+  readonly campaign: readonly number[];
+  readonly campaigns: readonly string[];
+  /** n */
+  readonly y: Float64Array;
+  /** One column of n for each of form.groups. */
+  readonly x: readonly Float64Array[];
+  /** Per trial (1+g) x (1+g) row-major random covariance of (y, x1, ..., xg); zeros where exact. */
+  readonly sigma: readonly Float64Array[];
+  readonly sources: readonly SourceId[];
+  /** Per trial (1+g) x s row-major: slope to each systematic source times its standard uncertainty. */
+  readonly systematic: readonly Float64Array[];
+  /** n prior weights, where `weights: column`. */
+  readonly weight?: Float64Array;
+  readonly scale: 'relative' | 'absolute';
+}
+
+export interface Bounds {
+  readonly [parameter: string]: readonly [number, number];
+}
+
+export interface Parameter {
+  readonly name: string;
+  readonly estimate: number;
+  /** Random and systematic parts together. */
+  readonly standardError: number;
+  readonly standardErrorRandom: number;
+  /** Satterthwaite, fractional. */
+  readonly degreesOfFreedom: number;
+  /** At the study's confidence; -Infinity or Infinity on the side where no honest bound exists. */
+  readonly lower: number;
+  readonly upper: number;
+  readonly fixed: boolean;
+  readonly onBound: boolean;
+}
+
+export interface Statistics {
+  readonly n: number;
+  readonly parameters: number;
+  /** Scatter beyond the stated uncertainties; with none stated the residual standard deviation. */
+  readonly residualSd: number;
+  /** Between-campaign standard deviation; NaN where it is not estimated. */
+  readonly campaignSd: number;
+  readonly rSquared: number;
+  readonly rmsLn: number;
+  readonly aicc: number;
+  readonly bic: number;
+  readonly cvRmsLn: number;
+  readonly cvKind: 'leave one trial out' | 'leave one campaign out';
+  readonly conditionIndex: number;
+  /** r^T V^-1 r with sigma = tau = 0 and its degrees of freedom, where uncertainties are stated. */
+  readonly chiSquared: number;
+  readonly degreesOfFreedom: number;
+}
+
+/** Per trial, in the order of the fit's data. */
+export interface Diagnostics {
+  readonly fitted: readonly number[];
+  readonly residual: readonly number[];
+  readonly studentised: readonly number[];
+  readonly leverage: readonly number[];
+  readonly cook: readonly number[];
+  /** Standard deviation of each residual: measurement, scatter and campaign together. */
+  readonly residualSd: readonly number[];
+}
+
+/** Result of fitting one law. All per-parameter arrays are in the order of form.constants. */
+export interface Fit extends Law {
+  readonly text: string;
+  readonly free: readonly string[];
+  readonly stop: Stop;
+  readonly parameters: readonly Parameter[];
+  readonly statistics: Statistics;
+  /** p x p, random part (Phi). */
+  readonly covarianceRandom: readonly (readonly number[])[];
+  /** p x p, random and systematic. */
+  readonly covariance: readonly (readonly number[])[];
+  /** d theta/d source times u(source), one row of p for each source. */
+  readonly shifts: Readonly<Record<SourceId, readonly number[]>>;
+  /** Estimated variance components (sigma^2, tau^2; those that are estimated), their covariance W, and d Phi/d phi_k. */
+  readonly components: {
+    readonly names: readonly string[];
+    readonly values: readonly number[];
+    readonly covariance: readonly (readonly number[])[];
+    readonly derivatives: readonly (readonly (readonly number[])[])[];
+  };
+  readonly diagnostics: Diagnostics;
+  /** Smallest and largest value of each group in the data fitted. */
+  readonly ranges: Readonly<Record<string, readonly [number, number]>>;
+  readonly notes: readonly Note[];
+}

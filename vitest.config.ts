@@ -1,0 +1,11 @@
+import { defineConfig } from 'vitest/config';
+
+export default defineConfig({
+  test: {
+    projects: [
+      { test: { name: 'source', include: ['test/**/*.test.ts'], exclude: ['test/dist/**', 'test/browser/**'], testTimeout: 30_000 } },
+      { test: { name: 'dist', include: ['test/dist/**/*.test.ts'], testTimeout: 120_000 } },
+      { test: { name: 'browser', include: ['test/browser/**/*.test.ts'], testTimeout: 120_000 } },
+    ],
+  },
+});
