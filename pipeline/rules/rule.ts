@@ -11,6 +11,7 @@ export type SourceId = string;
 /** Validity of a step, per trial. `holds` must be false for NaN. */
 export interface Check {
   readonly code: string;
+  /** Keys it looks at; `u(KEY)` is the combined standard uncertainty of that key in SI, 0 where none is stated. */
   readonly from: readonly Key[];
   readonly holds: (...x: number[]) => boolean;
   readonly otherwise: 'refuse' | 'note' | 'warning';
