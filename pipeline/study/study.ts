@@ -81,6 +81,8 @@ export interface Study {
   readonly title: string;
   readonly transfer: 'heat' | 'mass';
   readonly equipment: Placed<string>;
+  /** The data are invented, as in a demo; the report says so. */
+  readonly invented: boolean;
   readonly trials: {
     readonly file: Placed<string>;
     readonly sheet?: Placed<string>;
