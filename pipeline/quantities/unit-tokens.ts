@@ -9,7 +9,7 @@ export type Token =
 
 const numberAt = /\d+(?:\.\d+)?(?:e[-+]?\d+)?/uy;
 const nameAt = /[\p{L}°%‰_'"#][\p{L}\p{N}°%‰_]*/uy;
-const powerAt = /(?:\^|\*\*)(?:([-+]?\d+(?:\.\d+)?)|\(([-+]?\d+(?:\.\d+)?)(?:\/(\d+))?\))|(-?\d+(?![.\d]))/uy;
+const powerAt = /(?:\^|\*\*)(?:([-+]?\d+(?:\.\d+)?)|\(([-+]?\d+(?:\.\d+)?)(?:\/(\d+))?\))|(-?\d+(?!\d|\.\d))/uy;
 const joinAt = / ?[·*.] ?| /uy;
 const qualifierAt = /\((?:US|UK|th|IT|oil|metric|mechanical|electric)\)/uy;
 

@@ -2,8 +2,9 @@ import { says } from '../base/says/quantities.ts';
 import { type Dimension, dimensionless, isDimensionless, sameDimension, timesDimension } from './dimension.ts';
 import { type Fault, fault, isFault } from './fault.ts';
 import { likelyUnit } from './likely-unit.ts';
+import { ambiguous } from './unit-aliases.ts';
 import { conditionOf, gaugeOf, type Reference, shareOf } from './unit-reference.ts';
-import { ambiguous, type FoundSymbol, findSymbol } from './unit-symbols.ts';
+import { type FoundSymbol, findSymbol } from './unit-symbols.ts';
 import { type Token, tokens } from './unit-tokens.ts';
 
 /** SI value = number * times / over + offset. The two factors stay apart so that 25.4 mm is 0.0254 m to the last bit. */

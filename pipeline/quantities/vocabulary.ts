@@ -89,7 +89,7 @@ const list: readonly Quantity[] = [
   quantity('thermal_expansion', '1/K', 'α_V', 'cubic expansion coefficient'),
   quantity('surface_tension', 'N/m', 'σ', 'surface tension', { friendly: ['mN/m'] }),
   quantity('latent_heat', 'J/kg', 'r', 'specific latent heat', { friendly: ['kJ/kg'] }),
-  number('flow_index', 'n', 'flow index of a power-law liquid'),
+  number('flow_index', 'm', 'flow index of a power-law liquid'),
   quantity('consistency', 'Pa s', 'K', 'consistency of a power-law liquid: its viscosity at 1 1/s'),
   number('shear_constant', 'k_s', 'mean shear rate over rotation speed'),
   // flow
@@ -134,7 +134,7 @@ const list: readonly Quantity[] = [
   quantity('wall_conductivity', 'W/(m K)', 'λ_w', 'thermal conductivity of the wall'),
   quantity('fouling_resistance', 'm^2 K/W', 'R_f', 'thermal resistance of fouling'),
   quantity('solid_density', 'kg/m^3', 'ρ_s', 'density of the solid'),
-  quantity('solid_heat_capacity', 'J/(kg K)', 'c_s', 'specific heat capacity of the solid'),
+  quantity('solid_heat_capacity', 'J/(kg K)', 'c_p,s', 'specific heat capacity of the solid'),
   quantity('solid_conductivity', 'W/(m K)', 'λ_s', 'thermal conductivity of the solid'),
   quantity('equipment_heat_capacity', 'J/K', 'C_e', 'heat capacity of the equipment', { friendly: ['kJ/K'] }),
   number('emissivity', 'e', 'emissivity of the surface'),
