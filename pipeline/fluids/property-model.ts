@@ -1,5 +1,5 @@
-/** What a property may depend on; the study says which of its quantities holds each. */
-export type Condition = 'temperature' | 'pressure' | 'mass_fraction' | 'relative_humidity';
+/** What a property may depend on; the study says which of its quantities holds each. `bulk_temperature` is that of the bulk also at film and wall. */
+export type Condition = 'temperature' | 'pressure' | 'mass_fraction' | 'relative_humidity' | 'bulk_temperature';
 
 /** Where a model holds. `holds` gets the model's conditions in its own order and must be false for NaN. */
 export interface Range {

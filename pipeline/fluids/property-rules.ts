@@ -11,9 +11,10 @@ const STATES = [
   { suffix: '@wall', temperature: 'wall_temperature' },
 ] as const;
 
-export type Conditions = Readonly<Partial<Record<Condition, Key>>>;
+/** Keys of the quantities that hold the conditions, where a study names others than the usual ones. */
+export type Conditions = Readonly<Partial<Record<Exclude<Condition, 'bulk_temperature'>, Key>>>;
 
-const defaultKeys: Record<Condition, Key> = {
+const defaultKeys: Record<Exclude<Condition, 'bulk_temperature'>, Key> = {
   temperature: 'temperature',
   pressure: 'pressure',
   mass_fraction: 'mass_fraction',
@@ -42,7 +43,8 @@ function conditionKeys(model: PropertyModel, stream: Stream, at: Conditions, tem
   return model.from.map((condition) => {
     if (condition === 'pressure') return pressureKey(stream);
     if (condition === 'temperature' && temperature !== undefined) return ofStream(temperature, stream);
-    return at[condition] ?? ofStream(defaultKeys[condition], stream);
+    const held = condition === 'bulk_temperature' ? 'temperature' : condition;
+    return at[held] ?? ofStream(defaultKeys[held], stream);
   });
 }
 

@@ -21,6 +21,36 @@ export const says = {
   mayCondense: (T: number, p: number, by: number, limit: number): string =>
     `at ${state(T, p)} steam is ${Number(by.toPrecision(2))} K below its dew point; vapour properties are used up to ${limit} K below it, condensation is not modelled`,
 
+  tooDense: (T: number, p: number, most: number): string =>
+    `${state(T, p)} is too dense for the equations of a gas at low pressure, which hold up to ${pressure(most)} at that temperature; give the properties as quantities or as a table`,
+  denseGas: (T: number, p: number): string =>
+    `at ${state(T, p)} the equations of a gas at low pressure are used; it is dense enough for them to be some percent off`,
+
+  outsideHumidAir: (T: number, p: number, from: number, to: number, most: number): string =>
+    `${state(T, p)} is outside ${celsius(from)} to ${celsius(to)} and ${pressure(most)}, where this model of humid air holds`,
+  noHumidity: (phi: number, T: number, p: number): string =>
+    `a relative humidity of ${Number((100 * phi).toPrecision(4))} % at ${state(T, p)} is not possible; it runs from 0 to 100 %, and the vapour pressure stays below the pressure`,
+  belowDewPoint: (T: number, bulk: number, phi: number): string =>
+    `${celsius(T)} is below the dew point of air with ${Number((100 * phi).toPrecision(3))} % relative humidity at ${celsius(bulk)}; condensation is not modelled`,
+  humiditySame: 'Humid air at film and wall is taken to hold as much vapour as in the bulk.',
+  noMassFraction: (w: number, from: number, to: number): string =>
+    `a mass fraction of ${Number(w.toPrecision(4))} is outside ${from} to ${to}, where this model holds`,
+  frozen: (T: number, freezing: number, w: number): string =>
+    `${celsius(T)} is below the freezing point of ${celsius(freezing)} at a mass fraction of ${Number(w.toPrecision(3))}`,
+  statedFor: (T: number, from: number, to: number): string =>
+    `its accuracy is stated for ${celsius(from)} to ${celsius(to)}; at ${celsius(T)} it is an extrapolation`,
+
+  needsPositive: (gives: string, keys: readonly string[], values: readonly number[]): string =>
+    `${gives} cannot be estimated: ${keys.map((key, k) => `${key} ${Number(values[k]!.toPrecision(4))}`).join(', ')}; all must be above zero`,
+  diluteSolute: 'The diffusivity is an estimate for a dilute solute; a measured one is better.',
+  largeSolute: 'The diffusivity is that of a rigid sphere, large beside the molecules of the liquid.',
+  smallSolute: (gives: string, r: number): string =>
+    `${gives}: a solute of radius ${Number((1e9 * r).toPrecision(3))} nm is small for the Stokes-Einstein equation, which reads too low for small molecules`,
+  denseDiffusion: (gives: string, p: number): string =>
+    `${gives}: the estimate holds at low pressure, up to about 1 MPa; here ${pressure(p)}`,
+  unusualVolume: (gives: string, v: number): string =>
+    `${gives}: a molar volume of ${Number((1e6 * v).toPrecision(3))} cm^3/mol is outside the 14 to 500 cm^3/mol such estimates are used for`,
+
   pressureAssumed: (fluid: string, key: string): string => `No ${key} is given for ${fluid}: its properties are taken at 101.325 kPa.`,
   pressureAmbient: (fluid: string, key: string): string => `No ${key} is given for ${fluid}: its properties are taken at ambient_pressure.`,
   accuracyNotStated: (what: string): string => `The source states no accuracy for the ${what}: it counts as exact.`,

@@ -103,7 +103,8 @@ const onSaturationLine = (to: number): readonly Range[] => [
   { holds: (T) => T! >= 273.15 && T! <= to, otherwise: 'refuse', says: (T) => says.outsideTemperature(T!, 273.15, to) },
 ];
 
-const saturationProperties: readonly PropertyModel[] = [
+/** What water has on its saturation line, whatever the phase around it. */
+export const saturationProperties: readonly PropertyModel[] = [
   {
     property: 'vapour_pressure',
     from: ['temperature'],
