@@ -9,7 +9,8 @@ export type Expr =
   | { readonly op: 'number'; readonly value: number }
   | { readonly op: 'group'; readonly name: string }
   | { readonly op: 'constant'; readonly name: string }
-  | { readonly op: '+' | '*' | 'min' | 'max'; readonly of: readonly [Expr, Expr] }
+  | { readonly op: '+' | '*'; readonly of: readonly [Expr, Expr] }
+  | { readonly op: 'min' | 'max'; readonly of: readonly [Expr, Expr] }
   | { readonly op: '^'; readonly of: readonly [Expr, Expr] }
   | { readonly op: 'call'; readonly fn: Fn; readonly of: readonly Expr[] }
   /** of[k] while on < below[k], the last one above all: bands of Re in published tables. */
