@@ -2,6 +2,16 @@ const celsius = (T: number): string => `${Number((T - 273.15).toFixed(2))} degC`
 const pressure = (p: number): string => (p < 1e6 ? `${Number((p / 1e3).toPrecision(4))} kPa` : `${Number((p / 1e6).toPrecision(4))} MPa`);
 const state = (T: number, p: number): string => `${celsius(T)} and ${pressure(p)}`;
 
+/** A condition with its number, temperatures in degC. */
+const condition = (name: string, value: number): string =>
+  name === 'temperature'
+    ? `${name} ${celsius(value)}`
+    : name === 'pressure'
+      ? `${name} ${pressure(value)}`
+      : `${name} ${Number(value.toPrecision(5))}`;
+const conditions = (names: readonly string[], values: readonly number[]): string =>
+  names.map((name, k) => condition(name, values[k]!)).join(', ');
+
 /** What the property models tell the reader; temperatures come in K, pressures in Pa. */
 export const says = {
   property: (key: string, fluid: string, text: string): string => `${key} of ${fluid}: ${text}`,
@@ -39,6 +49,16 @@ export const says = {
     `${celsius(T)} is below the freezing point of ${celsius(freezing)} at a mass fraction of ${Number(w.toPrecision(3))}`,
   statedFor: (T: number, from: number, to: number): string =>
     `its accuracy is stated for ${celsius(from)} to ${celsius(to)}; at ${celsius(T)} it is an extrapolation`,
+
+  outsideTable: (name: string, value: number, from: number, to: number): string =>
+    `${condition(name, value)} is outside the table, which runs from ${condition(name, from)} to ${condition(name, to)}; nothing is extrapolated, so add rows to it`,
+  tableShort: (name: string): string => `the table of properties needs at least two different values of ${name}`,
+  tableTwice: (names: readonly string[], values: readonly number[]): string =>
+    `the table of properties has two rows for ${conditions(names, values)}`,
+  tableHole: (names: readonly string[], values: readonly number[], count: number): string =>
+    `the table of properties has no row for ${conditions(names, values)}${count > 1 ? ` and ${count - 1} further places` : ''}; it must give every combination of ${names.join(' and ')}`,
+  tableEmpty: (by: readonly string[]): string => `the table of properties has no column besides ${by.join(' and ')}`,
+  tableNotPositive: (name: string): string => `the table of properties has a ${name} that is not above zero`,
 
   needsPositive: (gives: string, keys: readonly string[], values: readonly number[]): string =>
     `${gives} cannot be estimated: ${keys.map((key, k) => `${key} ${Number(values[k]!.toPrecision(4))}`).join(', ')}; all must be above zero`,
