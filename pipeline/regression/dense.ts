@@ -1,0 +1,151 @@
+/** Small dense systems, q x q row-major, of a handful of parameters; columns that enter here were made near orthonormal by QR before. */
+
+/** Lower factor L of a symmetric positive definite matrix, or undefined where it is not. */
+export function choleskyOf(matrix: Float64Array, q: number): Float64Array | undefined {
+  const factor = new Float64Array(q * q);
+  for (let i = 0; i < q; i++) {
+    for (let j = 0; j <= i; j++) {
+      let sum = matrix[i * q + j]!;
+      for (let k = 0; k < j; k++) sum -= factor[i * q + k]! * factor[j * q + k]!;
+      if (i !== j) factor[i * q + j] = sum / factor[j * q + j]!;
+      else if (sum > 1e-14 * Math.abs(matrix[i * q + i]!)) factor[i * q + i] = Math.sqrt(sum);
+      else return undefined;
+    }
+  }
+  return factor;
+}
+
+export function lnDeterminantOf(factor: Float64Array, q: number): number {
+  let sum = 0;
+  for (let i = 0; i < q; i++) sum += 2 * Math.log(factor[i * q + i]!);
+  return sum;
+}
+
+/** L^-1 right, q x m. */
+export function forward(factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array {
+  const out = right.slice();
+  for (let c = 0; c < m; c++) {
+    for (let i = 0; i < q; i++) {
+      let sum = out[i * m + c]!;
+      for (let k = 0; k < i; k++) sum -= factor[i * q + k]! * out[k * m + c]!;
+      out[i * m + c] = sum / factor[i * q + i]!;
+    }
+  }
+  return out;
+}
+
+/** L^-T right, q x m. */
+export function backward(factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array {
+  const out = right.slice();
+  for (let c = 0; c < m; c++) {
+    for (let i = q - 1; i >= 0; i--) {
+      let sum = out[i * m + c]!;
+      for (let k = i + 1; k < q; k++) sum -= factor[k * q + i]! * out[k * m + c]!;
+      out[i * m + c] = sum / factor[i * q + i]!;
+    }
+  }
+  return out;
+}
+
+/** (L L^T)^-1 right, q x m. */
+export const solveWith = (factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array =>
+  backward(factor, forward(factor, right, q, m), q, m);
+
+export const identity = (q: number): Float64Array => Float64Array.from({ length: q * q }, (_, k) => (k % (q + 1) === 0 ? 1 : 0));
+
+/** a (q x q) times b (q x m). */
+export function multiply(a: Float64Array, b: Float64Array, q: number, m: number): Float64Array {
+  const out = new Float64Array(q * m);
+  for (let i = 0; i < q; i++) {
+    for (let c = 0; c < m; c++) {
+      let sum = 0;
+      for (let k = 0; k < q; k++) sum += a[i * q + k]! * b[k * m + c]!;
+      out[i * m + c] = sum;
+    }
+  }
+  return out;
+}
+
+export const transpose = (a: Float64Array, rows: number, cols: number): Float64Array =>
+  Float64Array.from({ length: rows * cols }, (_, k) => a[(k % rows) * cols + Math.floor(k / rows)]!);
+
+/** tr(a b), or tr(a) without b. */
+export function traceOfProduct(a: Float64Array, b: Float64Array | undefined, q: number): number {
+  let sum = 0;
+  for (let i = 0; i < q; i++) {
+    if (b === undefined) sum += a[i * q + i]!;
+    else for (let k = 0; k < q; k++) sum += a[i * q + k]! * b[k * q + i]!;
+  }
+  return sum;
+}
+
+/**
+ * Householder QR of n x q columns in place: returns R (q x q upper, row-major) and the first q entries of Q^T right.
+ * Columns and right are overwritten.
+ */
+export function triangularise(
+  columns: readonly Float64Array[],
+  right: Float64Array,
+): { readonly r: Float64Array; readonly right: Float64Array } {
+  const q = columns.length;
+  const n = right.length;
+  const r = new Float64Array(q * q);
+  for (let k = 0; k < q; k++) {
+    const pivot = columns[k]!;
+    let norm = 0;
+    for (let i = k; i < n; i++) norm += pivot[i]! * pivot[i]!;
+    norm = pivot[k]! > 0 ? -Math.sqrt(norm) : Math.sqrt(norm);
+    r[k * q + k] = norm;
+    if (norm === 0) continue;
+    pivot[k]! -= norm;
+    const scale = 1 / (norm * pivot[k]!);
+    for (let j = k + 1; j <= q; j++) {
+      const other = j < q ? columns[j]! : right;
+      let dot = 0;
+      for (let i = k; i < n; i++) dot += pivot[i]! * other[i]!;
+      dot *= scale;
+      for (let i = k; i < n; i++) other[i]! += dot * pivot[i]!;
+      if (j < q) r[k * q + j] = other[k]!;
+    }
+  }
+  return { r, right: right.slice(0, q) };
+}
+
+/** Inverse of a symmetric positive definite matrix; NaN where it is not. */
+export function inverse(matrix: Float64Array, q: number): Float64Array {
+  const factor = choleskyOf(matrix, q);
+  return factor === undefined ? new Float64Array(q * q).fill(Number.NaN) : solveWith(factor, identity(q), q, q);
+}
+
+/** Smallest eigenvalue of a symmetric matrix, by Jacobi rotations (Golub and Van Loan 2013, section 8.5). */
+export function smallestEigenvalue(matrix: Float64Array, q: number): number {
+  const m = matrix.slice();
+  for (let sweep = 0; sweep < 60; sweep++) {
+    let off = 0;
+    for (let a = 0; a < q; a++) for (let b = 0; b < a; b++) off += m[a * q + b]! ** 2;
+    if (!(off > 1e-30)) break;
+    for (let a = 0; a < q; a++) for (let b = 0; b < a; b++) rotate(m, a, b, q);
+  }
+  let least = Number.POSITIVE_INFINITY;
+  for (let a = 0; a < q; a++) least = Math.min(least, m[a * q + a]!);
+  return least;
+}
+
+function rotate(m: Float64Array, a: number, b: number, q: number): void {
+  const off = m[a * q + b]!;
+  if (off === 0) return;
+  const half = (m[b * q + b]! - m[a * q + a]!) / (2 * off);
+  const t = Math.sign(half || 1) / (Math.abs(half) + Math.hypot(half, 1));
+  const c = 1 / Math.hypot(t, 1);
+  const s = t * c;
+  for (let k = 0; k < q; k++) {
+    const [x, y] = [m[a * q + k]!, m[b * q + k]!];
+    m[a * q + k] = c * x - s * y;
+    m[b * q + k] = s * x + c * y;
+  }
+  for (let k = 0; k < q; k++) {
+    const [x, y] = [m[k * q + a]!, m[k * q + b]!];
+    m[k * q + a] = c * x - s * y;
+    m[k * q + b] = s * x + c * y;
+  }
+}
