@@ -1,27 +1,14 @@
-import type { Correlation } from '../../correlations/correlation.ts';
 import { formText } from '../algebra/print.ts';
 import type { Note } from '../base/message.ts';
 import * as says from '../base/says/audit.ts';
 import type { Staged } from '../base/staged.ts';
 import type { Observations } from '../observations/observation.ts';
+import type { Candidate } from '../plan/plan.ts';
 import type { FitOptions } from '../regression/fit.ts';
-import type { Key } from '../rules/rule.ts';
 import { bestOfMany, foldErrors, foldsOf, rms } from './equal-footing.ts';
 import { judge, leastTrials } from './judge.ts';
-import { compare, type Comparison } from './ratio.ts';
+import { type Comparison, compare } from './ratio.ts';
 import type { AuditResult, AuditRow, VerdictWord } from './verdict.ts';
-
-/** One correlation as the plan prepared it for these trials. */
-export interface Candidate {
-  readonly correlation: Correlation;
-  readonly basis: 'direct' | 'analogy';
-  readonly own: boolean;
-  readonly keys: Readonly<Record<string, Key>>;
-  /** Keys that cannot be had, with the reason; empty where it is comparable. */
-  readonly lacks: readonly string[];
-  /** Every definition in words. */
-  readonly definitions: Readonly<Record<string, string>>;
-}
 
 export interface AuditSpec {
   readonly tolerance: number;
@@ -33,34 +20,66 @@ export interface AuditSpec {
   readonly weight: readonly number[];
 }
 
-const order: readonly VerdictWord[] = ['fits as published', 'fits with a rig factor', 'not decided by these trials', 'wrong trend', 'outside its range', 'not comparable'];
+const order: readonly VerdictWord[] = [
+  'fits as published',
+  'fits with a rig factor',
+  'not decided by these trials',
+  'wrong trend',
+  'outside its range',
+  'not comparable',
+];
 
 /** Every candidate against the same observations; best first. */
 export function audit(candidates: readonly Candidate[], observations: Observations, spec: AuditSpec): Staged<AuditResult> {
   const folds = foldsOf(observations.campaign, observations.campaigns.length);
-  const prepared = candidates.map((candidate) => ({ candidate, comparison: candidate.lacks.length > 0 ? undefined : compare(candidate.correlation, candidate.basis, candidate.keys, observations) }));
-  const rows = prepared.map(({ candidate, comparison }) => (comparison === undefined ? notComparable(candidate, observations) : auditRow(candidate, comparison, observations, folds, spec)));
-  const ranked = [...rows].sort((a, b) => order.indexOf(a.verdict) - order.indexOf(b.verdict) || rank(a) - rank(b) || (a.id < b.id ? -1 : 1));
-  const able = prepared.flatMap(({ comparison }) => (comparison !== undefined && comparison.inside.filter(Boolean).length >= leastTrials(comparison.correlation.form.groups.length) ? [comparison] : []));
+  const prepared = candidates.map((candidate) => ({
+    candidate,
+    comparison: candidate.lacks.length > 0 ? undefined : compare(candidate.correlation, candidate.basis, candidate.keys, observations),
+  }));
+  const rows = prepared.map(({ candidate, comparison }) =>
+    comparison === undefined ? notComparable(candidate, observations) : auditRow(candidate, comparison, observations, folds, spec),
+  );
+  const ranked = [...rows].sort(
+    (a, b) => order.indexOf(a.verdict) - order.indexOf(b.verdict) || rank(a) - rank(b) || (a.id < b.id ? -1 : 1),
+  );
+  const able = prepared.flatMap(({ comparison }) =>
+    comparison !== undefined && comparison.inside.filter(Boolean).length >= leastTrials(comparison.correlation.form.groups.length)
+      ? [comparison]
+      : [],
+  );
   const best = able.length > 1 ? bestOfMany(able, folds, spec.weight) : undefined;
   const notes: Note[] = [];
   if (best !== undefined && best.trials > 0) {
     const law = rms(spec.lawErrors.filter(Number.isFinite));
     notes.push({ section: 'audit', level: 'note', code: 'best-of-many', text: says.bestOfMany(able.length, best.rms, law, spec.lawName) });
   }
-  if (rows.some((row) => row.basis === 'analogy')) notes.push({ section: 'audit', level: 'note', code: 'by-analogy', text: says.byAnalogy() });
+  if (rows.some((row) => row.basis === 'analogy'))
+    notes.push({ section: 'audit', level: 'note', code: 'by-analogy', text: says.byAnalogy() });
   return { value: { tolerance: spec.tolerance, rows: ranked, notes, says: says.headline(ranked, spec) }, notes, refused: [] };
 }
 
 const rank = (row: AuditRow): number => (Number.isFinite(row.cvRmsLnWithFactor) ? row.cvRmsLnWithFactor : Number.POSITIVE_INFINITY);
 
-function auditRow(candidate: Candidate, comparison: Comparison, observations: Observations, folds: readonly (readonly number[])[], spec: AuditSpec): AuditRow {
+function auditRow(
+  candidate: Candidate,
+  comparison: Comparison,
+  observations: Observations,
+  folds: readonly (readonly number[])[],
+  spec: AuditSpec,
+): AuditRow {
   const { correlation } = candidate;
   const trials = comparison.inside.flatMap((inside, i) => (inside ? [i] : []));
-  const base = { ...blank(candidate, observations), nInRange: trials.length, predicted: Array.from(comparison.predicted), inside: comparison.inside, limits: limitCounts(comparison) };
+  const base = {
+    ...blank(candidate, observations),
+    nInRange: trials.length,
+    predicted: Array.from(comparison.predicted),
+    inside: comparison.inside,
+    limits: limitCounts(comparison),
+  };
   const needed = leastTrials(correlation.form.groups.length);
   const plain = { ...base, ...plainNumbers(comparison, trials) };
-  if (trials.length < needed) return { ...plain, verdict: 'outside its range', why: says.outside(trials.length, observations.trials.length, needed, base.limits) };
+  if (trials.length < needed)
+    return { ...plain, verdict: 'outside its range', why: says.outside(trials.length, observations.trials.length, needed, base.limits) };
   const judged = judge(comparison, observations, trials, spec.tolerance, spec.options);
   const errors = foldErrors(comparison, folds, spec.weight);
   return {
@@ -81,7 +100,10 @@ function limitCounts({ correlation, holds }: Comparison): AuditRow['limits'] {
   return correlation.limits.map((limit, k) => ({ says: limit.says, inside: holds[k]!.filter(Boolean).length }));
 }
 
-function plainNumbers({ lnRatio }: Comparison, trials: readonly number[]): Pick<AuditRow, 'bias' | 'scatterLn' | 'rmsLn' | 'within20' | 'within30'> {
+function plainNumbers(
+  { lnRatio }: Comparison,
+  trials: readonly number[],
+): Pick<AuditRow, 'bias' | 'scatterLn' | 'rmsLn' | 'within20' | 'within30'> {
   const ln = trials.map((i) => lnRatio[i]!);
   const mean = ln.reduce((sum, v) => sum + v, 0) / ln.length;
   const within = (share: number): number => ln.filter((v) => Math.abs(Math.expm1(-v)) <= share).length / ln.length;

@@ -43,15 +43,22 @@ function lnFactorWithout(comparison: Comparison, fold: ReadonlySet<number>, weig
   return sum / total;
 }
 
-export const rms = (errors: readonly number[]): number => (errors.length === 0 ? Number.NaN : Math.sqrt(errors.reduce((sum, e) => sum + e * e, 0) / errors.length));
+export const rms = (errors: readonly number[]): number =>
+  errors.length === 0 ? Number.NaN : Math.sqrt(errors.reduce((sum, e) => sum + e * e, 0) / errors.length);
 
 /** The best published correlation with its factor, chosen anew inside each fold from the other trials: what choosing among m costs. */
-export function bestOfMany(comparisons: readonly Comparison[], folds: readonly (readonly number[])[], weight: readonly number[]): { readonly rms: number; readonly trials: number } {
+export function bestOfMany(
+  comparisons: readonly Comparison[],
+  folds: readonly (readonly number[])[],
+  weight: readonly number[],
+): { readonly rms: number; readonly trials: number } {
   const errors: number[] = [];
   for (const fold of folds) {
     const left = new Set(fold);
     const able = comparisons.filter((one) => fold.every((i) => one.inside[i]));
-    const ranked = able.map((one) => ({ one, factor: lnFactorWithout(one, left, weight), loss: trainingLoss(one, left, weight) })).sort((a, b) => a.loss - b.loss);
+    const ranked = able
+      .map((one) => ({ one, factor: lnFactorWithout(one, left, weight), loss: trainingLoss(one, left, weight) }))
+      .sort((a, b) => a.loss - b.loss);
     const best = ranked[0];
     if (best === undefined) continue;
     for (const i of fold) errors.push(best.one.lnRatio[i]! - best.factor);
@@ -61,6 +68,8 @@ export function bestOfMany(comparisons: readonly Comparison[], folds: readonly (
 
 function trainingLoss(comparison: Comparison, fold: ReadonlySet<number>, weight: readonly number[]): number {
   const factor = lnFactorWithout(comparison, fold, weight);
-  const errors = Array.from(comparison.lnRatio, (ratio, i) => (fold.has(i) || !comparison.inside[i] ? Number.NaN : ratio - factor)).filter(Number.isFinite);
+  const errors = Array.from(comparison.lnRatio, (ratio, i) => (fold.has(i) || !comparison.inside[i] ? Number.NaN : ratio - factor)).filter(
+    Number.isFinite,
+  );
   return errors.length === 0 ? Number.POSITIVE_INFINITY : rms(errors);
 }

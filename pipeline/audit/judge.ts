@@ -1,7 +1,7 @@
-import { studentQuantile, studentCdf } from '../numerics/distributions.ts';
+import { studentCdf, studentQuantile } from '../numerics/distributions.ts';
 import type { Observations } from '../observations/observation.ts';
-import type { Fit, FitOptions } from '../regression/fit.ts';
 import { degreesOfFreedom } from '../regression/degrees-of-freedom.ts';
+import type { Fit, FitOptions } from '../regression/fit.ts';
 import type { Comparison } from './ratio.ts';
 import { fitRatio, lnSpan, ratioData, spanningGroups } from './ratio-fit.ts';
 import type { Trend, VerdictWord } from './verdict.ts';
@@ -26,11 +26,30 @@ const EQUIVALENCE = 0.95;
 export const leastTrials = (groups: number): number => Math.max(8, groups + 5);
 
 /** Verdict of one comparison over its in-range trials; the order of the tests is part of the rule. `tolerance` as a share (0.2). */
-export function judge(comparison: Comparison, observations: Observations, trials: readonly number[], tolerance: number, options: FitOptions): Judgement {
+export function judge(
+  comparison: Comparison,
+  observations: Observations,
+  trials: readonly number[],
+  tolerance: number,
+  options: FitOptions,
+): Judgement {
   const groups = spanningGroups(comparison, observations, trials);
   const data = ratioData(comparison, observations, trials, groups);
   const joint = fitRatio(comparison, data, groups, options);
-  const factor = groups.length === 0 ? joint : fitRatio(comparison, { ...data, x: [], sigma: data.sigma.map((s) => s.slice(0, 1)), systematic: data.systematic.map((s) => s.slice(0, data.sources.length)) }, [], options);
+  const factor =
+    groups.length === 0
+      ? joint
+      : fitRatio(
+          comparison,
+          {
+            ...data,
+            x: [],
+            sigma: data.sigma.map((s) => s.slice(0, 1)),
+            systematic: data.systematic.map((s) => s.slice(0, data.sources.length)),
+          },
+          [],
+          options,
+        );
   const limit = Math.log(1 + tolerance);
   const trends = trendsOf(joint, comparison, observations, trials, groups);
   const reach = reachOf(joint, data.x, true);
@@ -47,10 +66,25 @@ export function judge(comparison: Comparison, observations: Observations, trials
         ? 'fits with a rig factor'
         : 'not decided by these trials';
   const { estimate, lower, upper } = factor.parameters[0]!;
-  return { verdict, trends, rigFactor: estimate, rigFactorLower: lower, rigFactorUpper: upper, reach: Math.expm1(reach) + 1, reachWithFactor: Math.exp(reachWithFactor), sigma };
+  return {
+    verdict,
+    trends,
+    rigFactor: estimate,
+    rigFactorLower: lower,
+    rigFactorUpper: upper,
+    reach: Math.expm1(reach) + 1,
+    reachWithFactor: Math.exp(reachWithFactor),
+    sigma,
+  };
 }
 
-function trendsOf(fit: Fit, comparison: Comparison, observations: Observations, trials: readonly number[], groups: readonly number[]): readonly Trend[] {
+function trendsOf(
+  fit: Fit,
+  comparison: Comparison,
+  observations: Observations,
+  trials: readonly number[],
+  groups: readonly number[],
+): readonly Trend[] {
   const p = groups.map((_, k) => {
     const { estimate, standardError, degreesOfFreedom: nu } = fit.parameters[k + 1]!;
     return 2 * studentCdf(-Math.abs(estimate / standardError), nu);
@@ -58,7 +92,14 @@ function trendsOf(fit: Fit, comparison: Comparison, observations: Observations, 
   const adjusted = holm(p);
   return groups.map((g, k) => {
     const { estimate, lower, upper } = fit.parameters[k + 1]!;
-    return { group: comparison.correlation.form.groups[g]!, slope: estimate, lower, upper, pHolm: adjusted[k]!, span: Math.abs(estimate) * lnSpan(observations, comparison.rows[g + 1]!, trials) };
+    return {
+      group: comparison.correlation.form.groups[g]!,
+      slope: estimate,
+      lower,
+      upper,
+      pHolm: adjusted[k]!,
+      span: Math.abs(estimate) * lnSpan(observations, comparison.rows[g + 1]!, trials),
+    };
   });
 }
 
@@ -94,6 +135,8 @@ const lnScale = (fit: Fit, covariance: readonly (readonly number[])[]): readonly
   const c = fit.parameters[0]!.estimate;
   return covariance.map((row, a) => row.map((v, b) => v / ((a === 0 ? c : 1) * (b === 0 ? c : 1))));
 };
-const scaleContrast = (fit: Fit, w: readonly number[]): readonly number[] => w.map((v, k) => (k === 0 ? v / fit.parameters[0]!.estimate : v));
+const scaleContrast = (fit: Fit, w: readonly number[]): readonly number[] =>
+  w.map((v, k) => (k === 0 ? v / fit.parameters[0]!.estimate : v));
 
-const quadratic = (w: readonly number[], m: readonly (readonly number[])[]): number => w.reduce((sum, a, i) => sum + w.reduce((inner, b, j) => inner + a * b * m[i]![j]!, 0), 0);
+const quadratic = (w: readonly number[], m: readonly (readonly number[])[]): number =>
+  w.reduce((sum, a, i) => sum + w.reduce((inner, b, j) => inner + a * b * m[i]![j]!, 0), 0);

@@ -9,7 +9,11 @@ import type { Comparison } from './ratio.ts';
 const LEAST_SPAN = 1.5;
 
 /** Positions (in the form's groups) of the groups that span enough to show a trend. */
-export function spanningGroups({ correlation, rows }: Comparison, observations: Observations, trials: readonly number[]): readonly number[] {
+export function spanningGroups(
+  { correlation, rows }: Comparison,
+  observations: Observations,
+  trials: readonly number[],
+): readonly number[] {
   return correlation.form.groups.flatMap((_, g) => (lnSpan(observations, rows[g + 1]!, trials) >= Math.log(LEAST_SPAN) ? [g] : []));
 }
 
@@ -23,7 +27,12 @@ export function lnSpan(observations: Observations, row: number, trials: readonly
  * Data of ln q = ln(measured/predicted) against centred ln groups, with the covariance the readings give them: the predicted value moves with the groups,
  * so the uncertainty of ln q is that of ln y - sum (d ln f/d ln x) ln x.
  */
-export function ratioData(comparison: Comparison, observations: Observations, trials: readonly number[], groups: readonly number[]): FitData {
+export function ratioData(
+  comparison: Comparison,
+  observations: Observations,
+  trials: readonly number[],
+  groups: readonly number[],
+): FitData {
   const { rows, lnRatio, slopes } = comparison;
   const centre = groups.map((g) => trials.reduce((sum, i) => sum + observations.z[rows[g + 1]!]![i]!, 0) / trials.length);
   const project = (block: Float64Array, width: number, i: number): Float64Array => {
@@ -77,5 +86,9 @@ function ratioForm(groups: readonly string[]): Form {
 export function fitRatio(comparison: Comparison, data: FitData, groups: readonly number[], options: FitOptions): Fit {
   const names = groups.map((g) => comparison.correlation.form.groups[g]!);
   const form = ratioForm(names);
-  return fitLaw({ name: comparison.correlation.id, form, groups: Object.fromEntries([form.response, ...names].map((name) => [name, name])) }, data, { ...options, scale: 'relative', weights: 'uncertainty', resamples: 0 });
+  return fitLaw(
+    { name: comparison.correlation.id, form, groups: Object.fromEntries([form.response, ...names].map((name) => [name, name])) },
+    data,
+    { ...options, scale: 'relative', weights: 'uncertainty', resamples: 0 },
+  );
 }

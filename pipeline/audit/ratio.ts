@@ -1,7 +1,7 @@
 import type { Correlation } from '../../correlations/correlation.ts';
-import type { Expr } from '../algebra/form.ts';
 import { call, group } from '../algebra/build.ts';
 import { derivative } from '../algebra/derivative.ts';
+import type { Expr } from '../algebra/form.ts';
 import { compile } from '../algebra/tape.ts';
 import type { Observations } from '../observations/observation.ts';
 import type { Key } from '../rules/rule.ts';
@@ -32,11 +32,19 @@ function columnsOf(keys: readonly Key[], observations: Observations): readonly F
 }
 
 /** Every key of the correlation must be among the observations'. */
-export function compare(correlation: Correlation, basis: 'direct' | 'analogy', keys: Readonly<Record<string, Key>>, observations: Observations): Comparison {
+export function compare(
+  correlation: Correlation,
+  basis: 'direct' | 'analogy',
+  keys: Readonly<Record<string, Key>>,
+  observations: Observations,
+): Comparison {
   const { form } = correlation;
   const n = observations.trials.length;
   const names = Object.keys(keys).filter((name) => name !== form.response);
-  const columns = columnsOf(names.map((name) => keys[name]!), observations);
+  const columns = columnsOf(
+    names.map((name) => keys[name]!),
+    observations,
+  );
   const constants = Float64Array.from(form.constants, (name) => correlation.values[name]!);
   const run = (outputs: readonly Expr[]): readonly Float64Array[] => {
     const tape = compile(outputs, names, form.constants, columns);
@@ -49,11 +57,23 @@ export function compare(correlation: Correlation, basis: 'direct' | 'analogy', k
   const rows = [form.response, ...form.groups].map((name) => observations.keys.indexOf(keys[name]!));
   const measured = observations.z[rows[0]!]!;
   const predicted = outputs[0]!.slice();
-  const lnRatio = predicted.map((value, i) => (observations.scale === 'relative' ? measured[i]! : Math.log(measured[i]!)) - Math.log(value));
+  const lnRatio = predicted.map(
+    (value, i) => (observations.scale === 'relative' ? measured[i]! : Math.log(measured[i]!)) - Math.log(value),
+  );
   const limits = run(correlation.limits.map((limit) => limit.of)).map((values, k) => {
     const { from = Number.NEGATIVE_INFINITY, to = Number.POSITIVE_INFINITY } = correlation.limits[k]!;
     return Array.from(values, (value) => value >= from && value <= to);
   });
   const inside = Array.from({ length: n }, (_, i) => Number.isFinite(lnRatio[i]!) && limits.every((holds) => holds[i]!));
-  return { correlation, basis, keys, rows, lnRatio, predicted, slopes: outputs.slice(1).map((column) => column.slice()), holds: limits, inside };
+  return {
+    correlation,
+    basis,
+    keys,
+    rows,
+    lnRatio,
+    predicted,
+    slopes: outputs.slice(1).map((column) => column.slice()),
+    holds: limits,
+    inside,
+  };
 }

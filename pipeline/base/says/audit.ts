@@ -21,7 +21,12 @@ const name = ({ authors, year, basis }: Row): string => `${authors} (${year})${b
 
 export const lacks = (keys: readonly string[]): string => `It needs ${keys.join('; ')}.`;
 
-export const outside = (inRange: number, of: number, needed: number, limits: readonly { readonly says: string; readonly inside: number }[]): string => {
+export const outside = (
+  inRange: number,
+  of: number,
+  needed: number,
+  limits: readonly { readonly says: string; readonly inside: number }[],
+): string => {
   const missed = limits.filter((limit) => limit.inside < of).map((limit) => `${limit.says} (${limit.inside} of ${of})`);
   return `${inRange} of ${of} trials lie in its range and ${needed} are needed to judge it${missed.length === 0 ? '' : `; limits that trials miss: ${missed.join(', ')}`}.`;
 };
@@ -63,17 +68,26 @@ export const byAnalogy = (): string =>
 export const headline = (rows: readonly Row[], { lawName }: { readonly lawName: string }): string => {
   const comparable = rows.filter((row) => row.verdict !== 'not comparable');
   if (rows.length === 0) return 'No published correlation of this equipment is in the catalogue, so none was compared.';
-  if (comparable.length === 0) return `None of the ${plural(rows.length, 'published correlation')} can be compared with these trials: each needs something that was not measured.`;
+  if (comparable.length === 0)
+    return `None of the ${plural(rows.length, 'published correlation')} can be compared with these trials: each needs something that was not measured.`;
   const fits = rows.find((row) => row.verdict === 'fits as published');
   const scaled = rows.find((row) => row.verdict === 'fits with a rig factor');
   const parts: string[] = [];
   if (fits !== undefined) parts.push(`${name(fits)} fits as published`);
-  if (scaled !== undefined) parts.push(`${name(scaled)} needs a rig factor of ${factor(scaled.rigFactor)} (${factor(scaled.rigFactorLower)} to ${factor(scaled.rigFactorUpper)})`);
-  if (parts.length === 0) parts.push(`None of the ${plural(comparable.length, 'comparable published correlation')} is shown to fit these trials, as it stands or with one factor`);
+  if (scaled !== undefined)
+    parts.push(
+      `${name(scaled)} needs a rig factor of ${factor(scaled.rigFactor)} (${factor(scaled.rigFactorLower)} to ${factor(scaled.rigFactorUpper)})`,
+    );
+  if (parts.length === 0)
+    parts.push(
+      `None of the ${plural(comparable.length, 'comparable published correlation')} is shown to fit these trials, as it stands or with one factor`,
+    );
   const against = fits ?? scaled ?? comparable.find((row) => Number.isFinite(row.cvRmsLnWithFactor));
   const published = against === undefined ? Number.NaN : fits === undefined ? against.cvRmsLnWithFactor : against.cvRmsLnAsPublished;
   if (against !== undefined && Number.isFinite(published) && Number.isFinite(against.cvRmsLnFittedLaw)) {
-    parts.push(`on trials left out, ${lawName} errs by ${error(against.cvRmsLnFittedLaw)} (rms) where ${name(against)} errs by ${error(published)}`);
+    parts.push(
+      `on trials left out, ${lawName} errs by ${error(against.cvRmsLnFittedLaw)} (rms) where ${name(against)} errs by ${error(published)}`,
+    );
   }
   return `${parts.join('; ')}.`;
 };

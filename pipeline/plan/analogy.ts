@@ -29,9 +29,14 @@ export function counterpart(key: Key, to: 'heat' | 'mass'): Key | undefined {
 }
 
 /** The definitions a correlation has on the trials' side, and whether they are its own or by analogy. */
-export function keysOn(correlation: Correlation, transfer: 'heat' | 'mass'): { readonly basis: 'direct' | 'analogy'; readonly keys: Readonly<Record<string, Key>> } | undefined {
+export function keysOn(
+  correlation: Correlation,
+  transfer: 'heat' | 'mass',
+): { readonly basis: 'direct' | 'analogy'; readonly keys: Readonly<Record<string, Key>> } | undefined {
   if (correlation.transfer === transfer) return { basis: 'direct', keys: correlation.groups };
   if (!correlation.analogy) return undefined;
   const keys = Object.entries(correlation.groups).map(([name, key]) => [name, counterpart(key, transfer)] as const);
-  return keys.some(([, key]) => key === undefined) ? undefined : { basis: 'analogy', keys: Object.fromEntries(keys) as Record<string, Key> };
+  return keys.some(([, key]) => key === undefined)
+    ? undefined
+    : { basis: 'analogy', keys: Object.fromEntries(keys) as Record<string, Key> };
 }
