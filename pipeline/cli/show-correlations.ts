@@ -1,0 +1,55 @@
+import { catalogue } from '../../correlations/catalogue.ts';
+import type { Correlation } from '../../correlations/correlation.ts';
+import { evaluateCorrelation } from '../../correlations/evaluate-correlation.ts';
+import { says } from '../base/says/cli.ts';
+import { wrongCommandLine } from './arguments.ts';
+import { atValues } from './at-values.ts';
+import { correlationRecord, matching, type Wanted } from './correlation-record.ts';
+import { listText, numbers, wholeText } from './correlation-text.ts';
+import { EXIT, type Exit } from './exit.ts';
+import type { Terminal } from './terminal.ts';
+
+/** What `pilotlaw correlations` was asked for. */
+export interface CorrelationsRequest extends Wanted {
+  readonly id?: string;
+  readonly at?: string;
+  readonly json: boolean;
+}
+
+/** Lists the published correlations, shows one in full, or evaluates one. */
+export async function showCorrelations(asked: CorrelationsRequest, terminal: Terminal): Promise<Exit> {
+  const { id, at, json } = asked;
+  if (id === undefined && at !== undefined) throw wrongCommandLine(says.atNeedsId);
+  const entries = id === undefined ? matching(catalogue, asked) : [byId(id)];
+  if (entries.length === 0 && !json) throw wrongCommandLine(says.noneMatch);
+  if (at !== undefined) terminal.out(`${valueAt(entries[0]!, at, json)}\n`);
+  else if (json) terminal.out(`${JSON.stringify(entries.map(correlationRecord), null, 2)}\n`);
+  else terminal.out(`${id === undefined ? listText(entries) : wholeText(entries[0]!)}\n`);
+  return EXIT.done;
+}
+
+function byId(id: string): Correlation {
+  const entry = catalogue.find((one) => one.id === id);
+  if (entry === undefined)
+    throw wrongCommandLine(
+      says.noCorrelation(
+        id,
+        catalogue.map((one) => one.id),
+      ),
+    );
+  return entry;
+}
+
+function valueAt(entry: Correlation, at: string, json: boolean): string {
+  const needs = [...new Set([...entry.form.groups])];
+  const values = atValues(at, needs);
+  const { value, limits } = evaluateCorrelation(entry, values);
+  if (!Number.isFinite(value)) throw wrongCommandLine(says.atNoValue(entry.form.response));
+  const inRange = limits.every(({ inside }) => inside);
+  if (json) return JSON.stringify({ id: entry.id, gives: entry.form.response, value, in_range: inRange, limits });
+  const lines = limits.map(({ says: text, inside }) => `    ${text}: ${inside ? says.inside : says.outside}`);
+  return [
+    `${entry.form.response} = ${Number(value.toPrecision(6))} at ${numbers(values)}: ${inRange ? says.inRange : says.outOfRange}`,
+    ...lines,
+  ].join('\n');
+}

@@ -1,0 +1,9 @@
+import { readFileSync } from 'node:fs';
+import { join } from 'node:path';
+import { expect, test } from 'vitest';
+import { version } from '../../pipeline/base/version.ts';
+
+test('the version is that of package.json', () => {
+  const manifest = JSON.parse(readFileSync(join(import.meta.dirname, '../../package.json'), 'utf8')) as { version: string };
+  expect(version).toBe(manifest.version);
+});
