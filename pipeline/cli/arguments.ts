@@ -25,4 +25,10 @@ export function wholeOption(given: Given, option: string, from: number, to: numb
   return number;
 }
 
-export const flag = (given: Given, option: string): boolean => given[option] === true;
+/** An option without a value: there or not. */
+export function flag(given: Given, option: string): boolean {
+  const value = given[option];
+  if (value === undefined) return false;
+  if (value !== true) throw wrongCommandLine(Array.isArray(value) ? says.optionTwice(option) : says.optionTakesNoValue(option));
+  return true;
+}

@@ -1,11 +1,12 @@
 import { says } from '../base/says/cli.ts';
-import type { Command } from './command-line.ts';
+import type { Command } from './command.ts';
 
 /** `pilotlaw check STUDY...` */
 export const checkCommand: Command = {
-  usage: 'check <study..>',
+  name: 'check',
   about: says.check,
-  options: (y) => y.positional('study', { type: 'string', describe: says.positionalStudy }),
+  takes: [{ name: 'STUDY', about: says.positionalStudy, many: true }],
+  options: [],
   run: async (given, terminal) => {
     const { checkStudies } = await import('./check-studies.ts');
     return checkStudies(given.study as readonly string[], terminal);

@@ -1,108 +1,89 @@
-import yargs, { type Argv, type CommandModule } from 'yargs';
 import { says } from '../base/says/cli.ts';
 import { version } from '../base/version.ts';
 import { type Given, wrongCommandLine } from './arguments.ts';
 import { beginCommand } from './begin-command.ts';
 import { checkCommand } from './check-command.ts';
+import { type Command, usage } from './command.ts';
 import { correlationsCommand } from './correlations-command.ts';
 import { EXIT, type Exit, tell } from './exit.ts';
+import { commandHelp, overview } from './help.ts';
 import { nextTrialsCommand } from './next-trials-command.ts';
 import { predictCommand } from './predict-command.ts';
 import { runCommand } from './run-command.ts';
 import type { Terminal } from './terminal.ts';
 
-/** One command: how it is written, what it takes, and what it does. What it needs beyond that it imports when it runs, so that `--help` stays fast. */
-export interface Command {
-  readonly usage: string;
-  readonly about: string;
-  readonly options: (y: Argv) => Argv;
-  readonly run: (given: Given, terminal: Terminal) => Promise<Exit>;
-}
-
 const commands: readonly Command[] = [runCommand, checkCommand, beginCommand, correlationsCommand, predictCommand, nextTrialsCommand];
-
-const nameOf = ({ usage }: Command): string => usage.split(' ')[0]!;
 
 /** Runs the program for the words after its name; never throws. */
 export async function commandLine(words: readonly string[], terminal: Terminal): Promise<Exit> {
-  let exit: Exit = EXIT.done;
-  const done = (code: Exit): void => {
-    exit = code;
-  };
+  const command = commands.find(({ name }) => name === words[0]);
   try {
-    await parser(words, terminal, done).parseAsync([...words], {}, (_error, _given, output) => {
-      if (output !== '') terminal.out(`${output}\n`);
-    });
-    return exit;
+    if (words.includes('--help') || words.includes('-h')) {
+      terminal.out(`${command === undefined ? overview(commands) : commandHelp(command)}\n`);
+      return EXIT.done;
+    }
+    if (words.includes('--version')) {
+      terminal.out(`${version}\n`);
+      return EXIT.done;
+    }
+    if (command === undefined) throw wrongCommandLine(noCommand(words));
+    return await command.run(await parsed(command, words.slice(1)), terminal);
   } catch (error) {
     return tell(error, terminal);
   }
 }
 
-function parser(words: readonly string[], terminal: Terminal, done: (exit: Exit) => void): Argv {
-  const base = yargs()
-    .scriptName('pilotlaw')
+function noCommand(words: readonly string[]): string {
+  const names = commands.map(({ name }) => name);
+  const first = words.find((word) => !word.startsWith('-'));
+  return first === undefined ? says.noCommand(names) : says.unknownCommand(first, names);
+}
+
+/** The words after the command's name, by the names of its arguments and options. Throws (exit 2) on what it does not take. */
+async function parsed(command: Command, words: readonly string[]): Promise<Given> {
+  const { default: yargs } = await import('yargs');
+  const parser = yargs()
     .detectLocale(false)
     .exitProcess(false)
-    .strict()
-    .demandCommand(1)
-    .usage(`pilotlaw COMMAND\n\n${says.about}`)
-    .epilogue(says.epilogue)
-    .wrap(100)
-    .version('version', says.optionVersion, version)
-    .help('help', says.optionHelp)
+    .help(false)
+    .version(false)
+    .fail((text, error) => {
+      throw error ?? wrongCommandLine(says.notUnderstood(text, usage(command)));
+    })
     .parserConfiguration({
       'parse-numbers': false,
       'parse-positional-numbers': false,
       'boolean-negation': false,
       'camel-case-expansion': false,
+      'dot-notation': false,
+      'short-option-groups': false,
     })
-    .fail((text, error) => {
-      throw error ?? wrongCommandLine(ourWords(text, words));
-    });
-  return commands.reduce((y, command) => y.command(asModule(command, terminal, done)), base);
+    .string('_')
+    .options(
+      Object.fromEntries(
+        command.options.map(({ name, value }) => [name, { type: value === undefined ? ('boolean' as const) : ('string' as const) }]),
+      ),
+    );
+  const { _: plain, $0: _name, ...options } = await parser.parseAsync([...words]);
+  refuseUnknown(command, Object.keys(options));
+  return { ...options, ...placed(command, plain.map(String)) };
 }
 
-function asModule(command: Command, terminal: Terminal, done: (exit: Exit) => void): CommandModule {
-  return {
-    command: command.usage,
-    describe: command.about,
-    builder: (y) => command.options(y),
-    handler: async (given) => done(await command.run(given, terminal)),
-  };
+function refuseUnknown(command: Command, given: readonly string[]): void {
+  const known = command.options.map(({ name }) => name);
+  const unknown = given.find((name) => !known.includes(name));
+  if (unknown !== undefined) throw wrongCommandLine(says.unknownOption(unknown, known));
 }
 
-/** What the parser of the command line found, said as we say it. */
-function ourWords(text: string, words: readonly string[]): string {
-  const names = commands.map(nameOf);
-  const command = commands.find((one) => nameOf(one) === words[0]);
-  if (command === undefined) {
-    const first = words.find((word) => !word.startsWith('-'));
-    return first === undefined ? says.noCommand(names) : says.unknownCommand(first, names);
+/** The words that are no options, by the arguments in their order. */
+function placed(command: Command, words: readonly string[]): Given {
+  const given: Record<string, string | readonly string[]> = {};
+  let rest = words;
+  for (const { name, many, optional } of command.takes) {
+    if (rest.length === 0 && !optional) throw wrongCommandLine(says.argumentMissing(name, usage(command)));
+    if (rest.length > 0) given[name.toLowerCase()] = many ? rest : rest[0]!;
+    rest = many ? [] : rest.slice(1);
   }
-  const unknown = /^Unknown arguments?: (.*)$/.exec(text)?.[1];
-  if (unknown !== undefined) return unknownArgument(unknown.split(', ')[0]!, command, words);
-  if (text.startsWith('Not enough non-option arguments')) return says.argumentMissing(usageOf(command));
-  return says.notUnderstood(text, usageOf(command));
+  if (rest.length > 0) throw wrongCommandLine(says.tooManyArguments(rest[0]!, usage(command)));
+  return given;
 }
-
-function unknownArgument(name: string, command: Command, words: readonly string[]): string {
-  const isOption = words.some((word) => word === `-${name}` || word === `--${name}` || word.startsWith(`--${name}=`));
-  return isOption ? says.unknownOption(name, optionNames(command)) : says.tooManyArguments(name, usageOf(command));
-}
-
-/** Names of a command's own options, from its builder. */
-function optionNames(command: Command): readonly string[] {
-  const names = new Set<string>();
-  const listen = new Proxy({} as Argv, {
-    get: (_, method) => (name: unknown) => {
-      if (method === 'option' && typeof name === 'string') names.add(name);
-      return listen;
-    },
-  });
-  command.options(listen);
-  return [...names];
-}
-
-const usageOf = ({ usage }: Command): string =>
-  `pilotlaw ${usage.replace(/<(\w+)(\.\.)?>/g, (_, name: string, more?: string) => name.toUpperCase() + (more === undefined ? '' : '...')).replace(/\[(\w+)\]/g, (_, name: string) => `[${name.toUpperCase()}]`)}`;

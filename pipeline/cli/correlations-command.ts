@@ -1,19 +1,19 @@
 import { says } from '../base/says/cli.ts';
 import { flag, textOption } from './arguments.ts';
-import type { Command } from './command-line.ts';
+import type { Command } from './command.ts';
 
 /** `pilotlaw correlations [ID]` */
 export const correlationsCommand: Command = {
-  usage: 'correlations [id]',
+  name: 'correlations',
   about: says.correlations,
-  options: (y) =>
-    y
-      .positional('id', { type: 'string', describe: says.positionalId })
-      .option('family', { type: 'string', describe: says.optionFamily })
-      .option('gives', { type: 'string', describe: says.optionGives })
-      .option('search', { type: 'string', describe: says.optionSearch })
-      .option('at', { type: 'string', describe: says.optionAt })
-      .option('json', { type: 'boolean', describe: says.optionJson }),
+  takes: [{ name: 'ID', about: says.positionalId, optional: true }],
+  options: [
+    { name: 'family', value: 'NAME', about: says.optionFamily },
+    { name: 'gives', value: 'NAME', about: says.optionGives },
+    { name: 'search', value: 'TEXT', about: says.optionSearch },
+    { name: 'at', value: 'TEXT', about: says.optionAt },
+    { name: 'json', about: says.optionJson },
+  ],
   run: async (given, terminal) => {
     const request = {
       id: textOption(given, 'id'),

@@ -1,17 +1,17 @@
 import { says } from '../base/says/cli.ts';
 import { flag, wholeOption } from './arguments.ts';
-import type { Command } from './command-line.ts';
+import type { Command } from './command.ts';
 
 /** `pilotlaw next-trials STUDY` */
 export const nextTrialsCommand: Command = {
-  usage: 'next-trials <study>',
+  name: 'next-trials',
   about: says.nextTrials,
-  options: (y) =>
-    y
-      .positional('study', { type: 'string', describe: says.positionalStudy })
-      .option('count', { type: 'string', describe: says.optionCount })
-      .option('seed', { type: 'string', describe: says.optionSeed })
-      .option('json', { type: 'boolean', describe: says.optionJson }),
+  takes: [{ name: 'STUDY', about: says.positionalStudy }],
+  options: [
+    { name: 'count', value: 'N', about: says.optionCount },
+    { name: 'seed', value: 'N', about: says.optionSeed },
+    { name: 'json', about: says.optionJson },
+  ],
   run: async (given, terminal) => {
     const request = {
       study: String(given.study),

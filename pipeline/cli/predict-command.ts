@@ -1,18 +1,20 @@
 import { says } from '../base/says/cli.ts';
 import { flag, textOption } from './arguments.ts';
-import type { Command } from './command-line.ts';
+import type { Command } from './command.ts';
 
 /** `pilotlaw predict LAWS PLANT` */
 export const predictCommand: Command = {
-  usage: 'predict <laws> <plant>',
+  name: 'predict',
   about: says.predict,
-  options: (y) =>
-    y
-      .positional('laws', { type: 'string', describe: says.positionalLaws })
-      .positional('plant', { type: 'string', describe: says.positionalPlant })
-      .option('law', { type: 'string', describe: says.optionLaw })
-      .option('out', { type: 'string', describe: says.optionOutFile })
-      .option('json', { type: 'boolean', describe: says.optionJson }),
+  takes: [
+    { name: 'LAWS', about: says.positionalLaws },
+    { name: 'PLANT', about: says.positionalPlant },
+  ],
+  options: [
+    { name: 'law', value: 'NAME', about: says.optionLaw },
+    { name: 'out', value: 'FILE', about: says.optionOutFile },
+    { name: 'json', about: says.optionJson },
+  ],
   run: async (given, terminal) => {
     const request = {
       laws: String(given.laws),

@@ -1,23 +1,23 @@
 import { says } from '../base/says/cli.ts';
 import { flag, textOption, wholeOption } from './arguments.ts';
-import type { Command } from './command-line.ts';
+import type { Command } from './command.ts';
 
 const MOST_JOBS = 64;
 const MOST_SEED = 4_294_967_295;
 
 /** `pilotlaw run STUDY...` */
 export const runCommand: Command = {
-  usage: 'run <study..>',
+  name: 'run',
   about: says.run,
-  options: (y) =>
-    y
-      .positional('study', { type: 'string', describe: says.positionalStudy })
-      .option('out', { type: 'string', describe: says.optionOut })
-      .option('jobs', { type: 'string', describe: says.optionJobs })
-      .option('seed', { type: 'string', describe: says.optionSeed })
-      .option('fresh', { type: 'boolean', describe: says.optionFresh })
-      .option('quiet', { type: 'boolean', describe: says.optionQuiet })
-      .option('json', { type: 'boolean', describe: says.optionJson }),
+  takes: [{ name: 'STUDY', about: says.positionalStudy, many: true }],
+  options: [
+    { name: 'out', value: 'DIR', about: says.optionOut },
+    { name: 'jobs', value: 'N', about: says.optionJobs },
+    { name: 'seed', value: 'N', about: says.optionSeed },
+    { name: 'fresh', about: says.optionFresh },
+    { name: 'quiet', about: says.optionQuiet },
+    { name: 'json', about: says.optionJson },
+  ],
   run: async (given, terminal) => {
     const request = {
       studies: given.study as readonly string[],

@@ -6,15 +6,19 @@ export const says = {
     `This is a defect of pilotlaw, not of your files: ${text}\nPlease report it with the command you gave, the study file, and what the same command prints with PILOTLAW_DEBUG=1 set.`,
 
   about:
-    'From tabulated pilot trials to a heat or mass transfer law, its audit against published correlations, and plant cases with intervals.',
-  epilogue:
-    'Exit codes: 0 all done, 2 the command line or a study file is wrong, 3 data that cannot be used, 4 some of several studies failed, 1 a defect of pilotlaw.\nThe numbers are input to a review by a qualified engineer; local codes and standards and licensed practice come first.',
-  run: 'Compute studies: study files, or folders that hold study.yaml',
-  check: 'Validate studies and explain what is given, derived and missing; computes nothing',
-  begin: 'Write a commented study file guessed from the headers and units of a table of trials',
+    'From tabulated pilot trials to a heat or mass transfer law, its audit against\npublished correlations, and plant cases with intervals.',
+  epilogue: [
+    'Exit codes: 0 all done; 2 the command line or a study file is wrong; 3 data that cannot be used;',
+    '4 some of several studies failed; 1 a defect of pilotlaw.',
+    'The numbers are input to a review by a qualified engineer; local codes and standards and',
+    'licensed practice come first.',
+  ].join('\n'),
+  run: 'Compute studies: results and a report for each',
+  check: 'Validate studies, explain what is given, derived, missing',
+  begin: 'Write a commented study file from the headers of a table',
   correlations: 'List the published correlations, or show one in full',
   predict: 'Apply the law of a laws.json to a table of plant cases',
-  nextTrials: 'Propose the further trials that would narrow the plant prediction most',
+  nextTrials: 'Propose the trials that would narrow the plant prediction most',
 
   optionOut: 'Folder for the results (several studies: one folder each inside it)',
   optionJobs: 'Studies and resamples that run at the same time',
@@ -36,7 +40,7 @@ export const says = {
   positionalId: 'Identifier, such as churchill-bernstein-1977',
   positionalLaws: 'results/laws.json of a study',
   positionalPlant: 'Table of plant cases: columns are quantities with units',
-  optionHelp: 'Show help',
+  optionHelp: 'Show this help, or that of a command',
   optionVersion: 'Show the version',
 
   noCommand: (known: readonly string[]): string => `give a command: ${known.join(', ')}; pilotlaw --help tells what they do`,
@@ -46,12 +50,13 @@ export const says = {
     const meant = didYouMean(name, known);
     return `unknown option --${name}${meant === '' ? `; options here are ${known.map((one) => `--${one}`).join(', ')}` : meant.replace('"', '"--')}`;
   },
-  argumentMissing: (usage: string): string => `an argument is missing; the command is: ${usage}`,
+  argumentMissing: (name: string, usage: string): string => `${name} is missing; the command is: ${usage}`,
   tooManyArguments: (word: string, usage: string): string => `"${word}" is one argument too many; the command is: ${usage}`,
   notUnderstood: (text: string, usage: string): string => `${text}; the command is: ${usage}`,
   notANumber: (option: string, value: string, from: number, to: number): string =>
     `--${option}: "${value}" is not a whole number from ${from} to ${to}`,
   optionEmpty: (option: string): string => `--${option} is given without a value`,
+  optionTakesNoValue: (option: string): string => `--${option} takes no value`,
   optionTwice: (option: string): string => `--${option} is given twice; give it once`,
 
   sharedFolder: (folder: string, other: string): string =>
