@@ -5,7 +5,7 @@ import type { Condition, Fluid, PropertyModel, Range } from './property-model.ts
 import { type Conditions, propertyRules, type Stream } from './property-rules.ts';
 import { type Grid, grid } from './table-grid.ts';
 
-/** A user's table of properties, parsed: every column in SI, all of one length, finite. */
+/** A user's table of properties, parsed: every column in SI, all of one length. */
 export interface PropertyTable {
   /** As the reader knows it: `glycol.csv`. */
   readonly file: string;
@@ -36,7 +36,13 @@ export function tableRules({ file, stream, by, columns, at }: PropertyTable): {
   readonly rules: readonly Rule[];
   readonly faults: readonly string[];
 } {
-  const axes = by.map((name) => columns[name] ?? []);
+  const wrong = [
+    ...by.filter((name) => !tableConditions.includes(name)).map((name) => says.tableBy(name, tableConditions)),
+    ...by.filter((name) => columns[name] === undefined).map(says.tableNoColumn),
+  ];
+  const broken = Object.keys(columns).filter((name) => !columns[name]!.every(Number.isFinite));
+  if (wrong.length + broken.length > 0) return { rules: [], faults: [...wrong, ...broken.map(says.tableNotNumbers)] };
+  const axes = by.map((name) => columns[name]!);
   const properties = Object.keys(columns).filter((name) => !by.includes(name));
   if (properties.length === 0) return { rules: [], faults: [says.tableEmpty(by)] };
   const made = properties.map((property) => ({ property, ...grid(axes, by, columns[property]!) }));

@@ -92,6 +92,17 @@ describe('a table that is none is told what is wrong', () => {
       told(['temperature', 'mass_fraction'], { temperature: [300, 310, 300], mass_fraction: [0.1, 0.1, 0.2], density: [1, 2, 3] }),
       /no row for temperature 36.85 degC, mass_fraction 0.2; it must give every combination/,
     ],
+    [
+      'an axis that is none',
+      told(['velocity'], { velocity: [1, 2], density: [1, 2] }),
+      /cannot run over velocity; it runs over one or two of temperature/,
+    ],
+    ['an axis that is missing', told(['temperature'], { density: [1, 2] }), /no column temperature/],
+    [
+      'a cell that is none',
+      told(['temperature'], { temperature: [300, Number.NaN], density: [1, 2] }),
+      /a temperature that is not a number/,
+    ],
     ['nothing to look up', told(['temperature'], { temperature: [300, 310] }), /no column besides temperature/],
     ['a viscosity of zero', told(['temperature'], { temperature: [300, 310], viscosity: [1, 0] }), /a viscosity that is not above zero/],
   ])('%s', (_, faults, expected) => {

@@ -52,6 +52,10 @@ export const says = {
 
   outsideTable: (name: string, value: number, from: number, to: number): string =>
     `${condition(name, value)} is outside the table, which runs from ${condition(name, from)} to ${condition(name, to)}; nothing is extrapolated, so add rows to it`,
+  tableBy: (name: string, known: readonly string[]): string =>
+    `a table of properties cannot run over ${name}; it runs over one or two of ${known.join(', ')}`,
+  tableNoColumn: (name: string): string => `the table of properties has no column ${name}, over which it is to run`,
+  tableNotNumbers: (name: string): string => `the table of properties has a ${name} that is not a number`,
   tableShort: (name: string): string => `the table of properties needs at least two different values of ${name}`,
   tableTwice: (names: readonly string[], values: readonly number[]): string =>
     `the table of properties has two rows for ${conditions(names, values)}`,
