@@ -2,6 +2,7 @@ import { constant, group, mul, pow } from '../algebra/build.ts';
 import type { Form } from '../algebra/form.ts';
 import type { Observations } from '../observations/observation.ts';
 import type { Fit, FitData, FitOptions } from '../regression/fit.ts';
+import { outerProduct } from '../regression/fit-data.ts';
 import { fitLaw } from '../regression/fit-law.ts';
 import type { Comparison } from './ratio.ts';
 
@@ -54,26 +55,11 @@ export function ratioData(
     campaigns: names.map((campaign) => observations.campaigns[campaign]!),
     y: Float64Array.from(trials, (i) => lnRatio[i]!),
     x: groups.map((g, k) => Float64Array.from(trials, (i) => observations.z[rows[g + 1]!]![i]! - centre[k]!)),
-    sigma: trials.map((i) => outer(project(observations.random[i]!, observations.randomInputs.length, i), 1 + groups.length)),
+    sigma: trials.map((i) => outerProduct(project(observations.random[i]!, observations.randomInputs.length, i), 1 + groups.length)),
     sources: observations.sources,
     systematic: trials.map((i) => project(observations.systematic[i]!, observations.sources.length, i)),
     scale: 'relative',
   };
-}
-
-/** D D^T of a rows x width block. */
-export function outer(block: Float64Array, rows: number): Float64Array {
-  const width = block.length / rows;
-  const out = new Float64Array(rows * rows);
-  for (let a = 0; a < rows; a++) {
-    for (let b = 0; b <= a; b++) {
-      let sum = 0;
-      for (let j = 0; j < width; j++) sum += block[a * width + j]! * block[b * width + j]!;
-      out[a * rows + b] = sum;
-      out[b * rows + a] = sum;
-    }
-  }
-  return out;
 }
 
 /** q = C * x1^b1 * x2^b2 ... */

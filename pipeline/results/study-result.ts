@@ -57,7 +57,15 @@ export interface Choice {
   readonly law: string;
   readonly why: string;
   /** One row a law; best first. */
-  readonly compared: readonly { readonly law: string; readonly parameters: number; readonly aicc: number; readonly bic: number; readonly cvRmsLn: number; readonly accepted: boolean; readonly says: string }[];
+  readonly compared: readonly {
+    readonly law: string;
+    readonly parameters: number;
+    readonly aicc: number;
+    readonly bic: number;
+    readonly cvRmsLn: number;
+    readonly accepted: boolean;
+    readonly says: string;
+  }[];
 }
 
 /** Exponent against theory: 1/3, 1/2, 0.8, offset 2 ... */
@@ -99,14 +107,37 @@ export interface Identifiability {
 /** The whole result of one study: plain JSON, the only thing that reports and the writers see. */
 export interface StudyResult {
   readonly format: 1;
-  readonly study: { readonly title: string; readonly transfer: 'heat' | 'mass'; readonly equipment: string; readonly file: string; readonly invented: boolean; readonly fluid: string; readonly route: string };
-  readonly options: { readonly error: 'relative' | 'absolute'; readonly weights: string; readonly scatter: string; readonly campaignEffect: string; readonly confidence: number; readonly resamples: number; readonly tolerance: number };
+  readonly study: {
+    readonly title: string;
+    readonly transfer: 'heat' | 'mass';
+    readonly equipment: string;
+    readonly file: string;
+    readonly invented: boolean;
+    readonly fluid: string;
+    readonly route: string;
+  };
+  readonly options: {
+    readonly error: 'relative' | 'absolute';
+    readonly weights: string;
+    readonly scatter: string;
+    readonly campaignEffect: string;
+    readonly confidence: number;
+    readonly resamples: number;
+    readonly tolerance: number;
+  };
   /** What the laws give and the coefficient behind it. */
   readonly response: Definition;
   readonly coefficient: { readonly key: string; readonly symbol: string; readonly unit: string } | null;
   /** Response and all groups of all laws: the columns of the trial table. */
   readonly columns: readonly Definition[];
-  readonly ledger: { readonly read: number; readonly used: number; readonly leftOut: number; readonly refused: number; readonly trials: number; readonly rows: readonly LedgerRow[] };
+  readonly ledger: {
+    readonly read: number;
+    readonly used: number;
+    readonly leftOut: number;
+    readonly refused: number;
+    readonly trials: number;
+    readonly rows: readonly LedgerRow[];
+  };
   readonly campaigns: readonly string[];
   readonly trials: readonly TrialRow[];
   readonly fits: readonly Fit[];
@@ -121,7 +152,14 @@ export interface StudyResult {
   readonly nextTrials: NextTrialsResult | null;
   readonly budgets: readonly Budget[];
   /** Logged curves behind a coefficient, thinned for drawing: t in s. */
-  readonly series: readonly { readonly trial: string; readonly quantity: string; readonly unit: string; readonly t: readonly number[]; readonly value: readonly number[]; readonly fitted: readonly number[] }[];
+  readonly series: readonly {
+    readonly trial: string;
+    readonly quantity: string;
+    readonly unit: string;
+    readonly t: readonly number[];
+    readonly value: readonly number[];
+    readonly fitted: readonly number[];
+  }[];
   readonly notes: readonly Note[];
   readonly method: {
     readonly rules: readonly { readonly gives: string; readonly formula: string; readonly source: string }[];
@@ -130,5 +168,10 @@ export interface StudyResult {
     readonly statements: readonly string[];
   };
   readonly cautions: readonly string[];
-  readonly provenance: { readonly version: string; readonly node: string; readonly seed: number; readonly files: readonly { readonly file: string; readonly sha256: string }[] };
+  readonly provenance: {
+    readonly version: string;
+    readonly node: string;
+    readonly seed: number;
+    readonly files: readonly { readonly file: string; readonly sha256: string }[];
+  };
 }

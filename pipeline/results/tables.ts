@@ -7,7 +7,10 @@ type Columns = Record<string, readonly Cell[]>;
 
 /** A table by columns; a number that does not exist becomes an empty cell, a name is guarded against spreadsheet formulas. */
 function columns(entries: Columns): ColumnTable {
-  const clean = Object.entries(entries).map(([name, values]) => [guarded(name), values.map((value) => (typeof value === 'string' ? guarded(value) : Number.isNaN(value) ? null : value))] as const);
+  const clean = Object.entries(entries).map(
+    ([name, values]) =>
+      [guarded(name), values.map((value) => (typeof value === 'string' ? guarded(value) : Number.isNaN(value) ? null : value))] as const,
+  );
   return table(clean as [string, (string | number | null)[]][]);
 }
 
@@ -15,9 +18,11 @@ function columns(entries: Columns): ColumnTable {
 export function trialsTable(result: StudyResult): ColumnTable {
   const used = new Map(result.trials.map((trial, i) => [trial.trial, { trial, i }]));
   const rows = result.ledger.rows.map((row) => ({ row, found: row.status === 'used' ? used.get(row.trial) : undefined }));
-  const number = (pick: (trial: TrialRow, i: number) => number): readonly number[] => rows.map(({ found }) => (found === undefined ? Number.NaN : pick(found.trial, found.i)));
+  const number = (pick: (trial: TrialRow, i: number) => number): readonly number[] =>
+    rows.map(({ found }) => (found === undefined ? Number.NaN : pick(found.trial, found.i)));
   const fit = result.fits.find((one) => one.name === result.chosen);
-  const diagnostic = (pick: (d: NonNullable<typeof fit>['diagnostics']) => readonly number[]): readonly number[] => number((_, i) => (fit === undefined ? Number.NaN : (pick(fit.diagnostics)[i] ?? Number.NaN)));
+  const diagnostic = (pick: (d: NonNullable<typeof fit>['diagnostics']) => readonly number[]): readonly number[] =>
+    number((_, i) => (fit === undefined ? Number.NaN : (pick(fit.diagnostics)[i] ?? Number.NaN)));
   return columns({
     trial: rows.map(({ row }) => row.trial),
     campaign: rows.map(({ row }) => row.campaign),
@@ -70,9 +75,13 @@ export function plantTable(result: StudyResult): ColumnTable | undefined {
   const plant = result.plant;
   if (plant === null) return undefined;
   const rows = plant.cases.flatMap((one) => one.predictions.map((prediction, k) => ({ one, prediction, first: k === 0 })));
-  const keysOf = (pick: (row: (typeof rows)[number]) => Readonly<Record<string, number>>): readonly string[] => [...new Set(rows.flatMap((row) => Object.keys(pick(row))))];
-  const spread = (pick: (row: (typeof rows)[number]) => Readonly<Record<string, number>>): Columns => Object.fromEntries(keysOf(pick).map((key) => [key, rows.map((row) => pick(row)[key] ?? Number.NaN)]));
-  const worst = (of: (typeof rows)[number], kind: string): number => Math.max(...of.one.extrapolation.filter((e) => e.kind === kind).map((e) => e.beyond), 1);
+  const keysOf = (pick: (row: (typeof rows)[number]) => Readonly<Record<string, number>>): readonly string[] => [
+    ...new Set(rows.flatMap((row) => Object.keys(pick(row)))),
+  ];
+  const spread = (pick: (row: (typeof rows)[number]) => Readonly<Record<string, number>>): Columns =>
+    Object.fromEntries(keysOf(pick).map((key) => [key, rows.map((row) => pick(row)[key] ?? Number.NaN)]));
+  const worst = (of: (typeof rows)[number], kind: string): number =>
+    Math.max(...of.one.extrapolation.filter((e) => e.kind === kind).map((e) => e.beyond), 1);
   return columns({
     case: rows.map(({ one }) => one.name),
     law: rows.map(({ prediction }) => prediction.by),

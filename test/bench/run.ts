@@ -1,0 +1,3 @@
+import { commandLine } from './command-line.ts';
+
+for (const line of commandLine()) console.log(line);
