@@ -2,7 +2,7 @@ import type { z } from 'zod';
 import type { Message } from '../base/message.ts';
 import type { Place } from '../base/place.ts';
 import { KEY_BREAK } from './schema-parts.ts';
-import type { Tree } from './yaml-tree.ts';
+import type { Tree } from './tree.ts';
 
 type Issue = z.core.$ZodIssue;
 type Path = readonly PropertyKey[];

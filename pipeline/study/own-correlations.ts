@@ -4,8 +4,9 @@ import { given } from './given.ts';
 import { messagesOf } from './issues.ts';
 import type { OwnCorrelationEntry } from './study.ts';
 import { ownCorrelationsSchema } from './study-schema.ts';
+import { plain, type Tree } from './tree.ts';
 import { child, itemsOf, numberOf, placed, recordOf, textAt } from './view.ts';
-import { plain, readTree, type Tree } from './yaml-tree.ts';
+import { readTree } from './yaml-tree.ts';
 
 /** A user's own published correlations (`audit.own`), as written. Throws one InputError (exit 2) with every fault of the file. */
 export function parseOwnCorrelations(text: string, file: string): readonly OwnCorrelationEntry[] {

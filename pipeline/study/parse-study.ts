@@ -8,8 +8,9 @@ import { readQuantities } from './read-quantity.ts';
 import { readAudit, readFit, readGroups, readOutput, readPlant, readRig, readTrials } from './read-settings.ts';
 import type { Study } from './study.ts';
 import { studySchema } from './study-schema.ts';
+import { plain, type Tree } from './tree.ts';
 import { child, textAt, truthAt, wordAt } from './view.ts';
-import { plain, readTree, type Tree } from './yaml-tree.ts';
+import { readTree } from './yaml-tree.ts';
 
 /**
  * The text of a study file -> its syntax with places. What names, units, formulas and laws mean is settled later.

@@ -3,8 +3,8 @@ import type { Faults } from './faults.ts';
 import { given } from './given.ts';
 import { checkPath } from './paths.ts';
 import type { SeriesEntry, Study } from './study.ts';
+import type { Tree } from './tree.ts';
 import { child, entriesOf, itemsOf, placed, textAt } from './view.ts';
-import type { Tree } from './yaml-tree.ts';
 
 /** The reduction route with its settings as written; what they mean is the route's own matter. */
 export function readCoefficient(tree: Tree | undefined, faults: Faults): Study['coefficient'] {

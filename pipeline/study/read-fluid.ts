@@ -3,8 +3,8 @@ import type { Faults } from './faults.ts';
 import { given } from './given.ts';
 import { checkPath } from './paths.ts';
 import type { FluidEntry, Placed, Study } from './study.ts';
+import type { Tree } from './tree.ts';
 import { child, entriesOf, itemsOf, placed, textAt } from './view.ts';
-import type { Tree } from './yaml-tree.ts';
 
 /** One stream, or `own` and `other`. */
 export function readFluid(tree: Tree | undefined, faults: Faults): Study['fluid'] {

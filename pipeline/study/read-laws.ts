@@ -2,8 +2,8 @@ import { says } from '../base/says/study.ts';
 import type { Faults } from './faults.ts';
 import { given } from './given.ts';
 import type { LawEntry, Placed } from './study.ts';
+import type { Tree } from './tree.ts';
 import { child, itemsOf, numberOf, placed, placedNumber, recordOf, textAt } from './view.ts';
-import type { Tree } from './yaml-tree.ts';
 
 /** The laws in their order; a bare text is named after its place in the list. */
 export function readLaws(tree: Tree | undefined, faults: Faults): readonly LawEntry[] {

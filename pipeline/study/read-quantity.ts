@@ -2,8 +2,8 @@ import { says } from '../base/says/study.ts';
 import type { Faults } from './faults.ts';
 import { given } from './given.ts';
 import type { Placed, QuantityEntry } from './study.ts';
+import type { Tree } from './tree.ts';
 import { child, placed, placedNumber, recordOf, textAt, wordAt } from './view.ts';
-import type { Tree } from './yaml-tree.ts';
 
 /** Where a quantity comes from; exactly one is given. */
 const ORIGINS = ['column', 'value', 'formula'] as const;

@@ -5,8 +5,8 @@ import { checkPath } from './paths.ts';
 import { readFluid } from './read-fluid.ts';
 import { readQuantities } from './read-quantity.ts';
 import type { GroupEntry, Placed, Study } from './study.ts';
+import type { Tree } from './tree.ts';
 import { child, entriesOf, itemsOf, numberOf, placed, recordOf, shareOf, textAt, truthAt, wordAt, written } from './view.ts';
-import type { Tree } from './yaml-tree.ts';
 
 export function readTrials(tree: Tree, faults: Faults): Study['trials'] {
   const short = tree.kind === 'scalar';

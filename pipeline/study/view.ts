@@ -1,6 +1,6 @@
 import type { Place } from '../base/place.ts';
 import type { Placed } from './study.ts';
-import type { MapTree, Tree } from './yaml-tree.ts';
+import type { MapTree, Tree } from './tree.ts';
 
 /** How the parts of a tree that the schema has passed are taken out of it. A key that was given without a value counts as given: the schema has refused it. */
 export const child = (tree: Tree, key: string): Tree | undefined =>
