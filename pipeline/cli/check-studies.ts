@@ -1,6 +1,7 @@
+import { checkStudy } from '../batch/run-study.ts';
 import { findStudies } from '../files/find-studies.ts';
-import { checkStudy } from '../run-study.ts';
 import { EXIT, type Exit, tell, together } from './exit.ts';
+import { fromHere } from './results-folders.ts';
 import type { Terminal } from './terminal.ts';
 
 /** Explains every study, or tells its faults; computes nothing. */
@@ -12,7 +13,7 @@ export async function checkStudies(given: readonly string[], terminal: Terminal)
 
 async function checkOne(study: string, terminal: Terminal): Promise<Exit> {
   try {
-    terminal.out(`${(await checkStudy(study)).trimEnd()}\n`);
+    terminal.out(`${(await checkStudy(fromHere(study))).trimEnd()}\n`);
     return EXIT.done;
   } catch (error) {
     return tell(error, terminal);

@@ -1,4 +1,4 @@
-import { basename, dirname, join, resolve } from 'node:path';
+import { basename, dirname, isAbsolute, join, relative, resolve } from 'node:path';
 import { InputError } from '../base/input-error.ts';
 import { says } from '../base/says/cli.ts';
 
@@ -18,4 +18,10 @@ export function resultsFolders(studies: readonly string[], out: string | undefin
     owner.set(folder, study);
   }
   return new Map([...owner].map(([folder, study]) => [study, folder]));
+}
+
+/** A path as the user would write it: from the folder he is in, where it lies below. */
+export function fromHere(path: string): string {
+  const short = relative(process.cwd(), path);
+  return short === '' || short.startsWith('..') || isAbsolute(short) ? path : short;
 }

@@ -1,8 +1,9 @@
+import { resolve } from 'node:path';
 import { says } from '../base/says/cli.ts';
+import { runStudy } from '../batch/run-study.ts';
 import { findStudies } from '../files/find-studies.ts';
-import { runStudy } from '../run-study.ts';
 import { EXIT, type Exit, tell, together } from './exit.ts';
-import { resultsFolders } from './results-folders.ts';
+import { fromHere, resultsFolders } from './results-folders.ts';
 import type { Terminal } from './terminal.ts';
 
 /** What `pilotlaw run` was asked for. */
@@ -27,16 +28,11 @@ export async function runStudies(asked: RunRequest, terminal: Terminal): Promise
   return together(exits);
 }
 
-async function runOne(
-  study: string,
-  out: string | undefined,
-  { jobs, seed, fresh, quiet, json }: RunRequest,
-  terminal: Terminal,
-): Promise<Exit> {
+async function runOne(study: string, out: string | undefined, { seed, quiet, json }: RunRequest, terminal: Terminal): Promise<Exit> {
   try {
-    const summary = await runStudy(study, { out, jobs, seed, fresh });
+    const summary = await runStudy(fromHere(study), { out, seed });
     if (json) terminal.out(`${JSON.stringify(summary)}\n`);
-    else if (!quiet) terminal.out(`${says.done(summary)}\n`);
+    else if (!quiet) terminal.out(`${says.done(summary.text, fromHere(resolve(summary.folder)), summary.trials, summary.warnings)}\n`);
     return EXIT.done;
   } catch (error) {
     return tell(error, terminal);

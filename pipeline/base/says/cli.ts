@@ -59,6 +59,8 @@ export const says = {
   optionTakesNoValue: (option: string): string => `--${option} takes no value`,
   optionTwice: (option: string): string => `--${option} is given twice; give it once`,
 
+  done: (law: string, folder: string, trials: { readonly read: number; readonly used: number }, warnings: number): string =>
+    `${law}  (${trials.used} of ${trials.read} rows used, ${warnings === 0 ? 'no warnings' : `${warnings} warning${warnings === 1 ? '' : 's'}`}); results in ${folder}, open ${folder}/report.html`,
   sharedFolder: (folder: string, other: string): string =>
     `its results would go into "${folder}", as those of ${other}; run them apart, or let their folders have different names`,
   failedStudies: (failed: number, of: number): string => `${failed} of ${of} studies failed; the results of the others are written`,
