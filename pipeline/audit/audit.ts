@@ -4,8 +4,9 @@ import * as says from '../base/says/audit.ts';
 import type { Staged } from '../base/staged.ts';
 import type { Observations } from '../observations/observation.ts';
 import type { Candidate } from '../plan/plan.ts';
+import { foldsOf } from '../regression/cross-validate.ts';
 import type { FitOptions } from '../regression/fit.ts';
-import { bestOfMany, foldErrors, foldsOf, rms } from './equal-footing.ts';
+import { bestOfMany, foldErrors, rms } from './equal-footing.ts';
 import { judge, leastTrials } from './judge.ts';
 import { type Comparison, compare } from './ratio.ts';
 import type { AuditResult, AuditRow, VerdictWord } from './verdict.ts';
@@ -31,7 +32,7 @@ const order: readonly VerdictWord[] = [
 
 /** Every candidate against the same observations; best first. */
 export function audit(candidates: readonly Candidate[], observations: Observations, spec: AuditSpec): Staged<AuditResult> {
-  const folds = foldsOf(observations.campaign, observations.campaigns.length);
+  const { folds } = foldsOf(observations.campaign, observations.campaigns.length);
   const prepared = candidates.map((candidate) => ({
     candidate,
     comparison: candidate.lacks.length > 0 ? undefined : compare(candidate.correlation, candidate.basis, candidate.keys, observations),

@@ -1,13 +1,5 @@
 import type { Comparison } from './ratio.ts';
 
-/** Trials left out together: campaigns where there are three or more, else single trials, else tenths of a long study. */
-export function foldsOf(campaign: readonly number[], campaigns: number): readonly (readonly number[])[] {
-  const n = campaign.length;
-  if (campaigns >= 3) return Array.from({ length: campaigns }, (_, c) => campaign.flatMap((own, i) => (own === c ? [i] : [])));
-  const folds = n <= 60 ? n : 10;
-  return Array.from({ length: folds }, (_, f) => campaign.flatMap((_own, i) => (i % folds === f ? [i] : [])));
-}
-
 /** Out-of-sample ln errors of one correlation on its in-range trials: as published, and with the factor refitted without the fold. */
 export interface FoldErrors {
   readonly asPublished: readonly number[];

@@ -1,2 +1,2 @@
-/** Version of this package; the test beside it holds it to package.json. */
+/** The same as in package.json; test/base/version.test.ts holds them together. */
 export const version = '0.1.0';

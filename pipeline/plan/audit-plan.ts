@@ -1,6 +1,9 @@
 import type { Correlation } from '../../correlations/correlation.ts';
 import * as says from '../base/says/plan.ts';
 import { definitionText } from '../groups/definition.ts';
+import { isFault } from '../quantities/fault.ts';
+import { fromSI } from '../quantities/unit.ts';
+import { unitFor } from '../quantities/unit-for.ts';
 import { quantityOf } from '../quantities/vocabulary.ts';
 import type { Key, Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
@@ -57,11 +60,24 @@ export function trustRules(candidates: readonly Applicable[], { onTrust }: Group
       {
         gives: key,
         from: [name],
-        of: (x: number) => x,
+        of: (...x: number[]) => x[0]!,
         formula: `${name} as in the table`,
         source: "the study's own column",
         assumes: says.onTrust(name),
-      } as Rule,
+      },
+    ];
+  });
+}
+
+/** Quantities that a user's correlation takes in a unit of its own: `velocity [ft/s]`. */
+export function unitRules(candidates: readonly Applicable[]): readonly Rule[] {
+  const keys = new Set(candidates.filter((one) => one.own).flatMap((one) => Object.values(one.keys)));
+  return [...keys].flatMap((key) => {
+    const [, name, text] = /^(.+) \[(.+)\]$/.exec(key) ?? [];
+    const unit = name === undefined ? undefined : unitFor(quantityOf(name), text!);
+    if (name === undefined || unit === undefined || isFault(unit)) return [];
+    return [
+      { gives: key, from: [name], of: (...x: number[]) => fromSI(x[0]!, unit), formula: `${name} in ${text}`, source: 'unit conversion' },
     ];
   });
 }

@@ -9,7 +9,7 @@ import type { Input, Key, Missing, Recipe, Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
 import { families } from '../study/study-schema.ts';
 import type { Table } from '../trials/table.ts';
-import { type Applicable, applicable, keyText, trustRules } from './audit-plan.ts';
+import { type Applicable, applicable, keyText, trustRules, unitRules } from './audit-plan.ts';
 import { type CoefficientPlan, planCoefficient } from './coefficient-plan.ts';
 import { Faults } from './faults.ts';
 import { planFluids } from './fluid-plan.ts';
@@ -56,7 +56,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanI
   const { laws, rules } = planLaws({ study, groups: groups.keys, dimensions: quantities.dimensions, canHave }, faults);
   checkReferences(study, canHave, faults);
   faults.throwIfAny();
-  const book = ruleBook([...base, ...rules, ...trustRules(asked, groups)]);
+  const book = ruleBook([...base, ...rules, ...trustRules(asked, groups), ...unitRules(asked)]);
   const settled = settle(study, book, inputs, laws, asked, coefficient, faults);
   faults.throwIfAny();
   return {

@@ -1,6 +1,8 @@
 import type { AuditResult } from '../audit/verdict.ts';
 import type { Note } from '../base/message.ts';
 import type { Budget } from '../budget/budget.ts';
+import type { Choice } from '../regression/choose.ts';
+import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 
@@ -53,31 +55,6 @@ export interface TrialRow {
   readonly notes: readonly string[];
 }
 
-export interface Choice {
-  readonly law: string;
-  readonly why: string;
-  /** One row a law; best first. */
-  readonly compared: readonly {
-    readonly law: string;
-    readonly parameters: number;
-    readonly aicc: number;
-    readonly bic: number;
-    readonly cvRmsLn: number;
-    readonly accepted: boolean;
-    readonly says: string;
-  }[];
-}
-
-/** Exponent against theory: 1/3, 1/2, 0.8, offset 2 ... */
-export interface TheoryTest {
-  readonly law: string;
-  readonly parameter: string;
-  readonly theory: string;
-  readonly value: number;
-  readonly compatible: boolean;
-  readonly says: string;
-}
-
 /** One parameter's interval by one method: t, profile, bootstrap. */
 export interface IntervalRow {
   readonly law: string;
@@ -86,22 +63,6 @@ export interface IntervalRow {
   readonly lower: number;
   readonly upper: number;
   readonly note: string;
-}
-
-/** Influence of leaving out one campaign, trial, or of a robust refit, on each exponent of the chosen law. */
-export interface InfluenceRow {
-  readonly kind: 'campaign' | 'trial' | 'robust refit' | 'no errors in x';
-  readonly left: string;
-  readonly values: Readonly<Record<string, number>>;
-}
-
-export interface Identifiability {
-  readonly law: string;
-  readonly conditionIndices: readonly number[];
-  /** One row an index, one column a free parameter. */
-  readonly proportions: readonly (readonly number[])[];
-  readonly parameters: readonly string[];
-  readonly says: readonly string[];
 }
 
 /** The whole result of one study: plain JSON, the only thing that reports and the writers see. */
@@ -175,3 +136,5 @@ export interface StudyResult {
     readonly files: readonly { readonly file: string; readonly sha256: string }[];
   };
 }
+
+export type { Choice, Identifiability, InfluenceRow, TheoryTest };

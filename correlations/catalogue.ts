@@ -1,0 +1,21 @@
+import type { Correlation } from './correlation.ts';
+import { cylinder } from './cylinder/index.ts';
+import { naturalConvection } from './natural-convection/index.ts';
+import { packedBed } from './packed-bed/index.ts';
+import { plate } from './plate/index.ts';
+import { sphere } from './sphere/index.ts';
+import { tube } from './tube/index.ts';
+import { vessel } from './vessel/index.ts';
+import { wettedWall } from './wetted-wall/index.ts';
+
+/** Every published correlation, family by family. */
+export const catalogue: readonly Correlation[] = [
+  ...tube,
+  ...plate,
+  ...cylinder,
+  ...sphere,
+  ...naturalConvection,
+  ...packedBed,
+  ...vessel,
+  ...wettedWall,
+];

@@ -1,0 +1,161 @@
+import { audit } from './audit/audit.ts';
+import type { AuditResult } from './audit/verdict.ts';
+import { InputError } from './base/input-error.ts';
+import type { Note } from './base/message.ts';
+import * as says from './base/says/analyse.ts';
+import type { Staged } from './base/staged.ts';
+import { lawBudgets } from './budget/law-budget.ts';
+import { type Observed, observe } from './observations/observe.ts';
+import { trialInputs } from './observations/trial-inputs.ts';
+import type { Plan } from './plan/plan.ts';
+import { type Choice, type Contender, chooseLaw, isUsable } from './regression/choose.ts';
+import { crossValidate } from './regression/cross-validate.ts';
+import { evidenceOf, type Witness } from './regression/evidence.ts';
+import type { FitOptions } from './regression/fit.ts';
+import { fitData } from './regression/fit-data.ts';
+import { fitLaw, type LawToFit } from './regression/fit-law.ts';
+import { assemble } from './results/assemble.ts';
+import { cautionsFor } from './results/cautions.ts';
+import type { StudyResult } from './results/study-result.ts';
+import type { Key } from './rules/rule.ts';
+import type { Trials } from './trials/read-trials.ts';
+
+/** What a run brings along beside the plan and the trials. */
+export interface RunFacts {
+  readonly version: string;
+  readonly node: string;
+  readonly seed: number;
+  readonly files: readonly { readonly file: string; readonly sha256: string }[];
+}
+
+/**
+ * The whole program on one page: a plan and the trials read for it -> the result of the study. Pure; the disk stays outside.
+ * Throws InputError (exit 3) where the trials cannot carry any of the laws.
+ */
+export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): StudyResult {
+  const { study } = plan;
+  const options = optionsOf(plan, facts.seed);
+
+  // 1. Trials -> observations: ln of every wanted key per trial, with random covariance and systematic slopes.
+  const observed = observe(trialInputs(plan.recipe, read.value), { recipe: plan.recipe, scale: study.fit.error, required: plan.required });
+  const { observations } = observed.value;
+  enoughTrials(plan, observed, read);
+
+  // 2. Observations -> fits: one for each law, each with its stopping reason, intervals and diagnostics.
+  const contenders = plan.laws.map((law): Witness => {
+    const data = fitData(observations, keysOf(law));
+    const fit = fitLaw(law, data, options);
+    return { law, data, fit, cross: crossValidate(law, fit, data, options) };
+  });
+  someUsable(plan, contenders);
+
+  // 3. Fits -> choice: which law, and why; what the trials can tell of it.
+  const choice = chooseLaw(contenders);
+  const chosen = contenders.find(({ fit }) => fit.name === choice.law)!;
+  const evidence = evidenceOf(contenders, { chosen: choice.law, ...orderAndSetting(read.value, observations.trials), options });
+
+  // 4. Audit: every published correlation against the same observations.
+  const audited = auditOf(plan, observed, chosen, choice, options);
+
+  // 5. Budget: which instrument carries the uncertainty of the law.
+  const budget = lawBudgets(
+    chosen.fit,
+    chosen.data,
+    observations,
+    keysOf(chosen.law).map((key) => observations.keys.indexOf(key)),
+  );
+
+  // 6. Everything as plain JSON, the only thing reports and writers see.
+  const notes: readonly Note[] = [
+    ...plan.notes,
+    ...read.notes,
+    ...observed.notes,
+    ...contenders.flatMap(({ fit }) => fit.notes),
+    ...evidence.notes,
+    ...(audited?.notes ?? []),
+  ];
+  return assemble({
+    plan,
+    read,
+    observed,
+    contenders,
+    choice,
+    evidence,
+    audit: audited,
+    plant: null,
+    nextTrials: null,
+    budgets: budget,
+    notes,
+    cautions: cautionsFor(plan),
+    options,
+    facts,
+  });
+}
+
+/** Response, then groups in the form's order. */
+const keysOf = ({ form, groups }: LawToFit): readonly Key[] => [form.response, ...form.groups].map((name) => groups[name]!);
+
+const optionsOf = ({ study: { fit } }: Plan, seed: number): FitOptions => ({
+  scale: fit.error,
+  weights: fit.weights.is === 'uncertainty' || fit.weights.is === 'equal' ? fit.weights.is : 'column',
+  scatter: fit.scatter,
+  campaignEffect: fit.campaignEffect,
+  confidence: fit.confidence,
+  resamples: fit.resamples,
+  seed,
+});
+
+function auditOf(
+  plan: Plan,
+  { value: { observations } }: Staged<Observed>,
+  chosen: Contender,
+  choice: Choice,
+  options: FitOptions,
+): AuditResult | null {
+  if (plan.study.audit === undefined) return null;
+  const weight = chosen.fit.diagnostics.residualSd.map((sd) => 1 / sd ** 2);
+  return audit(plan.candidates, observations, {
+    tolerance: plan.study.audit.tolerance,
+    options,
+    lawErrors: chosen.cross.errors,
+    lawName: choice.law,
+    weight,
+  }).value;
+}
+
+/** Order and setting of the trials that are left, for the looks at residuals. */
+function orderAndSetting(
+  { trials }: Trials,
+  names: readonly string[],
+): { readonly order: readonly (number | undefined)[]; readonly setting: readonly (string | undefined)[] } {
+  const byName = new Map(trials.map((trial) => [trial.trial, trial]));
+  return { order: names.map((name) => byName.get(name)?.order), setting: names.map((name) => byName.get(name)?.setting) };
+}
+
+/** A law needs more trials than it has parameters. */
+function enoughTrials(plan: Plan, observed: Staged<Observed>, read: Staged<Trials>): void {
+  const n = observed.value.observations.trials.length;
+  const least = Math.min(...plan.laws.map((law) => law.form.constants.length)) + 1;
+  if (n >= least) return;
+  const { file } = plan.study.trials.file.place;
+  const reasons = [...read.refused, ...observed.refused].slice(0, 5);
+  throw new InputError(
+    [
+      { code: 'too-few-trials', text: says.tooFewTrials(n, least), place: { file: plan.study.trials.file.is } },
+      ...reasons.map((one) => ({ ...one, place: one.place ?? { file } })),
+    ],
+    3,
+  );
+}
+
+function someUsable(plan: Plan, contenders: readonly Contender[]): void {
+  if (contenders.some(({ fit }) => isUsable(fit))) return;
+  throw new InputError(
+    contenders.map(({ fit }, k) => ({
+      code: 'law-not-fitted',
+      text: says.notFitted(fit.name, fit.stop.why, [...fit.notes.map((note) => note.text)]),
+      place: plan.laws[k]!.place,
+    })),
+    3,
+  );
+}

@@ -1,0 +1,104 @@
+import { dirname, join, resolve } from 'node:path';
+import { analyse, type RunFacts } from '../analyse.ts';
+import { version } from '../base/version.ts';
+import { decodeText } from '../files/decode.ts';
+import { sha256 } from '../files/hash.ts';
+import { pathInside } from '../files/inside.ts';
+import { readBytes } from '../files/read.ts';
+import { explain } from '../plan/explain.ts';
+import { makePlan } from '../plan/make-plan.ts';
+import { ownCorrelations } from '../plan/own-correlations.ts';
+import type { Plan } from '../plan/plan.ts';
+import type { StudyResult } from '../results/study-result.ts';
+import { resultFiles, writeResults } from '../results/write-results.ts';
+import { parseOwnCorrelations } from '../study/own-correlations.ts';
+import { parseStudy } from '../study/parse-study.ts';
+import type { Placed, Study } from '../study/study.ts';
+import { readTable } from '../trials/read-table.ts';
+import { readTrials } from '../trials/read-trials.ts';
+import type { Table } from '../trials/table.ts';
+import { type StudySummary, summaryOf } from './summary.ts';
+
+export interface RunOptions {
+  /** Folder of the results; what the study file says where left out. */
+  readonly out?: string;
+  readonly seed?: number;
+}
+
+const SEED = 1;
+const MOST_STUDY = 1 << 20;
+const MOST_TABLE = 1 << 28;
+
+/** A study read from disk with all it names. */
+interface Loaded {
+  readonly plan: Plan;
+  readonly trials: Table;
+  readonly files: RunFacts['files'];
+}
+
+/** Reads the study file and everything it names; throws one InputError with all faults. */
+export async function loadStudy(file: string): Promise<Loaded> {
+  const folder = dirname(resolve(file));
+  const files: { file: string; sha256: string }[] = [];
+  const bytesOf = (name: string, path: string, place?: Placed<string>['place'], most = MOST_TABLE): Buffer => {
+    const bytes = readBytes(path, { most, name, ...(place === undefined ? {} : { place }) });
+    files.push({ file: name, sha256: sha256(bytes) });
+    return bytes;
+  };
+  const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
+  const study = parseStudy(decodeText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
+  const trials = readTable(inside(study.trials.file), {
+    file: study.trials.file.is,
+    ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),
+    expects: columnsAsked(study),
+  });
+  const tables = new Map<string, Table>();
+  for (const entry of [study.fluid?.own, study.fluid?.other]) {
+    const table = entry?.is.table;
+    if (table !== undefined) tables.set(table.is, readTable(inside(table), { file: table.is }));
+  }
+  const { catalogue } = study.audit === undefined ? { catalogue: [] } : await import('../../correlations/catalogue.ts');
+  const own =
+    study.audit?.own === undefined
+      ? []
+      : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
+  return { plan: makePlan(study, { trials, tables, catalogue, own }), trials, files };
+}
+
+const columnsAsked = (study: Study): readonly string[] =>
+  [
+    study.trials.trial,
+    study.trials.campaign,
+    study.trials.setting,
+    study.trials.order,
+    ...Object.values(study.quantities).map(({ is }) => is.column),
+    ...Object.values(study.groups).map(({ is }) => is.column),
+  ].flatMap((one) => (one === undefined ? [] : [one.is]));
+
+/** One study to its result, nothing written. */
+export async function computeStudy(file: string, seed = SEED): Promise<StudyResult> {
+  const { plan, trials, files } = await loadStudy(file);
+  const read = readTrials(trials, plan.study.trials, plan.columns);
+  return analyse(plan, read, { version, node: process.versions.node, seed, files });
+}
+
+/** The main job: one study file to its results on disk. */
+export async function runStudy(file: string, { out, seed }: RunOptions = {}): Promise<StudySummary> {
+  const { plan, trials, files } = await loadStudy(file);
+  const read = readTrials(trials, plan.study.trials, plan.columns);
+  const result = analyse(plan, read, { version, node: process.versions.node, seed: seed ?? SEED, files });
+  const { renderReport } = await import('../../reports/page.ts');
+  const { html, charts } = await renderReport(result, { assets: plan.study.output.assets });
+  const written = new Map(resultFiles(result));
+  written.set('report.html', html);
+  for (const [name, spec] of Object.entries(charts)) written.set(`charts/${name}.vl.json`, `${JSON.stringify(spec, null, 2)}\n`);
+  const folder = out ?? join(dirname(resolve(file)), plan.study.output.folder.is);
+  writeResults(folder, written, result);
+  return summaryOf(result, folder);
+}
+
+/** What is given, what is derived from what, what is missing; computes nothing. */
+export async function checkStudy(file: string): Promise<string> {
+  const { plan } = await loadStudy(file);
+  return explain(plan);
+}

@@ -1,0 +1,40 @@
+import { join } from 'node:path';
+import { sha256 } from '../files/hash.ts';
+import { makeFolder, removeFile, replaceFile } from '../files/write.ts';
+import { lawsJson } from './laws-json.ts';
+import type { StudyResult } from './study-result.ts';
+import { auditTable, plantTable, trialsTable } from './tables.ts';
+import { workbook } from './workbook.ts';
+
+const PROVENANCE = 'provenance.json';
+
+/** Every result file but the report, by name. */
+export function resultFiles(result: StudyResult): ReadonlyMap<string, string | Uint8Array> {
+  const files = new Map<string, string | Uint8Array>([
+    ['laws.json', lawsJson(result)],
+    ['trials.csv', `${trialsTable(result).toCSV()}\n`],
+  ]);
+  const audited = auditTable(result);
+  const plant = plantTable(result);
+  if (audited !== undefined) files.set('audit.csv', `${audited.toCSV()}\n`);
+  if (plant !== undefined) files.set('plant.csv', `${plant.toCSV()}\n`);
+  files.set('results.xlsx', workbook(result));
+  return files;
+}
+
+/**
+ * Writes results into a folder, each file in one step. `provenance.json` is removed first and written last with the hash of every file, so that a mixture
+ * of two runs cannot pass for a result. Files of the user's own in the folder are left alone.
+ */
+export function writeResults(folder: string, files: ReadonlyMap<string, string | Uint8Array>, result: StudyResult): void {
+  makeFolder(folder);
+  removeFile(join(folder, PROVENANCE));
+  for (const name of files.keys()) if (name.includes('/')) makeFolder(join(folder, name, '..'));
+  for (const [name, content] of files) replaceFile(join(folder, name), content);
+  const { version, node, seed, files: inputs } = result.provenance;
+  const results = [...files].map(([file, content]) => ({ file, sha256: sha256(content) })).sort((a, b) => (a.file < b.file ? -1 : 1));
+  replaceFile(
+    join(folder, PROVENANCE),
+    `${JSON.stringify({ format: 1, version, node, seed, options: result.options, inputs, results }, null, 2)}\n`,
+  );
+}
