@@ -1,5 +1,5 @@
 import { whiten } from './campaign-variance.ts';
-import { triangularise } from './dense.ts';
+import { type Small, triangularise, zeros } from './dense.ts';
 import type { Equations } from './equations.ts';
 
 /** The design in coordinates that make it orthonormal under the present V: X T, with T = R^-1 of its whitened columns. */
@@ -7,7 +7,7 @@ export interface Basis {
   /** q columns of n. */
   readonly design: readonly Float64Array[];
   /** T, q x q upper triangular, row-major: theta = T times the basis coordinates. */
-  readonly back: Float64Array;
+  readonly back: Small;
   /** ln |R^T R|: what the change of basis takes from ln |X^T V^-1 X|. */
   readonly lnDeterminant: number;
 }
@@ -33,7 +33,7 @@ export function basisOf(eq: Equations, columns: readonly number[]): Basis {
 }
 
 /** columns (n x q) times an upper triangular matrix. */
-export function combine(columns: readonly Float64Array[], upper: Float64Array, n: number): readonly Float64Array[] {
+export function combine(columns: readonly Float64Array[], upper: Small, n: number): readonly Float64Array[] {
   const q = columns.length;
   return columns.map((_, j) => {
     const out = new Float64Array(n);
@@ -46,8 +46,8 @@ export function combine(columns: readonly Float64Array[], upper: Float64Array, n
   });
 }
 
-function inverseOfUpper(r: Float64Array, q: number): Float64Array {
-  const out = new Float64Array(q * q);
+function inverseOfUpper(r: Small, q: number): Small {
+  const out = zeros(q * q);
   for (let j = 0; j < q; j++) {
     out[j * q + j] = 1 / r[j * q + j]!;
     for (let i = j - 1; i >= 0; i--) {

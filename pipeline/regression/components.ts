@@ -1,7 +1,6 @@
-import { lnDeterminant, setVariance } from './campaign-variance.ts';
-import { choleskyOf, lnDeterminantOf, multiply, solveWith, traceOfProduct } from './dense.ts';
+import { lnDeterminant } from './campaign-variance.ts';
 import type { Equations } from './equations.ts';
-import { type Moments, moments } from './moments.ts';
+import { type Look, plain, restricted } from './likelihood.ts';
 import type { Components } from './problem.ts';
 
 /** Restricted or plain likelihood; `criterion` is -2 ln likelihood without the constant n ln 2 pi (n - q for REML). */
@@ -11,8 +10,8 @@ export interface ComponentsFit extends Components {
   readonly settled: boolean;
 }
 
-/** Steps of Fisher scoring, the change of the criterion that ends them, and the halvings of one step. */
-const SCORING = { iterations: 60, change: 1e-13, halvings: 30 };
+/** Steps, the gain of ln likelihood that ends them (the square of a step in units of the components' own uncertainty), rounding of the criterion, halvings. */
+const SCORING = { iterations: 60, gain: 1e-20, rounding: 1e-13, halvings: 20 };
 
 /**
  * phi = (sigma^2, tau^2) >= 0 at the present theta of the equations: minimum of r^T P r + ln|V| (+ ln|X^T V^-1 X| for REML),
@@ -31,13 +30,11 @@ export function estimateComponents(
   let iterations = 0;
   for (; iterations < SCORING.iterations; iterations++) {
     const step = scoringStep(now, phi, [scatter, campaign], floor);
-    if (step === undefined) break;
+    if (step === undefined || !(step[0] * now.score[0] + step[1] * now.score[1] > SCORING.gain)) break;
     const next = descend(eq, design, phi, step, now, floor, kind);
     if (next === undefined) break;
-    const gain = now.criterion - next.look.criterion;
     phi = next.phi;
     now = next.look;
-    if (!(gain > SCORING.change * (1 + Math.abs(now.criterion))) && next.small) break;
   }
   return { scatter: phi[0], campaign: phi[1], criterion: now.criterion, iterations, settled: iterations < SCORING.iterations };
 }
@@ -53,79 +50,47 @@ function scatterFloor({ measured, r }: Equations): number {
   return least > 0 ? 0 : (1e-12 * square) / r.length + Number.MIN_VALUE * 1e20;
 }
 
-export interface Look {
-  readonly criterion: number;
-  readonly score: readonly [number, number];
-  readonly information: readonly [number, number, number];
-}
-
 function look(eq: Equations, design: readonly Float64Array[], phi: readonly [number, number], kind: 'REML' | 'ML'): Look {
-  const total = eq.measured.map((d, i) => d + phi[0] * eq.problem.scatter[i]!);
-  setVariance(eq.variance, total, phi[1]);
-  const m = moments(eq.variance, eq.problem.scatter, design, eq.r);
-  return kind === 'REML' ? restricted(m, lnDeterminant(eq.variance, phi[1])) : plain(m, lnDeterminant(eq.variance, phi[1]));
+  const { variance, problem, r } = eq;
+  eq.setComponents({ scatter: phi[0], campaign: phi[1] });
+  const lnV = lnDeterminant(variance, phi[1]);
+  const m = eq.moments(variance, problem.scatter, design, r);
+  return kind === 'REML' ? restricted(m, lnV) : plain(m, lnV);
 }
 
-/** score_k = (r^T P V_k P r - tr P V_k)/2, information_kl = tr(P V_k P V_l)/2, P the REML projector. */
-export function restricted(m: Moments, lnV: number): Look {
-  const q = m.right.length;
-  const factor = choleskyOf(m.gram, q);
-  if (factor === undefined) return { criterion: Number.POSITIVE_INFINITY, score: [0, 0], information: [1, 0, 1] };
-  const b = solveWith(factor, m.right, q, 1);
-  const solved = m.first.map((first) => solveWith(factor, first, q, q));
-  const square = [0, 1].map((k) => m.square[k]! - 2 * dot(m.cross[k]!, b) + quadratic(m.first[k]!, b, q));
-  const trace = [0, 1].map((k) => m.trace[k]! - traceOfProduct(solved[k]!, undefined, q));
-  const pair = ([k, l, kl]: readonly [number, number, number]): number =>
-    (m.traces[kl]! - 2 * traceOfProduct(solveWith(factor, m.second[kl]!, q, q), undefined, q) + traceOfProduct(solved[k]!, solved[l]!, q)) /
-    2;
-  return {
-    criterion: m.q - dot(m.right, b) + lnV + lnDeterminantOf(factor, q),
-    score: [(square[0]! - trace[0]!) / 2, (square[1]! - trace[1]!) / 2],
-    information: [pair([0, 0, 0]), pair([0, 1, 1]), pair([1, 1, 2])],
-  };
-}
-
-function plain(m: Moments, lnV: number): Look {
-  return {
-    criterion: m.q + lnV,
-    score: [(m.square[0] - m.trace[0]) / 2, (m.square[1] - m.trace[1]) / 2],
-    information: [m.traces[0] / 2, m.traces[1] / 2, m.traces[2] / 2],
-  };
-}
-
-/** The components that may move, and where to: Fisher scoring, those at their lower end left there while the score holds them. */
+/** Where to: Newton on the observed information where that is positive, else Fisher scoring; a component at its lower end stays while the score holds it there. */
 function scoringStep(
-  { score, information: [a, b, d] }: Look,
+  { score, expected, observed }: Look,
   phi: readonly [number, number],
   estimate: readonly [boolean, boolean],
   floor: number,
-): readonly [number, number] | undefined {
+): Step | undefined {
   const free = [estimate[0] && !(phi[0] <= floor && score[0] <= 0), estimate[1] && !(phi[1] <= 0 && score[1] <= 0)];
   if (!free[0] && !free[1]) return undefined;
-  if (!free[1]) return [score[0] / a, 0];
-  if (!free[0]) return [0, score[1] / d];
-  const determinant = a * d - b * b;
-  if (!(determinant > 1e-12 * a * d)) return [score[0] / a, 0];
-  return [(d * score[0] - b * score[1]) / determinant, (a * score[1] - b * score[0]) / determinant];
+  if (!free[1]) return [score[0] / (observed[0] > expected[0] / 4 ? observed[0] : expected[0]), 0];
+  if (!free[0]) return [0, score[1] / (observed[2] > expected[2] / 4 ? observed[2] : expected[2])];
+  return solveTwo(observed, expected, score) ?? solveTwo(expected, expected, score) ?? [score[0] / expected[0], 0];
 }
 
-interface Descent {
-  readonly phi: [number, number];
-  readonly look: Look;
-  /** The step is far below the components' own uncertainty. */
-  readonly small: boolean;
+type Step = readonly [number, number];
+
+/** Undefined where the matrix is not clearly positive beside the expected one. */
+function solveTwo([a, b, d]: readonly [number, number, number], beside: readonly [number, number, number], score: Step): Step | undefined {
+  const determinant = a * d - b * b;
+  if (!(a > beside[0] / 4 && d > beside[2] / 4 && determinant > 1e-9 * a * d)) return undefined;
+  return [(d * score[0] - b * score[1]) / determinant, (a * score[1] - b * score[0]) / determinant];
 }
 
 /** The step, halved until the criterion does not rise. */
 function descend(
   eq: Equations,
   design: readonly Float64Array[],
-  phi: readonly [number, number],
-  step: readonly [number, number],
+  phi: Step,
+  step: Step,
   now: Look,
   floor: number,
   kind: 'REML' | 'ML',
-): Descent | undefined {
+): { readonly phi: [number, number]; readonly look: Look } | undefined {
   let share = 1;
   for (let halving = 0; halving < SCORING.halvings; halving++, share /= 2) {
     const to: [number, number] = [
@@ -133,18 +98,7 @@ function descend(
       Math.max(0, phi[1] + share * step[1]),
     ];
     const next = look(eq, design, to, kind);
-    if (next.criterion <= now.criterion + SCORING.change * Math.abs(now.criterion)) {
-      const moved = [0, 1].map((k) => Math.abs(to[k]! - phi[k]!) * Math.sqrt(Math.max(0, next.information[k === 0 ? 0 : 2]!)));
-      return { phi: to, look: next, small: moved.every((size) => size < 1e-9) };
-    }
+    if (next.criterion <= now.criterion + SCORING.rounding * (1 + Math.abs(now.criterion))) return { phi: to, look: next };
   }
   return undefined;
 }
-
-const dot = (a: ArrayLike<number>, b: ArrayLike<number>): number => {
-  let sum = 0;
-  for (let k = 0; k < a.length; k++) sum += a[k]! * b[k]!;
-  return sum;
-};
-
-const quadratic = (m: Float64Array, b: Float64Array, q: number): number => dot(multiply(m, b, q, 1), b);

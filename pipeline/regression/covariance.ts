@@ -1,22 +1,22 @@
 import { basisOf, combine } from './basis.ts';
-import { type CampaignVariance, setVariance } from './campaign-variance.ts';
-import { restricted } from './components.ts';
+import type { CampaignVariance } from './campaign-variance.ts';
 import { designErrors } from './curvature.ts';
-import { choleskyOf, forward, identity, inverse, multiply, smallestEigenvalue, solveWith, transpose } from './dense.ts';
+import { choleskyOf, forward, identity, inverse, multiply, type Small, smallestEigenvalue, solveWith, transpose, zeros } from './dense.ts';
 import type { Equations } from './equations.ts';
-import { type Moments, moments } from './moments.ts';
+import { restricted } from './likelihood.ts';
+import { designGram, type Moments } from './moments.ts';
 import type { Components } from './problem.ts';
 
 /** Sandwich of the estimating equations at the fit, q x q row-major in the order of `columns`. */
 export interface Sandwich {
-  readonly inverseOfA: Float64Array | undefined;
-  readonly inverseOfB: Float64Array;
+  readonly inverseOfA: Small | undefined;
+  readonly inverseOfB: Small;
   /** Phi = A^-1 (B + A_tp W A_tp^T) A^-1; undefined where A is not positive definite. */
-  readonly phi: Float64Array | undefined;
+  readonly phi: Small | undefined;
   /** d Phi/d phi_k of the estimated components. */
-  readonly derivatives: readonly Float64Array[];
+  readonly derivatives: readonly Small[];
   /** Covariance W of the estimated components. */
-  readonly components: Float64Array;
+  readonly components: Small;
   /** Smallest eigenvalue of B^-1 A: the share of the design that is not its own error. */
   readonly reliability: number;
 }
@@ -35,12 +35,10 @@ export function sandwich(eq: Equations, columns: readonly number[], at: Componen
     const h = STEP * Math.max(at[which], typicalVariance(eq, which));
     const up = bread(held, { ...at, [which]: at[which] + h }).phi;
     const down = bread(held, { ...at, [which]: at[which] - h }).phi;
-    return up === undefined || down === undefined
-      ? new Float64Array(now.a.length).fill(Number.NaN)
-      : up.map((value, k) => (value - down[k]!) / (2 * h));
+    return up === undefined || down === undefined ? zeros(q * q).fill(Number.NaN) : up.map((value, k) => (value - down[k]!) / (2 * h));
   });
-  setVariance(eq.variance, held.total(at), at.campaign);
-  const natural = (matrix: Float64Array): Float64Array => outward(held.back, matrix, q);
+  eq.setComponents(at);
+  const natural = (matrix: Small): Small => outward(held.back, matrix, q);
   return {
     inverseOfA: now.inverseOfA === undefined ? undefined : natural(now.inverseOfA),
     inverseOfB: natural(inverse(now.b, q)),
@@ -54,26 +52,27 @@ export function sandwich(eq: Equations, columns: readonly number[], at: Componen
 /** Everything of the fit that stays while the components are moved, in a basis that makes the design orthonormal. */
 interface Held {
   readonly eq: Equations;
-  readonly back: Float64Array;
+  readonly back: Small;
   readonly design: readonly Float64Array[];
   /** m of the columns, zero for shifts. */
   readonly moved: readonly Float64Array[];
   /** sum_i c_i S_i. */
-  errors(coefficient: Float64Array): Float64Array;
-  total(at: Components): Float64Array;
+  errors(coefficient: Float64Array): Small;
 }
 
 function hold(eq: Equations, columns: readonly number[]): Held {
-  const { n, model, scatter: shares } = eq.problem;
+  const { n, model } = eq.problem;
   const zero = new Float64Array(n);
   const { back, design } = basisOf(eq, columns);
   const p = model.constants.length;
   const q = columns.length;
-  const pick = (all: Float64Array): Float64Array =>
-    Float64Array.from({ length: q * q }, (_, k) => {
-      const [a, b] = [columns[Math.floor(k / q)]!, columns[k % q]!];
-      return a < p && b < p ? all[a * p + b]! : 0;
-    });
+  const pick = (all: Small): Small => {
+    const out = zeros(q * q);
+    for (let a = 0; a < q; a++) {
+      for (let b = 0; b < q; b++) if (columns[a]! < p && columns[b]! < p) out[a * q + b] = all[columns[a]! * p + columns[b]!]!;
+    }
+    return out;
+  };
   return {
     eq,
     back,
@@ -84,46 +83,46 @@ function hold(eq: Equations, columns: readonly number[]): Held {
       n,
     ),
     errors: (coefficient) => inward(back, pick(designErrors(eq, coefficient)), q),
-    total: ({ scatter }) => eq.measured.map((d, i) => d + scatter * shares[i]!),
   };
 }
 
 /** T^T M T and T M T^T. */
-const inward = (t: Float64Array, m: Float64Array, q: number): Float64Array => multiply(transpose(t, q, q), multiply(m, t, q, q), q, q);
-const outward = (t: Float64Array, m: Float64Array, q: number): Float64Array => multiply(t, multiply(m, transpose(t, q, q), q, q), q, q);
+const inward = (t: Small, m: Small, q: number): Small => multiply(transpose(t, q), multiply(m, t, q, q), q, q);
+const outward = (t: Small, m: Small, q: number): Small => multiply(t, multiply(m, transpose(t, q), q, q), q, q);
 
 interface Bread {
-  readonly a: Float64Array;
-  readonly b: Float64Array;
-  readonly inverseOfA: Float64Array | undefined;
-  readonly phi: Float64Array | undefined;
-  readonly components: Float64Array;
+  readonly a: Small;
+  readonly b: Small;
+  readonly inverseOfA: Small | undefined;
+  readonly phi: Small | undefined;
+  readonly components: Small;
 }
 
 function bread(held: Held, at: Components): Bread {
   const { eq, design, moved } = held;
   const q = design.length;
-  setVariance(eq.variance, held.total(at), at.campaign);
-  const m = moments(eq.variance, eq.problem.scatter, design, eq.r);
+  eq.setComponents(at);
+  const m = eq.moments(eq.variance, eq.problem.scatter, design, eq.r);
   const errors = errorsOf(held, q);
-  const a = m.gram.map((value, k) => value - errors[k]!);
+  const b = designGram(m);
+  const a = b.map((value, k) => value - errors[k]!);
   const components = componentsCovariance(eq, m);
   const factor = choleskyOf(a, q);
-  if (factor === undefined) return { a, b: m.gram, inverseOfA: undefined, phi: undefined, components };
+  if (factor === undefined) return { a, b, inverseOfA: undefined, phi: undefined, components };
   const spread = spreadOfComponents(eq, moved, components, q);
-  const meat = m.gram.map((value, k) => value + spread[k]!);
+  const meat = b.map((value, k) => value + spread[k]!);
   const half = solveWith(factor, meat, q, q);
   return {
     a,
-    b: m.gram,
+    b,
     inverseOfA: solveWith(factor, identity(q), q, q),
-    phi: solveWith(factor, transpose(half, q, q), q, q),
+    phi: solveWith(factor, transpose(half, q), q, q),
     components,
   };
 }
 
 /** sum_i (V^-1)_ii S_i - sum_ij ((V^-1)_ij)^2 m_i m_j^T: B - A. */
-function errorsOf({ eq, moved, errors }: Held, q: number): Float64Array {
+function errorsOf({ eq, moved, errors }: Held, q: number): Small {
   const { variance: v } = eq;
   const out = errors(v.inverse.map((e, i) => e * (1 - v.kappa[v.block[i]!]! * e)));
   const weights = v.inverse.map((e, i) => e * e * (1 - 2 * v.kappa[v.block[i]!]! * e));
@@ -147,28 +146,37 @@ function squareSums(v: CampaignVariance, column: Float64Array): Float64Array {
 }
 
 /** W = [tr(P V_k P V_l)/2]^-1 over the estimated components, k x k. */
-function componentsCovariance(eq: Equations, m: Moments): Float64Array {
-  const { information } = restricted(m, 0);
+function componentsCovariance(eq: Equations, m: Moments): Small {
+  const information = restricted(m, 0).expected;
   const { scatter, campaign } = eq.problem.estimate;
-  if (!scatter && !campaign) return new Float64Array(0);
-  if (!campaign) return Float64Array.of(1 / information[0]);
-  if (!scatter) return Float64Array.of(1 / information[2]);
+  if (!scatter && !campaign) return [];
+  if (!campaign) return [1 / information[0]];
+  if (!scatter) return [1 / information[2]];
   const [a, b, d] = information;
   const determinant = a * d - b * b;
-  return Float64Array.of(d / determinant, -b / determinant, -b / determinant, a / determinant);
+  return [d / determinant, -b / determinant, -b / determinant, a / determinant];
 }
 
 /** A_tp W A_tp^T with A_tp,k = - sum_i m_i (V^-1 V_k V^-1)_ii. */
-function spreadOfComponents(eq: Equations, moved: readonly Float64Array[], components: Float64Array, q: number): Float64Array {
+function spreadOfComponents(eq: Equations, moved: readonly Float64Array[], components: Small, q: number): Small {
   const { variance: v } = eq;
   const { scatter, campaign } = eq.problem.estimate;
   const diagonals = [...(scatter ? [scatterDiagonal(v, eq.problem.scatter)] : []), ...(campaign ? [campaignDiagonal(v)] : [])];
   const k = diagonals.length;
-  const slope = moved.map((column) => diagonals.map((diagonal) => -column.reduce((sum, value, i) => sum + value * diagonal[i]!, 0)));
-  return Float64Array.from({ length: q * q }, (_, at) => {
-    const [a, b] = [slope[Math.floor(at / q)]!, slope[at % q]!];
-    return a.reduce((sum, left, i) => sum + left * b.reduce((inner, right, j) => inner + components[i * k + j]! * right, 0), 0);
-  });
+  const slope = moved.map((column) => diagonals.map((diagonal) => -dot(column, diagonal)));
+  const out = zeros(q * q);
+  for (let a = 0; a < q; a++) {
+    for (let b = 0; b < q; b++) {
+      for (let i = 0; i < k; i++) for (let j = 0; j < k; j++) out[a * q + b]! += slope[a]![i]! * components[i * k + j]! * slope[b]![j]!;
+    }
+  }
+  return out;
+}
+
+function dot(a: Float64Array, b: Float64Array): number {
+  let sum = 0;
+  for (let i = 0; i < a.length; i++) sum += a[i]! * b[i]!;
+  return sum;
 }
 
 /** (V^-1 V_1 V^-1)_ii. */
@@ -191,9 +199,9 @@ function typicalVariance({ variance: v, problem }: Equations, which: 'scatter' |
 }
 
 /** Smallest eigenvalue of B^-1 A, by the symmetric L^-1 A L^-T. */
-function smallestRatio(a: Float64Array, b: Float64Array, q: number): number {
+function smallestRatio(a: Small, b: Small, q: number): number {
   const factor = choleskyOf(b, q);
   if (factor === undefined) return Number.NaN;
   const half = forward(factor, a, q, q);
-  return smallestEigenvalue(forward(factor, transpose(half, q, q), q, q), q);
+  return smallestEigenvalue(forward(factor, transpose(half, q), q, q), q);
 }

@@ -1,8 +1,18 @@
-/** Small dense systems, q x q row-major, of a handful of parameters; columns that enter here were made near orthonormal by QR before. */
+/**
+ * Small dense systems of a handful of parameters, q x q row-major in plain arrays (short typed arrays are slow to make).
+ * Columns that enter here were made near orthonormal by QR before.
+ */
+export type Small = number[];
+
+export const zeros = (length: number): Small => {
+  const out: number[] = [];
+  for (let k = 0; k < length; k++) out.push(0);
+  return out;
+};
 
 /** Lower factor L of a symmetric positive definite matrix, or undefined where it is not. */
-export function choleskyOf(matrix: Float64Array, q: number): Float64Array | undefined {
-  const factor = new Float64Array(q * q);
+export function choleskyOf(matrix: ArrayLike<number>, q: number): Small | undefined {
+  const factor = zeros(q * q);
   for (let i = 0; i < q; i++) {
     for (let j = 0; j <= i; j++) {
       let sum = matrix[i * q + j]!;
@@ -15,15 +25,15 @@ export function choleskyOf(matrix: Float64Array, q: number): Float64Array | unde
   return factor;
 }
 
-export function lnDeterminantOf(factor: Float64Array, q: number): number {
+export function lnDeterminantOf(factor: Small, q: number): number {
   let sum = 0;
   for (let i = 0; i < q; i++) sum += 2 * Math.log(factor[i * q + i]!);
   return sum;
 }
 
 /** L^-1 right, q x m. */
-export function forward(factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array {
-  const out = right.slice();
+export function forward(factor: Small, right: ArrayLike<number>, q: number, m: number): Small {
+  const out = Array.from(right);
   for (let c = 0; c < m; c++) {
     for (let i = 0; i < q; i++) {
       let sum = out[i * m + c]!;
@@ -35,8 +45,8 @@ export function forward(factor: Float64Array, right: Float64Array, q: number, m:
 }
 
 /** L^-T right, q x m. */
-export function backward(factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array {
-  const out = right.slice();
+export function backward(factor: Small, right: ArrayLike<number>, q: number, m: number): Small {
+  const out = Array.from(right);
   for (let c = 0; c < m; c++) {
     for (let i = q - 1; i >= 0; i--) {
       let sum = out[i * m + c]!;
@@ -48,14 +58,18 @@ export function backward(factor: Float64Array, right: Float64Array, q: number, m
 }
 
 /** (L L^T)^-1 right, q x m. */
-export const solveWith = (factor: Float64Array, right: Float64Array, q: number, m: number): Float64Array =>
+export const solveWith = (factor: Small, right: ArrayLike<number>, q: number, m: number): Small =>
   backward(factor, forward(factor, right, q, m), q, m);
 
-export const identity = (q: number): Float64Array => Float64Array.from({ length: q * q }, (_, k) => (k % (q + 1) === 0 ? 1 : 0));
+export function identity(q: number): Small {
+  const out = zeros(q * q);
+  for (let i = 0; i < q; i++) out[i * q + i] = 1;
+  return out;
+}
 
 /** a (q x q) times b (q x m). */
-export function multiply(a: Float64Array, b: Float64Array, q: number, m: number): Float64Array {
-  const out = new Float64Array(q * m);
+export function multiply(a: ArrayLike<number>, b: ArrayLike<number>, q: number, m: number): Small {
+  const out = zeros(q * m);
   for (let i = 0; i < q; i++) {
     for (let c = 0; c < m; c++) {
       let sum = 0;
@@ -66,11 +80,14 @@ export function multiply(a: Float64Array, b: Float64Array, q: number, m: number)
   return out;
 }
 
-export const transpose = (a: Float64Array, rows: number, cols: number): Float64Array =>
-  Float64Array.from({ length: rows * cols }, (_, k) => a[(k % rows) * cols + Math.floor(k / rows)]!);
+export function transpose(a: ArrayLike<number>, q: number): Small {
+  const out = zeros(q * q);
+  for (let i = 0; i < q; i++) for (let j = 0; j < q; j++) out[j * q + i] = a[i * q + j]!;
+  return out;
+}
 
 /** tr(a b), or tr(a) without b. */
-export function traceOfProduct(a: Float64Array, b: Float64Array | undefined, q: number): number {
+export function traceOfProduct(a: ArrayLike<number>, b: ArrayLike<number> | undefined, q: number): number {
   let sum = 0;
   for (let i = 0; i < q; i++) {
     if (b === undefined) sum += a[i * q + i]!;
@@ -79,17 +96,19 @@ export function traceOfProduct(a: Float64Array, b: Float64Array | undefined, q: 
   return sum;
 }
 
+export interface Triangle {
+  readonly r: Small;
+  readonly right: Small;
+}
+
 /**
  * Householder QR of n x q columns in place: returns R (q x q upper, row-major) and the first q entries of Q^T right.
  * Columns and right are overwritten.
  */
-export function triangularise(
-  columns: readonly Float64Array[],
-  right: Float64Array,
-): { readonly r: Float64Array; readonly right: Float64Array } {
+export function triangularise(columns: readonly Float64Array[], right: Float64Array): Triangle {
   const q = columns.length;
   const n = right.length;
-  const r = new Float64Array(q * q);
+  const r = zeros(q * q);
   for (let k = 0; k < q; k++) {
     const pivot = columns[k]!;
     let norm = 0;
@@ -108,18 +127,20 @@ export function triangularise(
       if (j < q) r[k * q + j] = other[k]!;
     }
   }
-  return { r, right: right.slice(0, q) };
+  const rest = zeros(q);
+  for (let k = 0; k < q; k++) rest[k] = right[k]!;
+  return { r, right: rest };
 }
 
 /** Inverse of a symmetric positive definite matrix; NaN where it is not. */
-export function inverse(matrix: Float64Array, q: number): Float64Array {
+export function inverse(matrix: ArrayLike<number>, q: number): Small {
   const factor = choleskyOf(matrix, q);
-  return factor === undefined ? new Float64Array(q * q).fill(Number.NaN) : solveWith(factor, identity(q), q, q);
+  return factor === undefined ? zeros(q * q).fill(Number.NaN) : solveWith(factor, identity(q), q, q);
 }
 
 /** Smallest eigenvalue of a symmetric matrix, by Jacobi rotations (Golub and Van Loan 2013, section 8.5). */
-export function smallestEigenvalue(matrix: Float64Array, q: number): number {
-  const m = matrix.slice();
+export function smallestEigenvalue(matrix: ArrayLike<number>, q: number): number {
+  const m = Array.from(matrix);
   for (let sweep = 0; sweep < 60; sweep++) {
     let off = 0;
     for (let a = 0; a < q; a++) for (let b = 0; b < a; b++) off += m[a * q + b]! ** 2;
@@ -131,7 +152,7 @@ export function smallestEigenvalue(matrix: Float64Array, q: number): number {
   return least;
 }
 
-function rotate(m: Float64Array, a: number, b: number, q: number): void {
+function rotate(m: Small, a: number, b: number, q: number): void {
   const off = m[a * q + b]!;
   if (off === 0) return;
   const half = (m[b * q + b]! - m[a * q + a]!) / (2 * off);
@@ -148,4 +169,10 @@ function rotate(m: Float64Array, a: number, b: number, q: number): void {
     m[k * q + a] = c * x - s * y;
     m[k * q + b] = s * x + c * y;
   }
+}
+
+/** A square matrix as rows. */
+export function rowsOf(matrix: Small): readonly (readonly number[])[] {
+  const q = Math.round(Math.sqrt(matrix.length));
+  return Array.from({ length: q }, (_, a) => matrix.slice(a * q, (a + 1) * q));
 }

@@ -1,5 +1,6 @@
 import { applyInverse, type CampaignVariance, campaignVariance, setVariance } from './campaign-variance.ts';
 import { type Bound, bind } from './model.ts';
+import { type MomentsOf, momentsOf } from './moments.ts';
 import type { Components, Problem } from './problem.ts';
 
 /**
@@ -22,6 +23,9 @@ export interface Equations {
   /** p columns of n: m = G (Sigma g)_x. */
   readonly moved: readonly Float64Array[];
   readonly bound: Bound;
+  readonly moments: MomentsOf;
+  /** V anew from D as it stands; r and w stay. */
+  setComponents(components: Components): void;
   /** Sets everything for theta (q: parameters, then shifts) and returns Q = r^T V^-1 r; NaN where the law has no value. */
   evaluate(theta: Float64Array, components: Components): number;
 }
@@ -44,15 +48,24 @@ export function equations(problem: Problem): Equations {
     covariance: columns(g),
     design: [...columns(p), ...problem.shifts],
     moved: columns(sigma === undefined ? 0 : p),
+    moments: momentsOf(n, problem.blocks, p + problem.shifts.length),
     bound: bind(model, problem.x, n, sigma !== undefined),
     total: column(),
     slope: new Float64Array(1 + g),
     theta: new Float64Array(p),
   };
-  return { ...state, evaluate: (theta, components) => evaluate(state, theta, components) };
+  return {
+    ...state,
+    setComponents: (components) => setComponents(state, components),
+    evaluate: (theta, components) => evaluate(state, theta, components),
+  };
 }
 
-type State = Omit<Equations, 'evaluate'> & { readonly total: Float64Array; readonly slope: Float64Array; readonly theta: Float64Array };
+type State = Omit<Equations, 'evaluate' | 'setComponents'> & {
+  readonly total: Float64Array;
+  readonly slope: Float64Array;
+  readonly theta: Float64Array;
+};
 
 function evaluate(state: State, theta: Float64Array, components: Components): number {
   const { problem, bound } = state;
@@ -72,8 +85,21 @@ function evaluate(state: State, theta: Float64Array, components: Components): nu
   return q;
 }
 
-/** Moves the model's columns to the adjusted points, linearising the law there, until they rest. */
+/** Moves the model's columns to the adjusted points, linearising the law there, until they rest; from the readings again where the last points lead nowhere. */
 function adjust(state: State, theta: Float64Array, components: Components): void {
+  if (rest(state, theta, components)) return;
+  backToReadings(state);
+  if (!rest(state, theta, components) && state.w.some(Number.isNaN)) backToReadings(state);
+}
+
+function backToReadings({ problem, bound }: State): void {
+  problem.x.forEach((x, k) => {
+    bound.x[k]!.set(x);
+  });
+}
+
+/** False where the points do not come to rest, or the law has no value there. */
+function rest(state: State, theta: Float64Array, components: Components): boolean {
   const { problem, bound, covariance, w } = state;
   for (let iteration = 0; iteration < ADJUST.iterations; iteration++) {
     bound.run(state.theta, true);
@@ -85,12 +111,15 @@ function adjust(state: State, theta: Float64Array, components: Components): void
       const s = covariance[k]!;
       for (let i = 0; i < x.length; i++) {
         const to = x[i]! - s[i]! * w[i]!;
-        largest = Math.max(largest, Math.abs(to - at[i]!) / (1 + Math.abs(to)));
+        const move = Math.abs(to - at[i]!) / (1 + Math.abs(to));
+        if (!(move <= largest)) largest = move;
         at[i] = to;
       }
     });
-    if (!(largest > ADJUST.move)) return;
+    if (largest <= ADJUST.move) return true;
+    if (Number.isNaN(largest)) return false;
   }
+  return false;
 }
 
 /** r = y - h - slopes (x - xhat) - shifts. */
@@ -111,12 +140,15 @@ function residuals({ problem, bound, r }: State, theta: Float64Array): void {
 }
 
 /** D, Cov(x, r), V and w at the present slopes. */
-function weigh(state: State, { scatter, campaign }: Components): void {
-  const { problem, measured, total, variance, r, w } = state;
-  if (problem.sigma !== undefined) measurementVariance(state, problem.sigma);
+function weigh(state: State, components: Components): void {
+  if (state.problem.sigma !== undefined) measurementVariance(state, state.problem.sigma);
+  setComponents(state, components);
+  applyInverse(state.variance, state.r, state.w);
+}
+
+function setComponents({ problem, measured, total, variance }: State, { scatter, campaign }: Components): void {
   for (let i = 0; i < total.length; i++) total[i] = measured[i]! + scatter * problem.scatter[i]!;
   setVariance(variance, total, campaign);
-  applyInverse(variance, r, w);
 }
 
 /** D_i = g^T Sigma g with g = (1, -dh/dx), and its x rows. */

@@ -66,8 +66,11 @@ export interface Parameter {
   /** At the study's confidence; -Infinity or Infinity on the side where no honest bound exists. */
   readonly lower: number;
   readonly upper: number;
+  /** Held, not estimated: its value is an assumption and has no interval. */
   readonly fixed: boolean;
   readonly onBound: boolean;
+  /** How the interval was made; `none` where it is not estimated. */
+  readonly intervalBy: 't' | 'profile' | 'none';
 }
 
 export interface Statistics {
@@ -91,13 +94,44 @@ export interface Statistics {
 
 /** Per trial, in the order of the fit's data. */
 export interface Diagnostics {
+  /** The law's value at the trial, in the unit of the response. */
   readonly fitted: readonly number[];
+  /** y - law on the scale of the fit (ln measured - ln fitted for relative errors), campaign shifts left in. */
   readonly residual: readonly number[];
+  /** Residual against what the other trials predict, over its standard deviation with scatter estimated without the trial. */
   readonly studentised: readonly number[];
+  /** Share of the trial's own information that it takes from the fit, 0 to 1; the hat value of least squares. */
   readonly leverage: readonly number[];
+  /** Cook's distance: move of the law on leaving the trial out, (dtheta)^T B (dtheta)/p. */
   readonly cook: readonly number[];
   /** Standard deviation of each residual: measurement, scatter and campaign together. */
   readonly residualSd: readonly number[];
+}
+
+/** How campaigns entered: their names, and the estimated shift of each on the scale of the fit (0 where there is no effect). */
+export interface CampaignShifts {
+  readonly kind: 'random' | 'fixed' | 'none' | 'inseparable';
+  readonly names: readonly string[];
+  readonly shifts: readonly number[];
+}
+
+/** A parameter that the data could not tell and that was therefore held. */
+export interface Held {
+  readonly parameter: string;
+  readonly value: number;
+  readonly why: 'not identified' | 'own error of the group';
+  readonly from: 'theory' | 'start' | 'common exponent';
+  /** Share of the design that was not its own error before the parameter was held; 0 where it was not identified. */
+  readonly reliability: number;
+}
+
+/** r^T V^-1 r of the stated uncertainties alone, campaigns' levels taken out, with both tails. */
+export interface StatedUncertaintyTest {
+  readonly chiSquared: number;
+  readonly degreesOfFreedom: number;
+  /** Probability of a smaller and of a larger value if the stated uncertainties were right and complete. */
+  readonly below: number;
+  readonly above: number;
 }
 
 /** Result of fitting one law. All per-parameter arrays are in the order of form.constants. */
@@ -111,6 +145,8 @@ export interface Fit extends Law {
   readonly covarianceRandom: readonly (readonly number[])[];
   /** p x p, random and systematic. */
   readonly covariance: readonly (readonly number[])[];
+  /** p x p, (Xhat^T V^-1 Xhat)^-1: what least distance (York) prints, without the errors of the design. */
+  readonly inverseOfB: readonly (readonly number[])[];
   /** d theta/d source times u(source), one row of p for each source. */
   readonly shifts: Readonly<Record<SourceId, readonly number[]>>;
   /** Estimated variance components (sigma^2, tau^2; those that are estimated), their covariance W, and d Phi/d phi_k. */
@@ -119,7 +155,21 @@ export interface Fit extends Law {
     readonly values: readonly number[];
     readonly covariance: readonly (readonly number[])[];
     readonly derivatives: readonly (readonly (readonly number[])[])[];
+    /** -2 ln restricted likelihood at the fit, on the model's coordinates. */
+    readonly criterion: number;
   };
+  readonly scale: 'relative' | 'absolute';
+  readonly confidence: number;
+  /** n - p (parameters, fixed shifts): the most degrees of freedom any random part may claim. */
+  readonly residualDegreesOfFreedom: number;
+  readonly campaigns: CampaignShifts;
+  readonly held: readonly Held[];
+  /** Smallest eigenvalue of B^-1 A: 1 without errors in x. */
+  readonly reliability: number;
+  /** Parameters if errors in x were ignored, in the order of form.constants. */
+  readonly uncorrected: readonly number[];
+  /** Undefined where some trial has no stated uncertainty. */
+  readonly statedUncertainty?: StatedUncertaintyTest;
   readonly diagnostics: Diagnostics;
   /** Smallest and largest value of each group in the data fitted. */
   readonly ranges: Readonly<Record<string, readonly [number, number]>>;

@@ -8,6 +8,7 @@ import { inLogarithms } from './in-logarithms.ts';
  * with its derivatives. Parameters are in the model's coordinates: `asLogarithm` ones enter as their logarithm.
  */
 export interface Model {
+  readonly scale: 'relative' | 'absolute';
   readonly groups: readonly string[];
   readonly constants: readonly string[];
   readonly asLogarithm: readonly boolean[];
@@ -29,6 +30,7 @@ export function modelOf(form: Form, scale: 'relative' | 'absolute'): Model {
   const byConstant = form.constants.map((name) => derivative(tree, name));
   const byGroup = form.groups.map((name) => derivative(tree, name));
   return {
+    scale,
     groups: form.groups,
     constants: form.constants,
     asLogarithm: form.constants.map((name) => asLogarithm.has(name)),

@@ -1,88 +1,114 @@
 import { applyInverse, type CampaignVariance } from './campaign-variance.ts';
+import { type Small, zeros } from './dense.ts';
 
-/** Sums over one weighted design that both the REML equations and the covariance of theta need; q x q matrices row-major. */
+/**
+ * Sums over one weighted design that the REML equations and the covariance of theta need. The residual takes part as a last column:
+ * m = q + 1 columns (X, r), m x m matrices row-major. V_1 = diag(scatter shares), V_2 = Z Z^T.
+ */
 export interface Moments {
-  /** X^T V^-1 X. */
-  readonly gram: Float64Array;
-  /** X^T V^-1 r. */
-  readonly right: Float64Array;
-  /** r^T V^-1 r. */
-  readonly q: number;
-  /** tr V^-1 V_k for scatter and campaign. */
+  /** q, without the residual. */
+  readonly width: number;
+  /** (X, r)^T V^-1 (X, r). */
+  readonly gram: Small;
+  /** tr V^-1 V_k. */
   readonly trace: readonly [number, number];
-  /** tr V^-1 V_k V^-1 V_l: scatter-scatter, scatter-campaign, campaign-campaign. */
+  /** tr V^-1 V_k V^-1 V_l: 11, 12, 22. */
   readonly traces: readonly [number, number, number];
-  /** (V^-1 X)^T V_k (V^-1 X). */
-  readonly first: readonly [Float64Array, Float64Array];
-  /** (V^-1 X)^T V_k V^-1 V_l (V^-1 X), in the order of `traces`. */
-  readonly second: readonly [Float64Array, Float64Array, Float64Array];
-  /** (V^-1 r)^T V_k (V^-1 X) and (V^-1 r)^T V_k (V^-1 r). */
-  readonly cross: readonly [Float64Array, Float64Array];
-  readonly square: readonly [number, number];
+  /** (X, r)^T V^-1 V_k V^-1 (X, r). */
+  readonly first: readonly [Small, Small];
+  /** (X, r)^T V^-1 V_k V^-1 V_l V^-1 (X, r): 11, 12 (not symmetric), 22. */
+  readonly second: readonly [Small, Small, Small];
 }
 
-/** `scatter`: what sigma^2 is multiplied with in each trial. */
-export function moments(v: CampaignVariance, scatter: Float64Array, design: readonly Float64Array[], r: Float64Array): Moments {
-  const rows = [...design, r].map((column) => inverseOf(v, column));
-  const q = design.length;
-  const scattered = rows.map((column) => column.map((value, i) => value * scatter[i]!));
-  const totals = rows.map((column) => blockSums(v, column));
-  const spread = totals.map((total) => Float64Array.from(v.block, (c) => total[c]!));
-  const first = [pairs(rows, scattered), pairs(totals, totals)] as const;
-  const viaScatter = scattered.map((column) => inverseOf(v, column));
-  const viaCampaign = spread.map((column) => inverseOf(v, column));
-  const second = [pairs(scattered, viaScatter), pairs(scattered, viaCampaign), pairs(spread, viaCampaign)] as const;
-  const plain = pairs([...design, r], rows);
-  const corner = (all: Float64Array): Float64Array =>
-    Float64Array.from({ length: q * q }, (_, k) => all[Math.floor(k / q) * (q + 1) + (k % q)]!);
-  const edge = (all: Float64Array): Float64Array => all.slice(q * (q + 1), q * (q + 1) + q);
-  const last = (all: Float64Array): number => all[(q + 1) * (q + 1) - 1]!;
-  return {
-    gram: corner(plain),
-    right: edge(plain),
-    q: last(plain),
-    ...traces(v, scatter),
-    first: [corner(first[0]), corner(first[1])],
-    second: [corner(second[0]), corner(second[1]), corner(second[2])],
-    cross: [edge(first[0]), edge(first[1])],
-    square: [last(first[0]), last(first[1])],
+/** Makes the sums for designs of up to `width` columns on arrays of its own. */
+export type MomentsOf = (v: CampaignVariance, shares: Float64Array, design: readonly Float64Array[], r: Float64Array) => Moments;
+
+/** n trials. `shares`: what sigma^2 is multiplied with in each trial; `design`: q columns of n. */
+export function momentsOf(n: number, blocks: number, width: number): MomentsOf {
+  const set = (length: number): Float64Array[] => Array.from({ length: width + 1 }, () => new Float64Array(length));
+  const per = {
+    inverse: set(n),
+    shared: set(n),
+    via: set(n),
+    totals: set(blocks),
+    weighted: set(blocks),
+    tilted: set(blocks),
+    twice: set(blocks),
+  };
+  return (v, shares, design, r) => {
+    const columns = [...design, r];
+    columns.forEach((column, j) => {
+      applyInverse(v, column, per.inverse[j]!);
+      product(per.inverse[j]!, shares, per.shared[j]!);
+      applyInverse(v, per.shared[j]!, per.via[j]!);
+      blockSums(v, per.inverse[j]!, per.totals[j]!);
+      weightedBlockSums(v, per.shared[j]!, per.weighted[j]!);
+      for (let c = 0; c < v.blocks; c++) {
+        per.tilted[j]![c] = per.totals[j]![c]! * (1 - v.kappa[c]! * v.sum[c]!);
+        per.twice[j]![c] = per.tilted[j]![c]! * v.sum[c]!;
+      }
+    });
+    const m = columns.length;
+    return {
+      width: design.length,
+      gram: symmetricPairs(columns, per.inverse, m),
+      ...traces(v, shares),
+      first: [symmetricPairs(per.inverse, per.shared, m), symmetricPairs(per.totals, per.totals, m)],
+      second: [symmetricPairs(per.shared, per.via, m), pairs(per.weighted, per.tilted, m), symmetricPairs(per.totals, per.twice, m)],
+    };
   };
 }
 
-function inverseOf(v: CampaignVariance, column: Float64Array): Float64Array {
-  const out = new Float64Array(column.length);
-  applyInverse(v, column, out);
+/** X^T V^-1 X, q x q. */
+export function designGram({ gram, width: q }: Moments): Small {
+  const out = zeros(q * q);
+  for (let a = 0; a < q; a++) for (let b = 0; b < q; b++) out[a * q + b] = gram[a * (q + 1) + b]!;
   return out;
 }
 
-function blockSums(v: CampaignVariance, column: Float64Array): Float64Array {
-  const total = new Float64Array(v.blocks);
+function product(a: Float64Array, b: Float64Array, out: Float64Array): void {
+  for (let i = 0; i < a.length; i++) out[i] = a[i]! * b[i]!;
+}
+
+function blockSums(v: CampaignVariance, column: Float64Array, total: Float64Array): void {
+  total.fill(0);
   for (let i = 0; i < column.length; i++) total[v.block[i]!]! += column[i]!;
-  return total;
+}
+
+function weightedBlockSums(v: CampaignVariance, column: Float64Array, total: Float64Array): void {
+  total.fill(0);
+  for (let i = 0; i < column.length; i++) total[v.block[i]!]! += v.inverse[i]! * column[i]!;
+}
+
+function dot(a: Float64Array, b: Float64Array): number {
+  let sum = 0;
+  for (let k = 0; k < a.length; k++) sum += a[k]! * b[k]!;
+  return sum;
 }
 
 /** a_i . b_j for all i, j. */
-function pairs(a: readonly Float64Array[], b: readonly Float64Array[]): Float64Array {
-  const out = new Float64Array(a.length * b.length);
-  a.forEach((left, i) => {
-    b.forEach((right, j) => {
-      let sum = 0;
-      for (let k = 0; k < left.length; k++) sum += left[k]! * right[k]!;
-      out[i * b.length + j] = sum;
-    });
-  });
+function pairs(a: readonly Float64Array[], b: readonly Float64Array[], m: number): Small {
+  const out = zeros(m * m);
+  for (let i = 0; i < m; i++) for (let j = 0; j < m; j++) out[i * m + j] = dot(a[i]!, b[j]!);
   return out;
 }
 
-function traces(v: CampaignVariance, scatter: Float64Array): Pick<Moments, 'trace' | 'traces'> {
+/** The same, where it is known to be symmetric. */
+function symmetricPairs(a: readonly Float64Array[], b: readonly Float64Array[], m: number): Small {
+  const out = zeros(m * m);
+  for (let i = 0; i < m; i++) for (let j = 0; j <= i; j++) out[i * m + j] = out[j * m + i] = dot(a[i]!, b[j]!);
+  return out;
+}
+
+function traces(v: CampaignVariance, shares: Float64Array): Pick<Moments, 'trace' | 'traces'> {
   const { block, blocks, inverse, sum, kappa } = v;
   let one = 0;
   let oneOne = 0;
-  const squares = new Float64Array(blocks);
+  const squares = zeros(blocks);
   for (let i = 0; i < inverse.length; i++) {
     const c = block[i]!;
     const e = inverse[i]!;
-    const u = scatter[i]!;
+    const u = shares[i]!;
     one += u * e * (1 - kappa[c]! * e);
     oneOne += u * u * e * e * (1 - 2 * kappa[c]! * e);
     squares[c]! += u * e * e;

@@ -23,11 +23,11 @@ const ALTERNATION = { rounds: 200, change: 1e-10 };
 
 /** theta at held components, the components at held theta, in turn until neither moves. */
 export function settle(eq: Equations, start: Float64Array, from: Components, search: Search): Settled {
-  let components = from;
+  const { scatter, campaign } = eq.problem.estimate;
+  let components: Components = { scatter: scatter ? from.scatter : 0, campaign: campaign ? from.campaign : 0 };
   let theta = start;
   let rounds = 0;
   let change = Number.POSITIVE_INFINITY;
-  const { scatter, campaign } = eq.problem.estimate;
   const estimated = scatter || campaign;
   for (; ; rounds++) {
     const solved = solveTheta(eq, theta, components, search);

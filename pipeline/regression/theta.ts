@@ -1,6 +1,6 @@
-import { whiten } from './campaign-variance.ts';
+import { applyInverse, whiten } from './campaign-variance.ts';
 import { designErrors } from './curvature.ts';
-import { choleskyOf, identity, solveWith, transpose, triangularise } from './dense.ts';
+import { choleskyOf, identity, type Small, solveWith, transpose, triangularise, zeros } from './dense.ts';
 import type { Equations } from './equations.ts';
 import type { Stop } from './fit.ts';
 import type { Components } from './problem.ts';
@@ -110,74 +110,95 @@ function gradientOf({ design, w }: Equations, k: number, copies: Float64Array | 
 
 /** One linearisation: columns scaled to unit length, triangular. */
 interface System {
-  readonly r: Float64Array;
-  readonly right: Float64Array;
+  readonly r: Small;
+  readonly right: Small;
   readonly scale: readonly number[];
   readonly gradient: readonly number[];
   /** Correction of the curvature by errors in x, in the scaled columns; undefined without any. */
-  readonly excess: Float64Array | undefined;
+  readonly excess: Small | undefined;
   /** Q below this is rounding of y. */
   readonly floor: number;
 }
 
 function systemOf(eq: Equations, active: readonly number[], copies: Float64Array | undefined): System {
-  const { variance, problem } = eq;
-  const out = (column: Float64Array): Float64Array => {
-    const white = new Float64Array(problem.n);
-    whiten(variance, column, white);
-    if (copies !== undefined) for (let i = 0; i < white.length; i++) white[i]! *= Math.sqrt(copies[i]!);
-    return white;
-  };
-  const columns = active.map((k) => out(eq.design[k]!));
-  const scale = columns.map((column) => Math.sqrt(column.reduce((sum, value) => sum + value * value, 0)) || 1);
-  columns.forEach((column, j) => {
-    for (let i = 0; i < column.length; i++) column[i]! /= scale[j]!;
+  const n = eq.problem.n;
+  const root = copies === undefined ? undefined : copies.map(Math.sqrt);
+  const scale: number[] = [];
+  const columns = active.map((k) => {
+    const column = whitened(eq, eq.design[k]!, root);
+    let square = 0;
+    for (let i = 0; i < n; i++) square += column[i]! * column[i]!;
+    const length = Math.sqrt(square) || 1;
+    for (let i = 0; i < n; i++) column[i]! /= length;
+    scale.push(length);
+    return column;
   });
-  let floor = 0;
-  for (let i = 0; i < problem.n; i++) floor += variance.inverse[i]! * (1e-15 * (1 + Math.abs(problem.y[i]!))) ** 2;
+  const { r, right } = triangularise(columns, whitened(eq, eq.r, root));
   return {
-    ...triangularise(columns, out(eq.r)),
+    r,
+    right,
     scale,
     gradient: active.map((k) => gradientOf(eq, k, copies)),
     excess: excessOf(eq, active, scale, copies),
-    floor,
+    floor: roundingOf(eq),
   };
 }
 
+function whitened(eq: Equations, column: Float64Array, root: Float64Array | undefined): Float64Array {
+  const out = new Float64Array(column.length);
+  whiten(eq.variance, column, out);
+  if (root !== undefined) for (let i = 0; i < out.length; i++) out[i]! *= root[i]!;
+  return out;
+}
+
+/** What Q would be if the residuals were nothing but rounding of y. */
+function roundingOf({ variance, problem }: Equations): number {
+  let floor = 0;
+  for (let i = 0; i < problem.n; i++) floor += variance.inverse[i]! * (1e-15 * (1 + Math.abs(problem.y[i]!))) ** 2;
+  return floor;
+}
+
 /** Xhat^T V^-1 M + its transpose - M^T V^-1 M + sum w^2 S, M = w m: what the Hessian of Q/2 has less than Xhat^T V^-1 Xhat. */
-function excessOf(
-  eq: Equations,
-  active: readonly number[],
-  scale: readonly number[],
-  copies: Float64Array | undefined,
-): Float64Array | undefined {
-  const { moved, w, variance, problem } = eq;
-  if (problem.sigma === undefined || moved.every((column) => column.every((value) => value === 0))) return undefined;
+function excessOf(eq: Equations, active: readonly number[], scale: readonly number[], copies: Float64Array | undefined): Small | undefined {
+  const { moved, w, problem, design } = eq;
+  const { n, sigma } = problem;
+  if (sigma === undefined || !moved.some(isNotZero)) return undefined;
   const p = moved.length;
-  const times = copies ?? new Float64Array(problem.n).fill(1);
-  const shifted = moved.map((column) => column.map((value, i) => value * w[i]!));
-  const white = (column: Float64Array): Float64Array => {
-    const result = new Float64Array(problem.n);
-    whiten(variance, column, result);
-    return result;
-  };
-  const zero = new Float64Array(problem.n);
-  const m = active.map((k) => white(k < p ? shifted[k]! : zero));
-  const x = active.map((k) => white(eq.design[k]!));
-  const errors = designErrors(
-    eq,
-    w.map((value, i) => times[i]! * value * value),
-  );
   const q = active.length;
-  const result = new Float64Array(q * q);
-  active.forEach((ka, a) => {
-    active.forEach((kb, b) => {
-      let sum = ka < p && kb < p ? errors[ka * p + kb]! : 0;
-      for (let i = 0; i < problem.n; i++) sum += times[i]! * (x[a]![i]! * m[b]![i]! + m[a]![i]! * x[b]![i]! - m[a]![i]! * m[b]![i]!);
-      result[a * q + b] = sum / (scale[a]! * scale[b]!);
+  const times = new Float64Array(n);
+  for (let i = 0; i < n; i++) times[i] = (copies === undefined ? 1 : copies[i]!) * w[i]! * w[i]!;
+  const errors = designErrors(eq, times);
+  const result = zeros(q * q);
+  active.forEach((kb, b) => {
+    const m = moved[kb];
+    if (m === undefined || !isNotZero(m)) return;
+    const shifted = new Float64Array(n);
+    for (let i = 0; i < n; i++) shifted[i] = m[i]! * w[i]!;
+    const solved = new Float64Array(n);
+    applyInverse(eq.variance, shifted, solved);
+    if (copies !== undefined) for (let i = 0; i < n; i++) solved[i]! *= copies[i]!;
+    active.forEach((ka, a) => {
+      const x = design[ka]!;
+      const other = moved[ka];
+      let sum = 0;
+      for (let i = 0; i < n; i++) sum += (x[i]! - (other === undefined ? 0 : (other[i]! * w[i]!) / 2)) * solved[i]!;
+      result[a * q + b]! += sum;
+      result[b * q + a]! += sum;
     });
   });
+  for (let a = 0; a < q; a++) {
+    for (let b = 0; b < q; b++) {
+      const [ka, kb] = [active[a]!, active[b]!];
+      if (ka < p && kb < p) result[a * q + b]! += errors[ka * p + kb]!;
+      result[a * q + b]! /= scale[a]! * scale[b]!;
+    }
+  }
   return result;
+}
+
+function isNotZero(column: Float64Array): boolean {
+  for (let i = 0; i < column.length; i++) if (column[i] !== 0) return true;
+  return false;
 }
 
 /** Damped step in the parameters themselves. */
@@ -199,20 +220,20 @@ function stepOf({ r, right, scale, excess }: System, damping: number): readonly 
 }
 
 /** (R^T R - excess)^-1 in the coordinates that make R the identity; undefined where that is not safely positive. */
-function newtonStep(r: Float64Array, right: Float64Array, excess: Float64Array, q: number): readonly number[] | undefined {
+function newtonStep(r: Small, right: Small, excess: Small, q: number): readonly number[] | undefined {
   const half = inverseTransposeTimes(r, excess, q);
-  const inner = inverseTransposeTimes(r, transpose(half, q, q), q);
+  const inner = inverseTransposeTimes(r, transpose(half, q), q);
   const hessian = identity(q).map((value, k) => value - inner[k]!);
   const factor = choleskyOf(hessian, q);
   if (factor === undefined || hessianTooFlat(factor, q)) return undefined;
   return backSubstitute(r, solveWith(factor, right, q, 1), q);
 }
 
-const hessianTooFlat = (factor: Float64Array, q: number): boolean =>
+const hessianTooFlat = (factor: Small, q: number): boolean =>
   Array.from({ length: q }, (_, i) => factor[i * q + i]!).some((value) => !(value > 0.2));
 
 /** R^-T matrix, q x q. */
-function inverseTransposeTimes(r: Float64Array, matrix: Float64Array, q: number): Float64Array {
+function inverseTransposeTimes(r: Small, matrix: Small, q: number): Small {
   const out = matrix.slice();
   for (let c = 0; c < q; c++) {
     for (let i = 0; i < q; i++) {
@@ -224,7 +245,7 @@ function inverseTransposeTimes(r: Float64Array, matrix: Float64Array, q: number)
   return out;
 }
 
-function backSubstitute(r: Float64Array, right: ArrayLike<number>, q: number): readonly number[] {
+function backSubstitute(r: Small, right: ArrayLike<number>, q: number): readonly number[] {
   const out = new Array<number>(q).fill(0);
   for (let i = q - 1; i >= 0; i--) {
     let sum = right[i]!;
@@ -235,5 +256,5 @@ function backSubstitute(r: Float64Array, right: ArrayLike<number>, q: number): r
 }
 
 /** Columns of unit length: a diagonal entry of R this small means that nothing is left of that column beside the ones before it. */
-const wellConditioned = (r: Float64Array, q: number): boolean =>
+const wellConditioned = (r: Small, q: number): boolean =>
   Array.from({ length: q }, (_, i) => Math.abs(r[i * q + i]!)).every((value) => value > 1e-9);
