@@ -14,6 +14,7 @@ import { evidenceOf, type Witness } from './regression/evidence.ts';
 import type { FitOptions } from './regression/fit.ts';
 import { fitData } from './regression/fit-data.ts';
 import { fitLaw, type LawToFit } from './regression/fit-law.ts';
+import { lawCurves } from './results/curves.ts';
 import { assemble } from './results/assemble.ts';
 import { cautionsFor } from './results/cautions.ts';
 import type { StudyResult } from './results/study-result.ts';
@@ -44,8 +45,9 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
   // 2. Observations -> fits: one for each law, each with its stopping reason, intervals and diagnostics.
   const contenders = plan.laws.map((law): Witness => {
     const data = fitData(observations, keysOf(law));
-    const fit = fitLaw(law, data, options);
-    return { law, data, fit, cross: crossValidate(law, fit, data, options) };
+    const fit = fitLaw(law, data, options, 'law only');
+    const cross = crossValidate(law, fit, data, options);
+    return { law, data, fit: { ...fit, statistics: { ...fit.statistics, cvRmsLn: cross.rms, cvKind: cross.kind } }, cross };
   });
   someUsable(plan, contenders);
 
@@ -65,7 +67,10 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     keysOf(chosen.law).map((key) => observations.keys.indexOf(key)),
   );
 
-  // 6. Everything as plain JSON, the only thing reports and writers see.
+  // 6. The chosen law as lines and bands.
+  const curves = lawCurves(chosen.fit, chosen.data, audited?.rows ?? []);
+
+  // 7. Everything as plain JSON, the only thing reports and writers see.
   const notes: readonly Note[] = [
     ...plan.notes,
     ...read.notes,
@@ -85,6 +90,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     plant: null,
     nextTrials: null,
     budgets: budget,
+    curves,
     notes,
     cautions: cautionsFor(plan),
     options,

@@ -39,7 +39,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanI
   const quantities = planQuantities(study.quantities, header, faults);
   const formulas = formulaRules(quantities.formulas, quantities.dimensions, faults);
   const groups = planGroups(study, header, quantities.dimensions, faults);
-  const coefficient = planCoefficient(study, faults);
+  const coefficient = planCoefficient(study, quantities, faults);
   const fluids = planFluids(study.fluid, tables, faults);
   const asked = applicable(study, catalogue, own, faults);
   const inputs = [...quantities.inputs, ...groups.inputs];
@@ -137,8 +137,8 @@ function sentenceOf(
   const result = study.transfer === 'heat' ? 'heat_transfer_coefficient' : 'mass_transfer_coefficient';
   if (roots.includes(result)) {
     if (coefficient === undefined) return says.noCoefficient(name);
-    if (coefficient.route.gives(coefficient.settings) !== result)
-      return says.coefficientIsOverall(coefficient.route.gives(coefficient.settings), name);
+    if (coefficient.route.gives(coefficient.settings, coefficient.context) !== result)
+      return says.coefficientIsOverall(coefficient.route.gives(coefficient.settings, coefficient.context), name);
   }
   return [says.cannotHave(name, roots), ...lack.ways.slice(0, 3).map((way) => says.wayTo(lack.key, way.rule.formula, way.lacks))].join(
     '; ',

@@ -1,6 +1,6 @@
 import * as says from '../base/says/choice.ts';
 import { studentQuantile } from '../numerics/distributions.ts';
-import type { CrossValidation } from './cross-validate.ts';
+import { type CrossValidation, foldLosses } from './cross-validate.ts';
 import type { Fit } from './fit.ts';
 
 export interface ComparedLaw {
@@ -19,6 +19,10 @@ export interface Choice {
   readonly compared: readonly ComparedLaw[];
 }
 
+interface Held extends Contender {
+  readonly losses: readonly number[];
+}
+
 /** From this number of left-out campaigns on a difference gets a verdict; below it is only counted. */
 const LEAST_FOLDS = 5;
 
@@ -32,7 +36,9 @@ export interface Contender {
  * Which law: the one with fewest parameters stands unless a richer one predicts left-out trials better beyond one standard error of the difference.
  * Interval of the mean difference per fold: dbar +- t s sqrt(1/C + 1/(C-1)), which counts that the folds share their training trials (Nadeau and Bengio 2003).
  */
-export function chooseLaw(contenders: readonly Contender[]): Choice {
+export function chooseLaw(all: readonly Contender[]): Choice {
+  const reference = all.filter(({ fit }) => isUsable(fit)).reduce((a, b) => (b.fit.statistics.rmsLn < a.fit.statistics.rmsLn ? b : a), all[0]!).fit;
+  const contenders = all.map((one): Held => ({ ...one, losses: foldLosses(one.cross, reference) }));
   const usable = contenders.filter(({ fit }) => isUsable(fit));
   const simplestFirst = [...(usable.length > 0 ? usable : contenders)].sort((a, b) => free(a) - free(b) || meanLoss(a) - meanLoss(b));
   let best = simplestFirst[0]!;
@@ -63,7 +69,7 @@ export const isUsable = (fit: Fit): boolean =>
   ['converged', 'direct solution', 'on a bound'].includes(fit.stop.why) && Number.isFinite(fit.statistics.residualSd);
 
 const free = ({ fit }: Contender): number => fit.free.length;
-const meanLoss = ({ cross }: Contender): number => mean(cross.losses);
+const meanLoss = ({ losses }: Held): number => mean(losses);
 const mean = (values: readonly number[]): number => values.reduce((sum, v) => sum + v, 0) / values.length;
 
 interface Difference {
@@ -76,8 +82,8 @@ interface Difference {
   readonly wins: number;
 }
 
-function difference(standing: Contender, rival: Contender): Difference {
-  const d = standing.cross.losses.map((loss, k) => loss - rival.cross.losses[k]!).filter(Number.isFinite);
+function difference(standing: Held, rival: Held): Difference {
+  const d = standing.losses.map((loss, k) => loss - rival.losses[k]!).filter(Number.isFinite);
   const c = d.length;
   if (c < 2)
     return {
@@ -96,7 +102,7 @@ function difference(standing: Contender, rival: Contender): Difference {
 }
 
 /** A law is accepted for the plant's comparison where it is usable and not clearly worse than the chosen one. */
-function rowOf(one: Contender, best: Contender): ComparedLaw {
+function rowOf(one: Held, best: Held): ComparedLaw {
   const { fit, cross } = one;
   const behind = difference(one, best);
   const accepted = isUsable(fit) && (one === best || !(behind.folds >= LEAST_FOLDS && behind.lower > 0));

@@ -26,8 +26,7 @@ export interface CrossValidation {
   readonly kind: 'leave one trial out' | 'leave one campaign out';
   /** Per trial: y - prediction from the other folds (ln for relative errors); NaN where the law could not be fitted without it. */
   readonly errors: readonly number[];
-  /** Per fold: whitened loss e^T V^-1 e over the fold, V from the full fit: correlated trials of a campaign count once. */
-  readonly losses: readonly number[];
+  readonly folds: readonly (readonly number[])[];
   readonly rms: number;
 }
 
@@ -47,12 +46,11 @@ export function crossValidate(law: LawToFit, full: Fit, data: FitData, options: 
     if (fit === undefined) continue;
     for (const i of fold) errors[i] = data.y[i]! - predictAt(fit, data, i);
   }
-  const losses = folds.map((fold) => loss(fold, errors, full));
   const known = errors.filter(Number.isFinite);
   return {
     kind,
     errors,
-    losses,
+    folds,
     rms: known.length === 0 ? Number.NaN : Math.sqrt(known.reduce((sum, e) => sum + e * e, 0) / known.length),
   };
 }
@@ -62,6 +60,12 @@ function refit(law: LawToFit, data: FitData, options: FitOptions): Fit | undefin
   const fit = fitLaw(law, data, options);
   return fit.stop.why === 'rank deficient' || fit.stop.why === 'not finite' || fit.stop.why === 'not started' ? undefined : fit;
 }
+
+/**
+ * Whitened loss e^T V^-1 e of each fold, V from one reference fit for all laws that are compared: a law that fits badly must not be forgiven by its own
+ * larger scatter. Correlated trials of a campaign count once.
+ */
+export const foldLosses = ({ folds, errors }: CrossValidation, reference: Fit): readonly number[] => folds.map((fold) => loss(fold, errors, reference));
 
 /** e^T (diag(v) + tau^2 1 1^T)^-1 e by the matrix inversion lemma. */
 function loss(fold: readonly number[], errors: readonly number[], fit: Fit): number {

@@ -11,6 +11,7 @@ import type { FitOptions } from '../regression/fit.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
 import type { Trials } from '../trials/read-trials.ts';
+import type { LawCurve } from './curves.ts';
 import { methodOf } from './method.ts';
 import type { StudyResult } from './study-result.ts';
 import { trialRows } from './trial-rows.ts';
@@ -27,6 +28,7 @@ export interface Stages {
   readonly plant: PlantResult | null;
   readonly nextTrials: NextTrialsResult | null;
   readonly budgets: readonly Budget[];
+  readonly curves: readonly LawCurve[];
   readonly notes: readonly Note[];
   readonly cautions: readonly string[];
   readonly options: FitOptions;
@@ -85,13 +87,14 @@ export function assemble(stages: Stages): StudyResult {
     chosen: choice.law,
     choice,
     theory: evidence.theory,
-    intervals: contenders.flatMap(({ fit }) => fit.intervals ?? []),
+    intervals: intervalsOf(contenders),
     influence: evidence.influence,
     identifiability: evidence.identifiability,
     audit: stages.audit,
     plant: stages.plant,
     nextTrials: stages.nextTrials,
     budgets: stages.budgets,
+    curves: stages.curves,
     series: [],
     notes: distinct(stages.notes),
     method: methodOf(
@@ -120,6 +123,12 @@ function statementsOf(options: FitOptions, contenders: readonly Contender[]): re
     says.intervalMethod(options.confidence),
   ];
 }
+
+/** Each free parameter's interval with the method that made it. */
+const intervalsOf = (contenders: readonly Contender[]): StudyResult['intervals'] =>
+  contenders.flatMap(({ fit }) =>
+    fit.parameters.filter((parameter) => !parameter.fixed).map(({ name, lower, upper, intervalBy }) => ({ law: fit.name, parameter: name, method: intervalBy, lower, upper, note: '' })),
+  );
 
 /** The same sentence is told once. */
 function distinct(notes: readonly Note[]): readonly Note[] {

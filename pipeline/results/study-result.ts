@@ -1,5 +1,6 @@
 import type { AuditResult } from '../audit/verdict.ts';
 import type { Note } from '../base/message.ts';
+import type { LawCurve } from './curves.ts';
 import type { Budget } from '../budget/budget.ts';
 import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
@@ -112,6 +113,8 @@ export interface StudyResult {
   readonly plant: PlantResult | null;
   readonly nextTrials: NextTrialsResult | null;
   readonly budgets: readonly Budget[];
+  /** The chosen law against each group that varies. */
+  readonly curves: readonly LawCurve[];
   /** Logged curves behind a coefficient, thinned for drawing: t in s. */
   readonly series: readonly {
     readonly trial: string;
@@ -137,4 +140,4 @@ export interface StudyResult {
   };
 }
 
-export type { Choice, Identifiability, InfluenceRow, TheoryTest };
+export type { Choice, LawCurve, Identifiability, InfluenceRow, TheoryTest };

@@ -82,3 +82,4 @@ export const noSuchCondition = (name: string, meant: string | undefined): string
   `the fluid's condition is to be taken from "${name}", which is neither given nor can be derived${meant === undefined ? '' : `; did you mean "${meant}"?`}`;
 export const correlationLacks = (name: string, definition: string, roots: readonly string[]): string =>
   `${name} (${definition})${roots.length === 0 ? '' : `, for which ${roots.join(' and ')} ${roots.length === 1 ? 'is' : 'are'} missing`}`;
+export const unreadableSetting = (key: string, read: string, wanted: string): string => `"${read}" cannot be read as ${key}: ${wanted}`;
