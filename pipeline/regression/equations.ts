@@ -31,7 +31,7 @@ export interface Equations {
 }
 
 /** Adjusted points of a law that is curved in its groups: iterations, and the move (in units of the scale) that ends them. */
-const ADJUST = { iterations: 50, move: 1e-13 };
+const ADJUST = { iterations: 50, move: 1e-11 };
 
 export function equations(problem: Problem): Equations {
   const { n, model, sigma } = problem;
@@ -85,11 +85,22 @@ function evaluate(state: State, theta: Float64Array, components: Components): nu
   return q;
 }
 
-/** Moves the model's columns to the adjusted points, linearising the law there, until they rest; from the readings again where the last points lead nowhere. */
+/**
+ * Moves the model's columns to the adjusted points, linearising the law there, until they rest; from the readings again where the last points lead nowhere.
+ * Far from the fit they may not rest at all: then the law is linearised at the readings.
+ */
 function adjust(state: State, theta: Float64Array, components: Components): void {
   if (rest(state, theta, components)) return;
   backToReadings(state);
-  if (!rest(state, theta, components) && state.w.some(Number.isNaN)) backToReadings(state);
+  if (rest(state, theta, components)) return;
+  backToReadings(state);
+  look(state, theta, components);
+}
+
+function look(state: State, theta: Float64Array, components: Components): void {
+  state.bound.run(state.theta, true);
+  residuals(state, theta);
+  weigh(state, components);
 }
 
 function backToReadings({ problem, bound }: State): void {
@@ -102,9 +113,7 @@ function backToReadings({ problem, bound }: State): void {
 function rest(state: State, theta: Float64Array, components: Components): boolean {
   const { problem, bound, covariance, w } = state;
   for (let iteration = 0; iteration < ADJUST.iterations; iteration++) {
-    bound.run(state.theta, true);
-    residuals(state, theta);
-    weigh(state, components);
+    look(state, theta, components);
     let largest = 0;
     problem.x.forEach((x, k) => {
       const at = bound.x[k]!;
@@ -112,12 +121,13 @@ function rest(state: State, theta: Float64Array, components: Components): boolea
       for (let i = 0; i < x.length; i++) {
         const to = x[i]! - s[i]! * w[i]!;
         const move = Math.abs(to - at[i]!) / (1 + Math.abs(to));
-        if (!(move <= largest)) largest = move;
+        if (!(move >= 0)) largest = Number.POSITIVE_INFINITY;
+        else if (move > largest) largest = move;
         at[i] = to;
       }
     });
     if (largest <= ADJUST.move) return true;
-    if (Number.isNaN(largest)) return false;
+    if (largest === Number.POSITIVE_INFINITY) return false;
   }
   return false;
 }

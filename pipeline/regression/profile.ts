@@ -1,7 +1,8 @@
 import type { Solved } from './solve-law.ts';
 import { solveTheta } from './theta.ts';
 
-const LIMITS = { doublings: 40, iterations: 60, closeness: 1e-9 };
+/** Strides outward, iterations inward, closeness to the cut (its share), and what solving for the others may cost. */
+const LIMITS = { strides: 40, iterations: 60, closeness: 1e-7, step: 1e-5, solving: 40 };
 
 /**
  * Where the profile of Q over one parameter (at held components) has risen by t^2 c^T Phi c/c^T A^-1 c, on one side of the estimate; model's coordinates.
@@ -17,11 +18,14 @@ export function profileLimit(solved: Solved, position: number, sign: -1 | 1, t: 
   const at = position * columns.length + position;
   const cut = t * Math.sqrt(phi[at]! / inverseOfA[at]!);
   const edge = sign > 0 ? search.upper[k]! : search.lower[k]!;
-  const others = { ...search, free: search.free.filter((one) => one !== k) };
+  const others = { ...search, step: LIMITS.step, iterations: LIMITS.solving, free: search.free.filter((one) => one !== k) };
   let theta = settled.theta;
   /** Root of the rise of Q less the cut: nearly linear in the parameter. */
   const rise = (value: number): number => {
     const start = theta.slice();
+    columns.forEach((one, j) => {
+      start[one]! += ((value - theta[k]!) * inverseOfA[j * columns.length + position]!) / inverseOfA[at]!;
+    });
     start[k] = value;
     const found = solveTheta(eq, start, settled.components, others);
     if (!Number.isFinite(found.q)) return Number.NaN;
@@ -33,19 +37,20 @@ export function profileLimit(solved: Solved, position: number, sign: -1 | 1, t: 
   return limit;
 }
 
-/** Brackets the root outward from the estimate, then closes in on it (regula falsi, Illinois). */
+/** Brackets the root outward from the estimate in steps that the rise so far suggests, then closes in on it (regula falsi, Illinois). */
 function climb(rise: (value: number) => number, from: number, step: number, cut: number, edge: number): number {
-  const outside = (value: number): boolean => (step > 0 ? value >= edge : value <= edge);
   let [inner, low] = [from, -cut];
-  let [outer, high] = [from, Number.NaN];
-  let stride = step;
-  for (let doubling = 0; doubling < LIMITS.doublings; doubling++, stride *= 2) {
-    outer = from + stride;
-    if (outside(outer)) outer = edge;
-    high = rise(outer);
+  let stride = step / 2;
+  for (let trial = 0; trial < LIMITS.strides; trial++) {
+    const ahead = inner + stride;
+    const outer = step > 0 ? Math.min(edge, ahead) : Math.max(edge, ahead);
+    const high = rise(outer);
     if (Number.isNaN(high)) return valueless(rise, inner, outer, low, cut);
     if (high >= 0) return close(rise, inner, outer, low, high, cut);
     if (outer === edge) return edge;
+    const slope = (high - low) / (outer - inner);
+    const needed = slope * step > 0 ? (-1.05 * high) / slope : 2 * stride;
+    stride = Math.sign(step) * Math.min(Math.abs(needed), 2 * Math.abs(outer - from));
     [inner, low] = [outer, high];
   }
   return step > 0 ? Number.POSITIVE_INFINITY : Number.NEGATIVE_INFINITY;

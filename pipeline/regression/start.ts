@@ -8,8 +8,8 @@ import { inCoordinates } from './model.ts';
 import type { Problem } from './problem.ts';
 import { type Search, type Solution, solveTheta } from './theta.ts';
 
-/** How many starting points are looked at, and how many of the best are followed to their minimum. */
-const STARTS = { looked: 300, followed: 8, iterations: 60 };
+/** How many starting points are looked at, how many of the best are followed to their minimum at most, and when two minima are one. */
+const STARTS = { looked: 300, followed: 12, iterations: 60, same: 1e-7 };
 
 /**
  * Plain least squares of a law, all variances equal, as the place to start from: direct where the law is linear in its parameters; from the values given where
@@ -38,9 +38,20 @@ export function plainStart(form: Form, problem: Problem, given: Readonly<Record<
     if (solution.stop.why !== 'not finite') return solution;
   }
   const ranked = candidates(form, problem, known, search, plain, seed);
-  const ends = ranked.slice(0, STARTS.followed).map((values) => follow(values, STARTS.iterations));
-  const best = ends.filter(({ q }) => Number.isFinite(q)).sort((a, b) => a.q - b.q)[0];
+  const best = bestEnd(ranked, (values) => follow(values, STARTS.iterations));
   return best === undefined ? follow(known.map((value) => value ?? 1)) : solveTheta(plain, best.theta, unit, search);
+}
+
+/** Follows the best candidates until the lowest minimum has been reached twice. */
+function bestEnd(ranked: readonly (readonly number[])[], follow: (values: readonly number[]) => Solution): Solution | undefined {
+  let best: Solution | undefined;
+  for (const values of ranked.slice(0, STARTS.followed)) {
+    const end = follow(values);
+    if (!Number.isFinite(end.q)) continue;
+    if (best !== undefined && Math.abs(end.q - best.q) <= STARTS.same * best.q) return best;
+    if (best === undefined || end.q < best.q) best = end;
+  }
+  return best;
 }
 
 const withShifts = (problem: Problem, theta: Float64Array): Float64Array => Float64Array.from([...theta, ...problem.shifts.map(() => 0)]);

@@ -13,6 +13,8 @@ export interface Search {
   /** n copies of each trial, for resamples; all trials of a campaign alike where there is a campaign effect. */
   readonly copies?: Float64Array;
   readonly iterations?: number;
+  /** The step that ends the search, in units of the scatter of theta; Q is then known to its square. */
+  readonly step?: number;
 }
 
 export interface Solution {
@@ -37,10 +39,11 @@ export function solveTheta(eq: Equations, start: Float64Array, components: Compo
   let damping = 0;
   let iterations = 0;
   const limit = search.iterations ?? LIMITS.iterations;
+  const smallest = search.step ?? LIMITS.step;
   const end = (why: Stop['why'], value: number, onBound: readonly number[]): Solution => ({
     theta,
     q,
-    stop: { why, value, limit: LIMITS.step, iterations },
+    stop: { why, value, limit: smallest, iterations },
     onBound,
   });
   if (!Number.isFinite(q)) return end('not finite', q, []);
@@ -59,7 +62,7 @@ export function solveTheta(eq: Equations, start: Float64Array, components: Compo
       });
       const drop = active.reduce((sum, k, j) => sum + system.gradient[j]! * (candidate[k]! - theta[k]!), 0);
       value = Math.sqrt(Math.max(0, drop) * (freedom / size));
-      const last = !(value > LIMITS.step);
+      const last = !(value > smallest);
       const to = last && !(drop > 0) ? Number.NaN : objective(eq, candidate, components, search.copies);
       if (to <= q) {
         theta.set(candidate);
