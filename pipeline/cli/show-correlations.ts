@@ -1,12 +1,14 @@
 import { catalogue } from '../../correlations/catalogue.ts';
 import type { Correlation } from '../../correlations/correlation.ts';
 import { evaluateCorrelation } from '../../correlations/evaluate-correlation.ts';
+
 import { says } from '../base/says/cli.ts';
 import { wrongCommandLine } from './arguments.ts';
 import { atValues } from './at-values.ts';
 import { correlationRecord, matching, type Wanted } from './correlation-record.ts';
 import { listText, numbers, wholeText } from './correlation-text.ts';
 import { EXIT, type Exit } from './exit.ts';
+import { groupsOf } from './groups-of.ts';
 import type { Terminal } from './terminal.ts';
 
 /** What `pilotlaw correlations` was asked for. */
@@ -40,16 +42,32 @@ function byId(id: string): Correlation {
   return entry;
 }
 
+/** A limit that looks at a group that is not given is neither inside nor outside. */
+interface LimitAt {
+  readonly says: string;
+  readonly inside: boolean | null;
+}
+
 function valueAt(entry: Correlation, at: string, json: boolean): string {
-  const needs = [...new Set([...entry.form.groups])];
-  const values = atValues(at, needs);
+  const gives = entry.form.response;
+  const also = Object.keys(entry.groups).filter((name) => name !== gives && !entry.form.groups.includes(name));
+  const values = atValues(at, entry.form.groups, also);
   const { value, limits } = evaluateCorrelation(entry, values);
-  if (!Number.isFinite(value)) throw wrongCommandLine(says.atNoValue(entry.form.response));
-  const inRange = limits.every(({ inside }) => inside);
-  if (json) return JSON.stringify({ id: entry.id, gives: entry.form.response, value, in_range: inRange, limits });
-  const lines = limits.map(({ says: text, inside }) => `    ${text}: ${inside ? says.inside : says.outside}`);
-  return [
-    `${entry.form.response} = ${Number(value.toPrecision(6))} at ${numbers(values)}: ${inRange ? says.inRange : says.outOfRange}`,
-    ...lines,
-  ].join('\n');
+  if (!Number.isFinite(value)) throw wrongCommandLine(says.atNoValue(gives));
+  const known = limits.map(
+    ({ says: text, inside }, k): LimitAt => ({
+      says: text,
+      inside: groupsOf(entry.limits[k]!.of).every((name) => name in values) ? inside : null,
+    }),
+  );
+  const inRange = together(known);
+  if (json) return JSON.stringify({ id: entry.id, gives, value, in_range: inRange, limits: known });
+  const lines = known.map((limit) => `    ${limit.says}: ${says.standing(limit.inside)}`);
+  return [`${gives} = ${Number(value.toPrecision(6))} at ${numbers(values)}: ${says.rangeStanding(inRange)}`, ...lines].join('\n');
+}
+
+/** Outside one is outside; inside all is inside. */
+function together(limits: readonly LimitAt[]): boolean | null {
+  if (limits.some(({ inside }) => inside === false)) return false;
+  return limits.some(({ inside }) => inside === null) ? null : true;
 }

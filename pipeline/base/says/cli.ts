@@ -89,8 +89,12 @@ export const says = {
   fromMemory: ' (constants from memory)',
   checkedAt: (kind: string, at: string, gives: string, value: number, source: string, where: string): string =>
     `${kind}: ${gives} = ${value} at ${at} (${source}, ${where})`,
-  inside: 'inside',
-  outside: 'OUTSIDE',
-  inRange: 'inside the range its authors state',
-  outOfRange: 'outside the range its authors state',
+  standing: (inside: boolean | null): string =>
+    inside === null ? 'not known, for a group in it is not given' : inside ? 'inside' : 'OUTSIDE',
+  rangeStanding: (inside: boolean | null): string =>
+    inside === null
+      ? 'not all of its range can be looked at here'
+      : inside
+        ? 'inside the range its authors state'
+        : 'OUTSIDE the range its authors state',
 };
