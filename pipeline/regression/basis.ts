@@ -1,5 +1,5 @@
 import { whiten } from './campaign-variance.ts';
-import { type Small, triangularise, zeros } from './dense.ts';
+import { inverseOfUpper, type Small, triangularise } from './dense.ts';
 import type { Equations } from './equations.ts';
 
 /** The design in coordinates that make it orthonormal under the present V: X T, with T = R^-1 of its whitened columns. */
@@ -44,17 +44,4 @@ export function combine(columns: readonly Float64Array[], upper: Small, n: numbe
     }
     return out;
   });
-}
-
-function inverseOfUpper(r: Small, q: number): Small {
-  const out = zeros(q * q);
-  for (let j = 0; j < q; j++) {
-    out[j * q + j] = 1 / r[j * q + j]!;
-    for (let i = j - 1; i >= 0; i--) {
-      let sum = 0;
-      for (let k = i + 1; k <= j; k++) sum -= r[i * q + k]! * out[k * q + j]!;
-      out[i * q + j] = sum / r[i * q + i]!;
-    }
-  }
-  return out;
 }

@@ -176,3 +176,17 @@ export function rowsOf(matrix: Small): readonly (readonly number[])[] {
   const q = Math.round(Math.sqrt(matrix.length));
   return Array.from({ length: q }, (_, a) => matrix.slice(a * q, (a + 1) * q));
 }
+
+/** R^-1 of an upper triangular matrix. */
+export function inverseOfUpper(r: Small, q: number): Small {
+  const out = zeros(q * q);
+  for (let j = 0; j < q; j++) {
+    out[j * q + j] = 1 / r[j * q + j]!;
+    for (let i = j - 1; i >= 0; i--) {
+      let sum = 0;
+      for (let k = i + 1; k <= j; k++) sum -= r[i * q + k]! * out[k * q + j]!;
+      out[i * q + j] = sum / r[i * q + i]!;
+    }
+  }
+  return out;
+}

@@ -19,7 +19,7 @@ export interface Settled {
 }
 
 /** Rounds of alternation, and the relative change of every trial's variance that ends them. */
-const ALTERNATION = { rounds: 200, change: 1e-10 };
+const ALTERNATION = { rounds: 200, change: 1e-11 };
 
 /** theta at held components, the components at held theta, in turn until neither moves. */
 export function settle(eq: Equations, start: Float64Array, from: Components, search: Search): Settled {

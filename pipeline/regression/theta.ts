@@ -25,8 +25,11 @@ export interface Solution {
   readonly onBound: readonly number[];
 }
 
-/** The step that ends the search, in units of the scatter of theta; the largest damping; and the drop of Q that is rounding. */
-const LIMITS = { step: 1e-10, damping: 1e12, rounding: 1e-11, iterations: 200 };
+/**
+ * The step that ends the search, in units of the scatter of theta. Steps below `resting` are taken though Q cannot resolve them (a rise within rounding is none),
+ * as long as Q falls or each is less than half the one before. The largest damping.
+ */
+const LIMITS = { step: 1e-11, resting: 1e-4, rounding: 1e-10, falling: 1e-13, damping: 1e12, iterations: 200 };
 
 /**
  * theta = argmin r^T V(theta, phi)^-1 r at held components, V's dependence on theta inside: Gauss-Newton on the design at the adjusted points, corrected by
@@ -34,55 +37,79 @@ const LIMITS = { step: 1e-10, damping: 1e12, rounding: 1e-11, iterations: 200 };
  * Leaves the equations at the solution. The design is triangularised by QR; no normal equations of raw columns.
  */
 export function solveTheta(eq: Equations, start: Float64Array, components: Components, search: Search): Solution {
-  const theta = start.map((value, k) => Math.min(search.upper[k]!, Math.max(search.lower[k]!, value)));
-  let q = objective(eq, theta, components, search.copies);
-  let damping = 0;
-  let iterations = 0;
+  const at: Point = { theta: within(start, search), q: Number.NaN, damping: 0, value: Number.POSITIVE_INFINITY };
+  at.q = objective(eq, at.theta, components, search.copies);
   const limit = search.iterations ?? LIMITS.iterations;
-  const smallest = search.step ?? LIMITS.step;
-  const end = (why: Stop['why'], value: number, onBound: readonly number[]): Solution => ({
-    theta,
-    q,
-    stop: { why, value, limit: smallest, iterations },
+  const end = (why: Stop['why'], iterations: number, onBound: readonly number[]): Solution => ({
+    theta: at.theta,
+    q: at.q,
+    stop: { why, value: why === 'not finite' ? at.q : at.value, limit: search.step ?? LIMITS.step, iterations },
     onBound,
   });
-  if (!Number.isFinite(q)) return end('not finite', q, []);
-  for (; iterations < limit; iterations++) {
-    const onBound = heldByBounds(eq, theta, search);
+  if (!Number.isFinite(at.q)) return end('not finite', 0, []);
+  for (let iteration = 0; iteration < limit; iteration++) {
+    const onBound = heldByBounds(eq, at.theta, search);
     const active = search.free.filter((k) => !onBound.includes(k));
-    const system = systemOf(eq, active, search.copies);
-    const size = Math.max(q, system.floor);
-    const freedom = Math.max(1, eq.problem.n - active.length);
-    let value = 0;
-    for (;;) {
-      const step = stepOf(system, damping);
-      const candidate = theta.slice();
-      active.forEach((k, j) => {
-        candidate[k] = Math.min(search.upper[k]!, Math.max(search.lower[k]!, theta[k]! + step[j]!));
-      });
-      const drop = active.reduce((sum, k, j) => sum + system.gradient[j]! * (candidate[k]! - theta[k]!), 0);
-      value = Math.sqrt(Math.max(0, drop) * (freedom / size));
-      const last = !(value > smallest);
-      const to = last && !(drop > 0) ? Number.NaN : objective(eq, candidate, components, search.copies);
-      if (to <= q) {
-        theta.set(candidate);
-        q = to;
-        damping = damping > 1e-7 ? damping / 10 : 0;
-        if (last) return end(onBound.length > 0 ? 'on a bound' : 'converged', value, onBound);
-        break;
-      }
-      if (last || (to <= q * (1 + LIMITS.rounding) && drop <= q * LIMITS.rounding)) {
-        objective(eq, theta, components, search.copies);
-        return end(onBound.length > 0 ? 'on a bound' : 'converged', value, onBound);
-      }
-      damping = Math.max(1e-4, damping * 10);
-      if (damping > LIMITS.damping) {
-        objective(eq, theta, components, search.copies);
-        return end('no further descent', value, onBound);
-      }
-    }
+    const outcome = descend(eq, at, active, components, search);
+    if (outcome === 'stuck') return end('no further descent', iteration, onBound);
+    if (outcome === 'arrived') return end(onBound.length > 0 ? 'on a bound' : 'converged', iteration, onBound);
   }
-  return end('iterations used up', Number.NaN, heldByBounds(eq, theta, search));
+  return end('iterations used up', limit, heldByBounds(eq, at.theta, search));
+}
+
+/** Where the search stands; `value` is the last step in units of the scatter of theta. */
+interface Point {
+  readonly theta: Float64Array;
+  q: number;
+  damping: number;
+  value: number;
+}
+
+const within = (theta: Float64Array, { lower, upper }: Search): Float64Array =>
+  theta.map((value, k) => Math.min(upper[k]!, Math.max(lower[k]!, value)));
+
+/** One linearisation and its step, damped until it descends. Leaves the equations where the point is. */
+function descend(
+  eq: Equations,
+  at: Point,
+  active: readonly number[],
+  components: Components,
+  search: Search,
+): 'moved' | 'arrived' | 'stuck' {
+  const system = systemOf(eq, active, search.copies);
+  const freedom = Math.max(1, eq.problem.n - active.length);
+  const before = at.value;
+  for (; at.damping <= LIMITS.damping; at.damping = Math.max(1e-4, at.damping * 10)) {
+    const candidate = stepped(at, active, stepOf(system, at.damping), search);
+    const drop = active.reduce((sum, k, j) => sum + system.gradient[j]! * (candidate[k]! - at.theta[k]!), 0);
+    at.value = Math.sqrt(Math.max(0, drop) * (freedom / Math.max(at.q, system.floor)));
+    const resting = at.value < LIMITS.resting && at.damping === 0;
+    const small = !(at.value > (search.step ?? LIMITS.step));
+    if (small && (at.value === 0 || !resting)) return back(eq, at, components, 'arrived');
+    const q = objective(eq, candidate, components, search.copies);
+    if (q <= at.q || (resting && q <= at.q * (1 + LIMITS.rounding) + system.floor)) {
+      const falls = q < at.q * (1 - LIMITS.falling);
+      at.theta.set(candidate);
+      at.q = q;
+      at.damping = at.damping > 1e-7 ? at.damping / 10 : 0;
+      return small || (resting && !falls && at.value > before / 2) ? 'arrived' : 'moved';
+    }
+    if (resting) return back(eq, at, components, 'arrived');
+  }
+  return back(eq, at, components, 'stuck');
+}
+
+function stepped(at: Point, active: readonly number[], step: readonly number[], search: Search): Float64Array {
+  const out = at.theta.slice();
+  active.forEach((k, j) => {
+    out[k] = Math.min(search.upper[k]!, Math.max(search.lower[k]!, out[k]! + step[j]!));
+  });
+  return out;
+}
+
+function back<T>(eq: Equations, at: Point, components: Components, outcome: T): T {
+  eq.evaluate(at.theta, components);
+  return outcome;
 }
 
 /** Q, with every trial counted as often as it was drawn. */

@@ -6,7 +6,7 @@ import type { LawToFit } from '../../pipeline/regression/solve-law.ts';
 
 /** A law from its text; every name in `groups` is a group, any other a parameter. */
 export function law(text: string, groups: readonly string[], more: Partial<LawToFit> = {}): LawToFit {
-  const parsed = parseForm(text, { known: groups, needsParameter: true });
+  const parsed = parseForm(text, { known: groups, needsParameter: false });
   if (!('form' in parsed)) throw new Error(parsed.faults.map((fault) => fault.text).join('; '));
   const { form } = parsed;
   return { name: 'law', form, groups: Object.fromEntries([form.response, ...form.groups].map((name) => [name, name])), ...more };
