@@ -29,19 +29,22 @@ export function readBytes(path: string, options: ReadOptions): Buffer {
   });
 }
 
-/** A file in pieces of at most `piece` bytes, for logs that memory must not hold. The piece's memory is used again. */
-export function* readPieces(path: string, options: ReadOptions, piece = 1 << 20): Generator<Buffer> {
+/** A file in pieces of at most `size` bytes, for logs that memory must not hold at once. */
+export function* readPieces(path: string, options: ReadOptions, size = 1 << 20): Generator<Buffer> {
   const name = options.name ?? path;
   const file = openFile(path, options);
   try {
     if (fstatSync(file).size > options.most)
       throw refusal(says.tooLarge(name, fstatSync(file).size, options.most), 'file-too-large', name, options);
-    const buffer = Buffer.alloc(piece);
-    for (let read = readSync(file, buffer, 0, piece, null); read > 0; read = readSync(file, buffer, 0, piece, null))
-      yield buffer.subarray(0, read);
+    for (let piece = nextPiece(file, size); piece.length > 0; piece = nextPiece(file, size)) yield piece;
   } finally {
     closeSync(file);
   }
+}
+
+function nextPiece(file: number, size: number): Buffer {
+  const piece = Buffer.allocUnsafe(size);
+  return piece.subarray(0, readSync(file, piece, 0, size, null));
 }
 
 function opened<T>(path: string, options: ReadOptions, use: (file: number, size: number) => T): T {

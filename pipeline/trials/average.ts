@@ -17,6 +17,8 @@ export interface Trial {
   readonly values: Float64Array;
   /** Positions of columns whose mean rests on fewer readings than the trial has. */
   readonly thin: readonly number[];
+  /** Standard uncertainty (SI, k = 1) of a value by key where the readings themselves tell it: means over steady windows, curves. */
+  readonly statistical?: Readonly<Record<string, number>>;
 }
 
 /** Rows of one trial name to their mean, in the order of first rows. Rows of one trial that name two campaigns or settings stop with InputError (exit 3). */

@@ -6,6 +6,8 @@ export interface LedgerEntry {
   readonly campaign: string;
   readonly file: string;
   readonly line: number;
+  /** Rows that this entry stands for, from `line` on; 1 where left out. */
+  readonly rows?: number;
   readonly status: 'used' | 'left out' | 'refused';
   /** In words; empty for a plain used row. */
   readonly reason: string;
@@ -29,6 +31,8 @@ export interface LedgerSums {
 }
 
 export function sumLedger(entries: readonly LedgerEntry[]): LedgerSums {
-  const of = (status: LedgerEntry['status']): number => entries.filter((entry) => entry.status === status).length;
-  return { read: entries.length, used: of('used'), leftOut: of('left out'), refused: of('refused') };
+  const of = (status: LedgerEntry['status']): number => entries.filter((entry) => entry.status === status).reduce(rowsOf, 0);
+  return { read: entries.reduce(rowsOf, 0), used: of('used'), leftOut: of('left out'), refused: of('refused') };
 }
+
+const rowsOf = (sum: number, { rows = 1 }: LedgerEntry): number => sum + rows;

@@ -4,7 +4,7 @@ import { toSI, type Unit } from '../quantities/unit.ts';
 import { quantityOf } from '../quantities/vocabulary.ts';
 import { headerText } from './header.ts';
 import type { NameColumns } from './name-columns.ts';
-import { type CellReading, isMissing, readCell } from './number-cell.ts';
+import type { CellReader } from './number-cell.ts';
 import { orderOf } from './order.ts';
 import type { Table, TableRow } from './table.ts';
 
@@ -41,7 +41,7 @@ export interface RowReader {
   /** Line -> number of the row, which names a trial that has no name. */
   readonly numbers: ReadonlyMap<number, string>;
   readonly columns: readonly ColumnToRead[];
-  readonly reading: CellReading;
+  readonly cell: CellReader;
 }
 
 /** Name of the one campaign where the study tells none. */
@@ -50,19 +50,19 @@ export const onlyCampaign = 'all';
 /** A row to numbers in SI; the first cell that is none refuses it. */
 export function readRow(row: TableRow, reader: RowReader): TrialReading {
   const { table, names, columns } = reader;
-  const cell = (index: number | undefined): string | undefined => (index === undefined ? undefined : headerText(row.cells[index] ?? ''));
-  const trial = cell(names.trial) || reader.numbers.get(row.line)!;
+  const named = (index: number | undefined): string | undefined => (index === undefined ? undefined : headerText(row.cells[index] ?? ''));
+  const trial = named(names.trial) || reader.numbers.get(row.line)!;
   const place = { file: table.file, line: row.line };
   const values = new Float64Array(columns.length).fill(Number.NaN);
   const fault = nameFault(row, reader) ?? fillValues(row, reader, values);
-  const setting = cell(names.setting);
-  const order = cell(names.order);
+  const setting = named(names.setting);
+  const order = named(names.order);
   return {
     trial,
-    named: names.trial !== undefined && cell(names.trial) !== '',
-    campaign: cell(names.campaign) ?? onlyCampaign,
+    named: names.trial !== undefined && named(names.trial) !== '',
+    campaign: named(names.campaign) ?? onlyCampaign,
     ...(setting === undefined || setting === '' ? {} : { setting }),
-    ...(order === undefined ? {} : { order: orderOf(order, reader.reading.decimal) }),
+    ...(order === undefined ? {} : { order: orderOf(order, table.decimal) }),
     line: row.line,
     place,
     values,
@@ -76,9 +76,9 @@ interface CellFault {
   readonly column: string;
 }
 
-function nameFault({ cells }: TableRow, { table, names, reading }: RowReader): CellFault | undefined {
+function nameFault({ cells }: TableRow, { table, names, cell }: RowReader): CellFault | undefined {
   for (const index of [names.trial, names.campaign]) {
-    if (index !== undefined && isMissing(cells[index] ?? '', reading)) {
+    if (index !== undefined && cell.isMissing(cells[index] ?? '')) {
       const column = table.header[index]!;
       return { code: 'no-name', text: says.noName(column), column };
     }
@@ -87,11 +87,11 @@ function nameFault({ cells }: TableRow, { table, names, reading }: RowReader): C
 }
 
 /** Fills `values`; the fault of the first cell that is no number, or empty and needed. */
-function fillValues({ cells }: TableRow, { table, columns, reading }: RowReader, values: Float64Array): CellFault | undefined {
+function fillValues({ cells }: TableRow, { table, columns, cell }: RowReader, values: Float64Array): CellFault | undefined {
   let empty: CellFault | undefined;
   for (const [k, { key, index, unit, needed = true }] of columns.entries()) {
     const column = table.header[index]!;
-    const read = readCell(cells[index] ?? '', reading);
+    const read = cell.read(cells[index] ?? '');
     if (read === 'missing') {
       if (needed) empty ??= { code: 'empty-cell', text: says.emptyCell(column, cells[index] ?? ''), column };
       continue;

@@ -37,7 +37,8 @@ function gridOf(bytes: Buffer, file: string, sheet: string | undefined): Grid {
   return readDelimited(decodeText(bytes, file), file);
 }
 
-function tableOf(grid: Grid, expects: readonly string[]): Table {
+/** Finds header, units row and decimal mark of a grid. */
+export function tableOf(grid: Grid, expects: readonly string[]): Table {
   const { file, rows } = grid;
   if (rows.length === 0) throw stop(file, 1, 'empty-table', says.emptyTable());
   const at = findHeaderRow(rows, expects);

@@ -8,6 +8,7 @@ import { averaged, type Trial } from './average.ts';
 import { leaveOut } from './leave-out.ts';
 import type { LedgerEntry } from './ledger.ts';
 import { nameColumns } from './name-columns.ts';
+import { cellReader } from './number-cell.ts';
 import { type ColumnToRead, type RowReader, readRow, type TrialReading } from './read-row.ts';
 import type { Table } from './table.ts';
 
@@ -32,7 +33,7 @@ export function readTrials(table: Table, declared: Study['trials'], columns: rea
     names,
     numbers: rowNumbers(table),
     columns,
-    reading: { decimal: table.decimal, missing: declared.missing },
+    cell: cellReader({ decimal: table.decimal, missing: declared.missing }),
   };
   const rows = table.rows.map((row) => readRow(row, reader));
   const out = leaveOut(rows, declared.leaveOut);

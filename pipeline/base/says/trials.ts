@@ -69,4 +69,30 @@ export const says = {
     `${columns} of the values of trial ${quoted(trial)} rest on fewer readings than the trial has, because some cells are missing`,
   orderNotRead: (): string =>
     'the order of trials was not read: this cell is neither a number nor a date written year first (2024-12-31) or with points (31.12.2024)',
+  logEncoding: (): string => 'the log holds bytes that are no characters of its encoding; save it as UTF-8',
+  logQuote: (): string => 'a quote stands inside a field or never closes; write the log without quotes, or close them',
+  logUnitMissing: (header: string, unit: string): string =>
+    `${quoted(header)} tells no unit; give it beside the column, or in the header as ${quoted(`${header} [${unit}]`)}`,
+  timeNotRead: (text: string): string =>
+    `${quoted(text.trim())} is no time: give numbers with a unit in the header (t [s]), dates written year first or with points, or times of day with hours, minutes and seconds`,
+  timeBackwards: (trial: string, line: number): string =>
+    `the curve of trial ${quoted(trial)} was not read: time runs backwards at line ${line}`,
+  curveTooShort: (trial: string, inside: number, samples: number): string =>
+    `the curve of trial ${quoted(trial)} has ${inside} samples in its window (${samples} were read); three are the least`,
+  logRowsSkipped: (rows: number, text: string): string =>
+    `${count(rows)} row${rows === 1 ? '' : 's'} of the log ${rows === 1 ? 'was' : 'were'} not read; ${rows === 1 ? '' : 'the first one: '}${text}`,
+  logRagged: (): string => 'the row has another number of fields than the header',
+  logUnnamed: (): string => 'the row names no trial',
+  logBackwards: (): string => 'time runs backwards',
+  logRowsRefused: (rows: number): string => `${count(rows)} rows of the log are no numbers or run back in time`,
+  windowTooShort: (window: number, step: number, least: number): string =>
+    Number.isNaN(step)
+      ? 'the log has fewer than two rows'
+      : `a window of ${window} s holds fewer than ${least} samples of this log, which are ${step} s apart; give a longer one`,
+  steadyWindow: (rows: number, first: number, last: number): string => `mean of ${count(rows)} steady rows, lines ${first} to ${last}`,
+  notSteady: (rows: number): string => `${count(rows)} row${rows === 1 ? '' : 's'} not steady`,
+  steadyCriterion: (windows: number, used: number, rows: number): string =>
+    `${windows} steady window${windows === 1 ? '' : 's'} with ${count(used)} of ${count(rows)} rows of the log, found by the test of Kelly and Hedengren (2013) on every column; each is one trial, its means with standard uncertainties that count autocorrelation (Geyer 1992, Wolff 2004). A drift smaller than the scatter of a window passes the test`,
+  fewIndependent: (keys: readonly string[], least: number): string =>
+    `${keys.map(quoted).join(', ')}: the window is worth only ${Math.max(1, Math.round(least))} independent samples, so the uncertainty of the mean is too small by tens of per cent; log longer`,
 };
