@@ -24,6 +24,8 @@ export interface Equations {
   readonly moved: readonly Float64Array[];
   readonly bound: Bound;
   readonly moments: MomentsOf;
+  /** Back to the readings, after y or x of the problem were overwritten. */
+  restart(): void;
   /** V anew from D as it stands; r and w stay. */
   setComponents(components: Components): void;
   /** Sets everything for theta (q: parameters, then shifts) and returns Q = r^T V^-1 r; NaN where the law has no value. */
@@ -56,12 +58,16 @@ export function equations(problem: Problem): Equations {
   };
   return {
     ...state,
+    restart: () => {
+      backToReadings(state);
+      state.bound.load();
+    },
     setComponents: (components) => setComponents(state, components),
     evaluate: (theta, components) => evaluate(state, theta, components),
   };
 }
 
-type State = Omit<Equations, 'evaluate' | 'setComponents'> & {
+type State = Omit<Equations, 'evaluate' | 'setComponents' | 'restart'> & {
   readonly total: Float64Array;
   readonly slope: Float64Array;
   readonly theta: Float64Array;

@@ -60,6 +60,8 @@ export interface Bound {
   readonly byGroup: readonly Float64Array[];
   readonly cross: readonly (readonly Float64Array[])[];
   run(theta: Float64Array, moved: boolean): void;
+  /** After the columns were written. */
+  load(): void;
 }
 
 /** n trials; `slopes`: whether the derivatives to the groups are wanted too. */
@@ -79,6 +81,7 @@ export function bind(model: Model, x: readonly Float64Array[], n: number, slopes
     byConstant: columns.slice(1, 1 + p),
     byGroup: columns.slice(1 + p, 1 + p + g),
     cross: model.constants.map((_, j) => columns.slice(1 + p + g + j * g, 1 + p + g + (j + 1) * g)),
+    load: tape.load,
     run: (theta, moved) => {
       if (moved) tape.load();
       tape.run(theta);

@@ -9,7 +9,7 @@ import type { Solved } from './solve-law.ts';
 import type { Shifts } from './systematic.ts';
 
 /** One free parameter on the model's coordinates. */
-interface Coordinate {
+export interface Coordinate {
   readonly estimate: number;
   readonly random: number;
   readonly systematic: number;
@@ -76,7 +76,7 @@ function onBoundInterval(solved: Solved, j: number, { confidence }: FitOptions):
   return { lower, upper, intervalBy: 'profile' };
 }
 
-function coordinate({ sandwich: found, settled, columns, eq }: Solved, shifts: Shifts, position: number): Coordinate | undefined {
+export function coordinate({ sandwich: found, settled, columns, eq }: Solved, shifts: Shifts, position: number): Coordinate | undefined {
   const phi = found?.phi;
   if (found === undefined || phi === undefined) return undefined;
   const q = columns.length;

@@ -1,6 +1,6 @@
 import { compile } from '../algebra/tape.ts';
 import { combine } from './basis.ts';
-import { choleskyOf, inverseOfUpper, solveWith, triangularise, type Small, zeros } from './dense.ts';
+import { choleskyOf, inverseOfUpper, type Small, solveWith, triangularise, zeros } from './dense.ts';
 import type { Model } from './model.ts';
 
 /** Refits of one law to the same trials with other weights, from the fit of all: for laws without errors in the groups and without campaigns. */
@@ -16,7 +16,13 @@ const LIMITS = { iterations: 40, halvings: 20, drop: 1e-10 };
  * Gauss-Newton in coordinates that make the design of the full fit orthonormal, so that the small Gram matrix of each refit is safe to factor;
  * the first step needs only rows stored once. `inverse`: 1/variance of each trial; `theta`: the full fit, with R of full rank there.
  */
-export function resampler(model: Model, y: Float64Array, x: readonly Float64Array[], inverse: Float64Array, theta: Float64Array): Resampler {
+export function resampler(
+  model: Model,
+  y: Float64Array,
+  x: readonly Float64Array[],
+  inverse: Float64Array,
+  theta: Float64Array,
+): Resampler {
   const n = y.length;
   const p = model.constants.length;
   const none = x.length === 0;

@@ -73,4 +73,13 @@ export const noCovariance = (law: string): string =>
 export const weightsReplace = (): string =>
   'weights take the place of the stated random uncertainties: errors of the groups are not corrected for, and a prediction holds the scatter of a trial of weight 1';
 
+export const randomPartOnly = (): string => 'random part only';
+export const parametricBootstrap = (): string => 'a check: studies drawn from the fit and refitted at its own variances, random part only';
+export const trialBootstrap = (): string => 'a check: trials drawn with replacement, random part only';
+export const campaignBootstrap = (campaigns: number): string =>
+  `a check only: percentiles over ${campaigns} campaigns are too narrow (with ten or fewer they hold the truth in 74 to 90 % of studies where 95 % is meant)`;
+export const campaignBootstrapT = (failed: number, of: number): string =>
+  `a check: studentised over campaigns${failed > 0 ? `; ${failedResamples(failed, of)}` : ''}`;
+export const failedResamples = (failed: number, of: number): string => `${failed} of ${of} resamples have no fit and are left out`;
+
 export const choices = { percent, digits };
