@@ -29,7 +29,7 @@ const CAMPAIGNS_FOR_T = 10;
  * `options.resamples` 0 leaves the resampling out. Seeded: the same input gives the same rows.
  */
 export function intervalRows(law: LawToFit, fit: Fit, data: FitData, options: FitOptions): readonly IntervalRow[] {
-  const solved = solveLaw({ ...law, start: fit.values }, data, options);
+  const solved = solveLaw({ ...law, start: fit.values, trusted: true }, data, options);
   if (solved.sandwich?.phi === undefined) return [];
   const sets = [tLimits(solved, data, options), ...profiles(solved, data, options), ...resampled(solved, options)];
   const { model } = solved.eq.problem;

@@ -17,6 +17,8 @@ export interface LawToFit {
   readonly groups: Readonly<Record<string, string>>;
   readonly start?: Readonly<Record<string, number>>;
   readonly bounds?: Bounds;
+  /** The start is the fit of nearly the same trials: no other is tried. */
+  readonly trusted?: boolean;
   /** Values at which a parameter is held should the data not tell it (1/3 for Sc); before `start`. */
   readonly theory?: Readonly<Record<string, number>>;
 }
@@ -53,7 +55,7 @@ export function solveLaw(law: LawToFit, data: FitData, options: FitOptions): Sol
 function attempt(law: LawToFit, prepared: Prepared, data: FitData, options: FitOptions, held: readonly Held[]): Solved {
   const { problem } = prepared;
   const search = searchOf(law, problem.model, problem.shifts.length, held);
-  const start = plainStart(law.form, problem, { ...law.start, ...valuesOf(held) }, search, options.seed);
+  const start = plainStart(law, problem, { ...law.start, ...valuesOf(held) }, search, options.seed);
   const eq = equations(problem);
   eq.evaluate(start.theta, { scatter: 1, campaign: 0 });
   if (problem.estimate.scatter === false) refuseExact(eq.measured, data.trials, options);

@@ -11,12 +11,18 @@ import { type Search, type Solution, solveTheta } from './theta.ts';
 /** How many starting points are looked at, how many of the best are followed to their minimum at most, and when two minima are one. */
 const STARTS = { looked: 300, followed: 12, iterations: 60, same: 1e-7 };
 
+interface Startable {
+  readonly form: Form;
+  readonly trusted?: boolean;
+}
+
 /**
- * Plain least squares of a law, all variances equal, as the place to start from: direct where the law is linear in its parameters; from the values given where
- * all are; else the best of many starts, where parameters that enter linearly are solved for and the others drawn (seeded).
+ * Plain least squares of a law, all variances equal, as the place to start from: direct where the law is linear in its parameters; else from the values given
+ * and, unless they are `trusted`, from the best of many starts as well where any of those promises less: parameters that enter linearly are solved for, the
+ * others drawn (seeded).
  * theta holds parameters in the model's coordinates, then fixed shifts.
  */
-export function plainStart(form: Form, problem: Problem, given: Readonly<Record<string, number>>, search: Search, seed: number): Solution {
+export function plainStart({ form, trusted }: Startable, problem: Problem, given: Readonly<Record<string, number>>, search: Search, seed: number): Solution {
   const { sigma: _sigma, ...rest } = problem;
   const plain = equations({ ...rest, scatter: problem.scatter, block: new Int32Array(problem.n), blocks: 1 });
   const unit = { scatter: 1, campaign: 0 };
@@ -33,19 +39,20 @@ export function plainStart(form: Form, problem: Problem, given: Readonly<Record<
     return follow(zero);
   }
   const known = model.constants.map((name) => given[name]);
-  if (known.every((value) => value !== undefined)) {
-    const solution = follow(known as number[]);
-    if (solution.stop.why !== 'not finite') return solution;
-  }
-  const ranked = candidates(form, problem, known, search, plain, seed);
-  const best = bestEnd(ranked, (values) => follow(values, STARTS.iterations));
-  return best === undefined ? follow(known.map((value) => value ?? 1)) : solveTheta(plain, best.theta, unit, search);
+  const first = known.every((value) => value !== undefined) ? follow(known as number[]) : undefined;
+  if (first !== undefined && trusted) return first;
+  const ranked = candidates(form, problem, first === undefined ? known : [], search, plain, seed);
+  const reached = first !== undefined && Number.isFinite(first.q) ? first : undefined;
+  const rivals = ranked.filter(({ q }) => reached === undefined || q < reached.q * (1 - STARTS.same));
+  const best = bestEnd(rivals, (values) => follow(values, STARTS.iterations), reached);
+  if (best === undefined) return first ?? follow(known.map((value) => value ?? 1));
+  return best === first ? first : solveTheta(plain, best.theta, unit, search);
 }
 
 /** Follows the best candidates until the lowest minimum has been reached twice. */
-function bestEnd(ranked: readonly (readonly number[])[], follow: (values: readonly number[]) => Solution): Solution | undefined {
-  let best: Solution | undefined;
-  for (const values of ranked.slice(0, STARTS.followed)) {
+function bestEnd(ranked: readonly Looked[], follow: (values: readonly number[]) => Solution, reached: Solution | undefined): Solution | undefined {
+  let best = reached;
+  for (const { values } of ranked.slice(0, STARTS.followed)) {
     const end = follow(values);
     if (!Number.isFinite(end.q)) continue;
     if (best !== undefined && Math.abs(end.q - best.q) <= STARTS.same * best.q) return best;
@@ -56,6 +63,11 @@ function bestEnd(ranked: readonly (readonly number[])[], follow: (values: readon
 
 const withShifts = (problem: Problem, theta: Float64Array): Float64Array => Float64Array.from([...theta, ...problem.shifts.map(() => 0)]);
 
+interface Looked {
+  readonly values: readonly number[];
+  readonly q: number;
+}
+
 /** Drawn starting points, best first by the plain sum of squares. */
 function candidates(
   form: Form,
@@ -64,12 +76,12 @@ function candidates(
   search: Search,
   plain: Equations,
   seed: number,
-): readonly (readonly number[])[] {
+): readonly Looked[] {
   const random = seeded(seed);
   const linear = linearConstants(form, known);
   const project = projection(form, problem, linear);
   const exponents = exponentsOf(form.tree);
-  const looked: { readonly values: readonly number[]; readonly q: number }[] = [];
+  const looked: Looked[] = [];
   for (let k = 0; k < STARTS.looked; k++) {
     const drawn = form.constants.map(
       (name, j) => known[j] ?? draw(random.uniform(), random.uniform(), exponents.has(name), search, j, problem),
@@ -80,7 +92,7 @@ function candidates(
     const q = plain.evaluate(inside, { scatter: 1, campaign: 0 });
     if (Number.isFinite(q)) looked.push({ values, q });
   }
-  return looked.sort((a, b) => a.q - b.q).map(({ values }) => values);
+  return looked.sort((a, b) => a.q - b.q);
 }
 
 /** Exponents of groups lie in -1.5 to 2; anything else over seven decades, in either sign; between its bounds where both are given. */

@@ -28,6 +28,8 @@ export interface Setting {
   /** Standard uncertainty of a source common to all trials: ln Re moves by 1, ln Sh by -1 of it. It is at the plant too. */
   readonly systematic: number;
   readonly campaignEffect: FitOptions['campaignEffect'];
+  /** Whether what the study states is true. Where it is not, or where nobody can know it, no rule is held against the program. */
+  readonly premise: 'true' | 'stated wrongly' | 'cannot be known';
 }
 
 const base: Setting = {
@@ -46,6 +48,7 @@ const base: Setting = {
   perCampaign: false,
   systematic: 0,
   campaignEffect: 'auto',
+  premise: 'true',
 };
 
 const setting = (name: string, change: Partial<Setting>): Setting => ({ ...base, name, ...change });
@@ -66,17 +69,17 @@ export const settings: readonly Setting[] = [
   setting('12 trials, 3 campaigns, Re x10', { trials: 12, campaigns: 3 }),
   setting('12 trials, 6 campaigns, Re x3', { trials: 12, range: 3 }),
   setting('12 trials, 1 campaign, Re x10', { trials: 12, campaigns: 1 }),
-  setting('12 trials, 1 campaign that stands for all (tau 0)', { trials: 12, campaigns: 1, tau: 0 }),
-  setting('30 trials, 6 campaigns that do not differ (tau 0)', { tau: 0 }),
+  setting('12 trials, 1 campaign where campaigns do not differ', { trials: 12, campaigns: 1, tau: 0, premise: 'cannot be known' }),
+  setting('30 trials, 6 campaigns that do not differ', { tau: 0 }),
   setting('two groups, Sc x4 within campaigns', { form: 'two groups', uSc: 0.05 }),
   setting('two groups, Sc x4 between campaigns only', { form: 'two groups', uSc: 0.05, perCampaign: true }),
   setting('free offset, Re x100', { form: 'offset', range: 100, uRe: 0.05 }),
   setting('absolute errors, straight line', { form: 'line', uRe: 0.1 }),
   setting('a source common to rig and plant', { systematic: 0.08 }),
   setting('set points', { set: true, range: 3 }),
-  setting('uncertainties stated 1.5 times too large, Re x3', { stated: 1.5, range: 3, sigma: 0 }),
-  setting('uncertainties stated half as large as they are, Re x3', { stated: 0.5, range: 3 }),
-  setting('scatter beyond stated uncertainties is zero, Re x3', { sigma: 0, range: 3 }),
+  setting('uncertainties stated 1.5 times too large, Re x3', { stated: 1.5, range: 3, sigma: 0, premise: 'stated wrongly' }),
+  setting('uncertainties stated half as large as they are, Re x3', { stated: 0.5, range: 3, premise: 'stated wrongly' }),
+  setting('no scatter beyond stated uncertainties, Re x3', { sigma: 0, range: 3 }),
 ];
 
 /** One synthetic study and what is true in it. */
@@ -115,7 +118,9 @@ function drawLogs(s: Setting, random: Random): Draw {
   const low = s.form === 'offset' ? Math.log(3) : Math.log(1000);
   const span = Math.log(s.range);
   const lnF = (re: number, sc: number): number =>
-    s.form === 'offset' ? Math.log(TRUTH.A + TRUTH.C * Math.exp(TRUTH.a * re)) : Math.log(TRUTH.C) + TRUTH.a * re + (two ? TRUTH.c * sc : 0);
+    s.form === 'offset'
+      ? Math.log(TRUTH.A + TRUTH.C * Math.exp(TRUTH.a * re))
+      : Math.log(TRUTH.C) + TRUTH.a * re + (two ? TRUTH.c * sc : 0);
   const campaign = Array.from({ length: s.trials }, (_, i) => i % s.campaigns);
   const shift = Array.from({ length: s.campaigns }, () => s.tau * random.normal());
   const scOf = Array.from({ length: s.campaigns }, () => Math.log(300) + Math.log(4) * random.uniform());
@@ -130,13 +135,18 @@ function drawLogs(s: Setting, random: Random): Draw {
   });
   const variances = [s.uSh, s.set ? 0 : s.uRe, ...(two ? [s.uSc] : [])].map((u) => (s.stated * u) ** 2);
   const sigma = rows.map(() => variances.flatMap((v, k) => variances.map((_, l) => (k === l ? v : 0))));
-  const shared = s.systematic === 0 ? {} : { sources: ['shared'], systematic: rows.map(() => [-s.systematic, s.systematic, ...(two ? [0] : [])]) };
+  const shared =
+    s.systematic === 0 ? {} : { sources: ['shared'], systematic: rows.map(() => [-s.systematic, s.systematic, ...(two ? [0] : [])]) };
   const asked = (re: number): Asked => {
     const line = lnF(re, Math.log(600));
     const at = { Re: Math.exp(re + source), ...(two ? { Sc: 600 } : {}) };
     const sources = s.systematic === 0 ? {} : { sources: { shared: { groups: { Re: s.systematic }, factor: 0 } } };
     const berkson = s.set ? TRUTH.a * s.uRe * random.normal() : 0;
-    return { condition: { at, ...sources }, line: Math.exp(line), coefficient: Math.exp(line + s.tau * random.normal() + s.sigma * random.normal() + berkson) };
+    return {
+      condition: { at, ...sources },
+      line: Math.exp(line),
+      coefficient: Math.exp(line + s.tau * random.normal() + s.sigma * random.normal() + berkson),
+    };
   };
   return {
     law: forms[s.form],
@@ -157,10 +167,17 @@ function drawLine(s: Setting, random: Random): Draw {
     const x = random.uniform();
     return { x: x + s.uRe * random.normal(), y: f(x) + shift[c]! + s.sigma * random.normal() + s.uSh * random.normal() };
   });
-  const asked = (x: number): Asked => ({ condition: { at: { x } }, line: f(x), coefficient: f(x) + s.tau * random.normal() + s.sigma * random.normal() });
+  const asked = (x: number): Asked => ({
+    condition: { at: { x } },
+    line: f(x),
+    coefficient: f(x) + s.tau * random.normal() + s.sigma * random.normal(),
+  });
   return {
     law: forms.line,
-    data: data({ y: rows.map((row) => row.y), x: [rows.map((row) => row.x)], campaign, sigma: rows.map(() => [s.uSh ** 2, 0, 0, s.uRe ** 2]) }, 'absolute'),
+    data: data(
+      { y: rows.map((row) => row.y), x: [rows.map((row) => row.x)], campaign, sigma: rows.map(() => [s.uSh ** 2, 0, 0, s.uRe ** 2]) },
+      'absolute',
+    ),
     options: options({ scale: 'absolute', campaignEffect: s.campaignEffect }),
     truth: { A: TRUTH.A, k: TRUTH.k },
     inside: asked(0.5),
