@@ -27,10 +27,6 @@ const meanTemperatures: readonly Rule[] = [
     ...definition('temperature', ['inlet_temperature', 'outlet_temperature'], (a, b) => (a! + b!) / 2, 'T = (T_in + T_out)/2'),
     assumes: 'Bulk temperature is the mean of inlet and outlet temperature.',
   },
-  {
-    ...definition('temperature', ['initial_temperature', 'final_temperature'], (a, b) => (a! + b!) / 2, 'T = (T_0 + T_1)/2'),
-    assumes: 'Bulk temperature is the mean of the temperatures at start and end.',
-  },
   definition('film_temperature', ['temperature', 'wall_temperature'], (a, b) => (a! + b!) / 2, 'T_f = (T + T_w)/2'),
 ];
 

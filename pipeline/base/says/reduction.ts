@@ -1,0 +1,104 @@
+const n = (x: number, digits = 3): string => (Number.isFinite(x) ? `${Number(x.toPrecision(digits))}` : 'no number');
+const percent = (x: number): string => `${n(100 * x, 2)} %`;
+const celsius = (T: number): string => `${Number((T - 273.15).toFixed(2))} degC`;
+
+/** What reduction routes assume (told once) and what their checks find (told per trial). Temperatures come in K, shares as shares of 1. */
+export const says = {
+  // any route
+  uncertainDifference: (what: string, unit: string, x: number, u: number): string =>
+    `${what} of ${n(Math.abs(x))}${unit} is known only to ${n(u, 2)}${unit} (standard uncertainty, ${percent(u / Math.abs(x))}); the coefficient is no better`,
+  noDifference: (what: string): string => `${what} is zero, so no coefficient can be had from this trial`,
+  uncertainResult: (what: string, x: number, u: number): string =>
+    `${what} is known only within ${percent(u / Math.abs(x))} (standard uncertainty)`,
+
+  // heat balances
+  noLoss: 'No heat loss is stated; none is taken off.',
+  lossByConductance: 'The heat loss is loss_conductance times the excess over ambient temperature.',
+  noRadiation: 'No emissivity is stated; radiation is not taken off.',
+  surroundingsLikeFluid:
+    'Radiation is exchanged with surroundings at the temperature of the fluid, since ambient_temperature is not given.',
+  largeLoss: (share: number): string => `losses are ${percent(share)} of the heat rate: the coefficient rests on how well they are known`,
+  lossesExceed: (q: number, loss: number): string => `losses of ${n(loss)} W leave nothing of the heat rate of ${n(q)} W`,
+  heatAgainstDifference: (q: number, dT: number): string =>
+    `heat_rate is ${n(q)} W (positive: into the fluid), but the wall is ${n(Math.abs(dT))} K ${dT < 0 ? 'colder' : 'warmer'} than the fluid; its magnitude is used`,
+  temperaturesCross: (a: number, b: number): string =>
+    `the temperature differences at the two ends, ${n(a)} K and ${n(b)} K, do not have one sign: no log-mean difference exists`,
+  awayFromWall: (inlet: number, outlet: number, wall: number): string =>
+    `the stream goes from ${celsius(inlet)} to ${celsius(outlet)}, away from the wall at ${celsius(wall)}`,
+  nearEquilibrium: (left: number): string =>
+    `only ${percent(left)} of the inlet difference is left at the outlet: a small error there is a large one in the coefficient`,
+  dutyAgainstDifference: (q: number): string =>
+    `the duty comes out as ${n(q)} W from the hotter to the colder stream: one of the flows or temperatures is wrong, or the streams are swapped`,
+  imbalance: (share: number, u: number): string =>
+    u > 0
+      ? `heat balance open by ${percent(share)} (own against other duty), ${n(Math.abs(share) / u, 2)} times its standard uncertainty of ${percent(u)}`
+      : `heat balance open by ${percent(share)} (own against other duty); no uncertainty is stated that it could be judged by`,
+  imbalanceTooLarge: (share: number, u: number, balance: number): string =>
+    u > 0
+      ? `heat balance open by ${percent(share)}, ${n(Math.abs(share) / u, 2)} times its standard uncertainty: beyond 4 times a trial is refused unless a heat loss is stated`
+      : `heat balance open by ${percent(share)}: beyond ${percent(balance)} a trial is refused (setting balance)`,
+  noBalance: "One stream's duty cannot be had, so the heat balance is not tested.",
+  equalWeights: 'The two duties count equally: no uncertainty of flows or temperatures is stated to weigh them by.',
+  bothUnmixed: 'Cross flow is taken as one pass with both streams unmixed.',
+  outletIsContents: 'The well-stirred stream is at its outlet temperature throughout.',
+  noCrossFlow: (P: number, R: number): string =>
+    `effectiveness ${n(P)} at a capacity ratio of ${n(R)} cannot be reached in cross flow: one of the temperatures is wrong, or the flow is not cross flow`,
+  tubeArea: (quantity: string): string => `The area of transfer is pi times ${quantity} times length, one tube.`,
+
+  // resistances
+  noFouling: 'No fouling_resistance is stated; none is taken off.',
+  flatWall: 'The wall is taken as flat: no pair of diameters is given.',
+  noWall: 'The resistance of the wall is left out: wall_conductivity or its thickness is not given.',
+  smallShare: (share: number): string =>
+    `the wanted resistance is ${percent(share)} of the whole: under 30 % its error is more than three times that of the overall coefficient`,
+  nothingLeft: (whole: number, others: number): string =>
+    `the other resistances, ${n(others)} m^2 K/W, are more than the whole, ${n(whole)} m^2 K/W`,
+
+  // bodies
+  lumped:
+    'The body is taken at one temperature (lumped): solid_conductivity is not given, so its inner resistance and Bi cannot be checked.',
+  exactSeries: (body: string): string =>
+    `The exact series of a ${body} with constant coefficient is used, which at small Bi is the lumped form.`,
+  fluidIsAmbient: 'The surroundings at ambient_temperature are the fluid.',
+  meanSurface: 'Wall temperature is the mean of the temperatures at start and end.',
+  longBody: (body: string): string =>
+    `The ${body} is taken as large against its ${body === 'slab' ? 'thickness, cooled from both sides' : 'diameter'}.`,
+  fasterThanConduction: (theta: number): string =>
+    `the remaining difference, ${percent(theta)} of the first, is less than conduction inside the body allows even without any resistance outside: no coefficient can be had`,
+  noProgress: (theta: number): string => `the remaining difference is ${percent(theta)} of the first; it must lie between 0 and 100 %`,
+  insideGoverns: (bi: number): string =>
+    `Bi = ${n(bi)} on V/A: the resistance is mainly inside the body, and this trial says little of the coefficient outside`,
+  rateBeyondConduction: (rate: number): string =>
+    `the curve dies away at ${n(rate)} 1/s, faster than conduction inside the body allows even without any resistance outside: no coefficient can be had`,
+  earlyWindow: (fo: number): string =>
+    `the curve is read from Fo = ${n(fo)} (on the half thickness or radius) on; before 0.2 it is not yet one exponential`,
+
+  // logged curves
+  shortCurve: (points: number, fewest: number): string => `the curve has ${points} points in its window; ${fewest} or more are needed`,
+  noRate: (bath: number): string => `the curve does not approach ${celsius(bath)} as an exponential whose rate its window determines`,
+  correlatedResiduals: (lag1: number, widening: number, sd: number): string =>
+    `the curve's residuals (${n(sd, 2)} K) hang together (lag-1 correlation ${n(lag1, 2)}): its uncertainty is widened ${n(widening, 2)} times, and one exponential may not hold`,
+
+  // vessels
+  noEquipmentHeat: 'No equipment_heat_capacity is stated; the vessel itself is left out of the heat balance.',
+  timeMean: 'Bulk temperature is the mean over time of an exponential approach.',
+  beyondJacket: (start: number, end: number, jacket: number): string =>
+    `contents going from ${celsius(start)} to ${celsius(end)} do not approach a jacket at ${celsius(jacket)}`,
+  jacketSpent: (share: number): string =>
+    `the jacket stream gives up ${percent(share)} of what it could: its flow, more than the coefficient, sets the rate`,
+
+  // mass
+  noSolute: (quantity: string): string => `${quantity} is not given and taken as zero.`,
+  byMolarMass: 'Concentrations by amount are turned into mass by molar_mass.',
+  constantBulk: "The liquid's concentration is taken as constant: liquid_volume is not given.",
+  risingBulk: "The liquid's concentration rises with what dissolves into liquid_volume; bulk_concentration is that at the start.",
+  sphericalPellets: 'Particles are taken as spheres: sphericity is not given.',
+  notUndersaturated: (s: number, b: number): string =>
+    `saturation_concentration ${n(s)} is not above bulk_concentration ${n(b)}: nothing dissolves`,
+  shrunk: (share: number): string =>
+    `the diameter has shrunk to ${percent(share)} of that at the start: the coefficient is a mean over sizes`,
+  dissolvedShare: (share: number): string =>
+    `${percent(share)} of the mass is lost; it must lie between 0 and 100 %${share >= 1 ? ': what is gone altogether gives only a lower bound' : ''}`,
+  nearSaturation: (share: number): string => `the liquid ends at ${percent(share)} of the way to saturation`,
+  saturates: 'What dissolves would saturate the liquid before it has dissolved: mass, volume and saturation do not fit together.',
+} as const;

@@ -1,0 +1,67 @@
+import { says } from '../../base/says/reduction.ts';
+import type { Key, Rule } from '../../rules/rule.ts';
+import { fitSeparable, type SeparableFit, type SeparableModel } from './separable.ts';
+import type { CurveResult, SeriesReduction } from './series.ts';
+
+/** Fewer points than this say nothing of scatter. */
+const FEWEST = 8;
+
+/** One exponential towards zero; time counted from the window's start. */
+const exponential: SeparableModel = { basis: (t, k) => [Math.exp(-k * t)], slopes: (t, k) => [-t * Math.exp(-k * t)] };
+
+/**
+ * A curve that approaches the temperature `bath` as one exponential. It comes down to its rate, how that moves with the bath's temperature (whose own uncertainty thus
+ * reaches the coefficient), the temperature it was fitted at, and the start and end of the fitted curve.
+ */
+export function relaxation(bath: Key): SeriesReduction {
+  return {
+    value: 'temperature',
+    gives: ['curve_rate', 'curve_rate_slope', 'curve_bath', 'window_start', 'curve_start', 'curve_end'],
+    needs: [bath],
+    optional: [],
+    reduce: ({ time, value }, given) => reduce(time, value, given(bath)!),
+  };
+}
+
+/** Rate at the bath temperature in force: the fitted one, moved by its slope. */
+export const rateAtBath = (bath: Key): Rule => ({
+  gives: 'relaxation_rate',
+  from: ['curve_rate', 'curve_rate_slope', 'curve_bath', bath],
+  of: (rate, slope, fitted, T) => rate! + slope! * (T! - fitted!),
+  formula: 'rate of T - T_bath = B exp(-rate t), least squares over the window',
+  source: 'definition',
+});
+
+function reduce(time: Float64Array, value: Float64Array, bath: number): CurveResult {
+  if (time.length < FEWEST) return { refused: { code: 'short-curve', text: says.shortCurve(time.length, FEWEST) } };
+  const clock = time.map((t) => t - time[0]!);
+  const at = (T: number): SeparableFit | undefined =>
+    fitSeparable(
+      clock,
+      value.map((y) => y - T),
+      exponential,
+    );
+  const fit = at(bath);
+  if (fit === undefined) return { refused: { code: 'no-rate', text: says.noRate(bath) } };
+  const step = 1e-3 * Math.abs(fit.linear[0]!);
+  const [above, below] = [at(bath + step), at(bath - step)];
+  if (above === undefined || below === undefined) return { refused: { code: 'no-rate', text: says.noRate(bath) } };
+  const exact = (x: number) => ({ value: x, u: 0 });
+  const fitted = fit.fitted.map((y) => y + bath);
+  return {
+    readings: {
+      curve_rate: { value: fit.rate, u: fit.uRate },
+      curve_rate_slope: exact((above.rate - below.rate) / (2 * step)),
+      curve_bath: exact(bath),
+      window_start: exact(time[0]!),
+      curve_start: exact(fitted[0]!),
+      curve_end: exact(fitted.at(-1)!),
+    },
+    fitted,
+    notes: curveNotes(fit),
+  };
+}
+
+/** Residuals that hang together: the uncertainty is widened, and the form may be wrong. */
+export const curveNotes = ({ lag1, widening, residualSd }: SeparableFit): readonly { readonly code: string; readonly text: string }[] =>
+  lag1 > 0.5 ? [{ code: 'correlated-residuals', text: says.correlatedResiduals(lag1, widening, residualSd) }] : [];
