@@ -1,6 +1,7 @@
 import { seeded, seedFor } from '../numerics/random.ts';
 import { applyInverse } from './campaign-variance.ts';
 import { inverse, multiply, zeros } from './dense.ts';
+import { type Equations, equations } from './equations.ts';
 import { hasEnded, REFIT, type Resamples } from './resamples.ts';
 import type { Solved } from './solve-law.ts';
 import { solveTheta } from './theta.ts';
@@ -12,8 +13,9 @@ export interface CampaignResamples extends Resamples {
 
 /** Campaigns drawn with replacement, refitted at the fit's own variance components. */
 export function campaignResamples(solved: Solved, count: number, seed: number): CampaignResamples {
-  const { eq, settled, search } = solved;
-  const { block, blocks, n } = eq.problem;
+  const { settled, search } = solved;
+  const { block, blocks, n } = solved.eq.problem;
+  const eq = equations(solved.eq.problem, REFIT.step);
   const random = seeded(seedFor(seed, 'campaigns'));
   const copies = new Float64Array(n);
   const theta: Float64Array[] = [];
@@ -23,12 +25,11 @@ export function campaignResamples(solved: Solved, count: number, seed: number): 
     for (let c = 0; c < blocks; c++) drawn[random.integer(blocks)]! += 1;
     for (let i = 0; i < n; i++) copies[i] = drawn[block[i]!]!;
     const found = solveTheta(eq, settled.theta, settled.components, { ...search, ...REFIT, copies });
-    const errors = clusterErrors(solved, drawn);
+    const errors = clusterErrors(eq, solved.columns, drawn);
     if (!hasEnded(found) || !errors.every((error) => error > 0)) continue;
     theta.push(found.theta);
     standardErrors.push(errors);
   }
-  eq.evaluate(settled.theta, settled.components);
   return { theta, standardErrors, failed: count - theta.length };
 }
 
@@ -36,7 +37,7 @@ export function campaignResamples(solved: Solved, count: number, seed: number): 
  * Root of the diagonal of B^-1 [sum_c k_c s_c s_c^T] B^-1, s_c = Xhat_c^T w_c, campaign c counted k_c times (Liang and Zeger 1986, Biometrika 73, 13),
  * where the equations stand.
  */
-export function clusterErrors({ eq, columns }: Solved, counted: readonly number[]): readonly number[] {
+export function clusterErrors(eq: Equations, columns: readonly number[], counted: readonly number[]): readonly number[] {
   const { problem, variance, w, design } = eq;
   const q = columns.length;
   const gram = zeros(q * q);

@@ -37,7 +37,9 @@ export interface Contender {
  * Interval of the mean difference per fold: dbar +- t s sqrt(1/C + 1/(C-1)), which counts that the folds share their training trials (Nadeau and Bengio 2003).
  */
 export function chooseLaw(all: readonly Contender[]): Choice {
-  const reference = all.filter(({ fit }) => isUsable(fit)).reduce((a, b) => (b.fit.statistics.rmsLn < a.fit.statistics.rmsLn ? b : a), all[0]!).fit;
+  const reference = all
+    .filter(({ fit }) => isUsable(fit))
+    .reduce((a, b) => (b.fit.statistics.rmsLn < a.fit.statistics.rmsLn ? b : a), all[0]!).fit;
   const contenders = all.map((one): Held => ({ ...one, losses: foldLosses(one.cross, reference) }));
   const usable = contenders.filter(({ fit }) => isUsable(fit));
   const simplestFirst = [...(usable.length > 0 ? usable : contenders)].sort((a, b) => free(a) - free(b) || meanLoss(a) - meanLoss(b));

@@ -42,7 +42,7 @@ export function crossValidate(law: LawToFit, full: Fit, data: FitData, options: 
   for (const fold of folds) {
     const left = new Set(fold);
     const rest = data.trials.flatMap((_, i) => (left.has(i) ? [] : [i]));
-    const fit = refit({ ...law, start: full.values }, subset(data, rest), settings);
+    const fit = refit({ ...law, start: full.values, trusted: true }, subset(data, rest), settings);
     if (fit === undefined) continue;
     for (const i of fold) errors[i] = data.y[i]! - predictAt(fit, data, i);
   }
@@ -57,7 +57,7 @@ export function crossValidate(law: LawToFit, full: Fit, data: FitData, options: 
 
 /** Too few trials or levels without the fold: then there is no error to tell. */
 function refit(law: LawToFit, data: FitData, options: FitOptions): Fit | undefined {
-  const fit = fitLaw(law, data, options);
+  const fit = fitLaw(law, data, options, 'values');
   return fit.stop.why === 'rank deficient' || fit.stop.why === 'not finite' || fit.stop.why === 'not started' ? undefined : fit;
 }
 
@@ -65,7 +65,8 @@ function refit(law: LawToFit, data: FitData, options: FitOptions): Fit | undefin
  * Whitened loss e^T V^-1 e of each fold, V from one reference fit for all laws that are compared: a law that fits badly must not be forgiven by its own
  * larger scatter. Correlated trials of a campaign count once.
  */
-export const foldLosses = ({ folds, errors }: CrossValidation, reference: Fit): readonly number[] => folds.map((fold) => loss(fold, errors, reference));
+export const foldLosses = ({ folds, errors }: CrossValidation, reference: Fit): readonly number[] =>
+  folds.map((fold) => loss(fold, errors, reference));
 
 /** e^T (diag(v) + tau^2 1 1^T)^-1 e by the matrix inversion lemma. */
 function loss(fold: readonly number[], errors: readonly number[], fit: Fit): number {

@@ -45,7 +45,7 @@ export function forward(factor: Small, right: ArrayLike<number>, q: number, m: n
 }
 
 /** L^-T right, q x m. */
-export function backward(factor: Small, right: ArrayLike<number>, q: number, m: number): Small {
+function backward(factor: Small, right: ArrayLike<number>, q: number, m: number): Small {
   const out = Array.from(right);
   for (let c = 0; c < m; c++) {
     for (let i = q - 1; i >= 0; i--) {

@@ -35,7 +35,8 @@ export interface Equations {
 /** Adjusted points of a law that is curved in its groups: iterations, and the move (in units of the scale) that ends them. */
 const ADJUST = { iterations: 50, move: 1e-11 };
 
-export function equations(problem: Problem): Equations {
+/** `rest`: the move of the adjusted points that ends their iteration. */
+export function equations(problem: Problem, rest = ADJUST.move): Equations {
   const { n, model, sigma } = problem;
   const p = model.constants.length;
   const g = sigma === undefined ? 0 : model.groups.length;
@@ -46,7 +47,7 @@ export function equations(problem: Problem): Equations {
     variance: campaignVariance(problem.block, problem.blocks),
     r: column(),
     w: column(),
-    measured: column(),
+    measured: problem.response?.slice() ?? column(),
     covariance: columns(g),
     design: [...columns(p), ...problem.shifts],
     moved: columns(sigma === undefined ? 0 : p),
@@ -55,6 +56,7 @@ export function equations(problem: Problem): Equations {
     total: column(),
     slope: new Float64Array(1 + g),
     theta: new Float64Array(p),
+    rest,
   };
   return {
     ...state,
@@ -71,6 +73,7 @@ type State = Omit<Equations, 'evaluate' | 'setComponents' | 'restart'> & {
   readonly total: Float64Array;
   readonly slope: Float64Array;
   readonly theta: Float64Array;
+  readonly rest: number;
 };
 
 function evaluate(state: State, theta: Float64Array, components: Components): number {
@@ -83,6 +86,7 @@ function evaluate(state: State, theta: Float64Array, components: Components): nu
     weigh(state, components);
   } else {
     adjust(state, theta, components);
+    bound.run(state.theta, true);
   }
   if (sigma !== undefined) crossTerms(state);
   designAtAdjusted(state);
@@ -104,7 +108,7 @@ function adjust(state: State, theta: Float64Array, components: Components): void
 }
 
 function look(state: State, theta: Float64Array, components: Components): void {
-  state.bound.run(state.theta, true);
+  state.bound.near(state.theta);
   residuals(state, theta);
   weigh(state, components);
 }
@@ -132,7 +136,7 @@ function rest(state: State, theta: Float64Array, components: Components): boolea
         at[i] = to;
       }
     });
-    if (largest <= ADJUST.move) return true;
+    if (largest <= state.rest) return true;
     if (largest === Number.POSITIVE_INFINITY) return false;
   }
   return false;

@@ -117,7 +117,7 @@ function roleOf({ form }: Fit, name: string): { readonly kind: 'exponent' | 'off
 /** The law without each campaign, and without each of the three most influential trials. */
 function influenceOf({ law, fit, data }: Witness, options: FitOptions): readonly InfluenceRow[] {
   const without = (kind: InfluenceRow['kind'], left: string, trials: readonly number[]): readonly InfluenceRow[] => {
-    const refit = fitLaw({ ...law, start: fit.values }, subset(data, trials), { ...options, resamples: 0 });
+    const refit = fitLaw({ ...law, start: fit.values, trusted: true }, subset(data, trials), options, 'values');
     return refit.stop.why === 'rank deficient' || refit.stop.why === 'not finite' ? [] : [{ kind, left, values: refit.values }];
   };
   const all = data.trials.map((_, i) => i);

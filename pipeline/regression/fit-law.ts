@@ -16,13 +16,14 @@ export type { LawToFit } from './solve-law.ts';
 /**
  * Fits one law: theta by r^T V^-1 r with V's own dependence on it, variance components by REML, covariance by the sandwich of both, in that order until neither
  * moves. Never throws on data that a law does not suit: `stop` and `notes` say so. Throws InputError for weights or `scatter: none` that cannot be used.
- * `extent`: `law only` leaves out the refits of left-out trials (cvRmsLn is NaN then), the default where no resamples are asked for.
+ * `extent`: `law only` leaves out the refits of left-out trials (cvRmsLn is NaN then), the default where no resamples are asked for; `values`, for refits by the
+ * dozen, also takes t for every interval and leaves out the test of the stated uncertainties and the uncorrected parameters.
  */
 export function fitLaw(
   law: LawToFit,
   data: FitData,
   options: FitOptions,
-  extent: 'whole' | 'law only' = options.resamples > 0 ? 'whole' : 'law only',
+  extent: 'whole' | 'law only' | 'values' = options.resamples > 0 ? 'whole' : 'law only',
 ): Fit {
   // 1. Both estimating equations, parameters that the data cannot tell held.
   const solved = solveLaw(law, data, options);
@@ -31,11 +32,12 @@ export function fitLaw(
 
   // 2. What systematic sources, stated uncertainties and errors in the groups do to it.
   const shifts = systematicShifts(solved, data);
-  const uncorrected = inNature(solved.eq.problem.model, uncorrectedTheta(solved));
-  const statedUncertainty = statedUncertaintyTest(solved, data.campaign);
+  const short = extent === 'values';
+  const uncorrected = inNature(solved.eq.problem.model, short ? solved.settled.theta : uncorrectedTheta(solved));
+  const statedUncertainty = short ? undefined : statedUncertaintyTest(solved, data.campaign);
 
   // 3. Intervals, trials, notes.
-  const parameters = parametersOf(solved, shifts, options);
+  const parameters = parametersOf(solved, shifts, options, short);
   const diagnostics = trialDiagnostics(solved);
   const statistics = { ...statisticsOf(solved, diagnostics), cvRmsLn: Number.NaN, cvKind: 'leave one trial out' as const };
   const fit: Fit = {
@@ -50,7 +52,7 @@ export function fitLaw(
   };
 
   // 4. Left-out trials.
-  if (extent === 'law only') return fit;
+  if (extent !== 'whole') return fit;
   const cross = crossValidate(law, fit, data, options);
   return { ...fit, statistics: { ...statistics, cvRmsLn: cross.rms, cvKind: cross.kind } };
 }

@@ -23,6 +23,7 @@ export function fitNotes(found: Findings): readonly Note[] {
   return [
     ...howItEnded(found),
     ...whatIsHeld(found),
+    ...predictions(found),
     ...campaigns(found),
     ...components(found),
     ...errorsInGroups(found),
@@ -66,6 +67,11 @@ function whatIsHeld({ law, solved }: Findings): readonly Note[] {
       ? say('answer', 'warning', 'held-not-identified', says.heldNotIdentified(held.parameter, held.value, from[held.from]))
       : say('answer', 'warning', 'held-unreliable', says.heldUnreliable(held.parameter, held.value, from[held.from], held.reliability)),
   );
+}
+
+/** Said of every law that has an interval: what a prediction from it holds and what not. */
+function predictions({ law, solved }: Findings): readonly Note[] {
+  return solved.sandwich?.phi === undefined ? [] : [sayer(law)('plant', 'note', 'what-predictions-hold', says.whatPredictionsHold())];
 }
 
 /** One campaign or two tell nothing of a third: said beside every prediction. */

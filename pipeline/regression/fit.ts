@@ -109,7 +109,7 @@ export interface Diagnostics {
 }
 
 /** How campaigns entered: their names, and the estimated shift of each on the scale of the fit (0 where there is no effect). */
-export interface CampaignShifts {
+interface CampaignShifts {
   readonly kind: 'random' | 'fixed' | 'none' | 'inseparable';
   readonly names: readonly string[];
   readonly shifts: readonly number[];

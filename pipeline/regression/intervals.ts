@@ -95,7 +95,7 @@ function byCampaign(solved: Solved, options: FitOptions): readonly Method[] {
   const found = campaignResamples(solved, options.resamples, options.seed);
   const plain = percentiles(solved, 'bootstrap by campaign', found, options, says.campaignBootstrap(blocks));
   if (blocks < CAMPAIGNS_FOR_T) return [plain];
-  const own = clusterErrors(solved, new Array<number>(blocks).fill(1));
+  const own = clusterErrors(solved.eq, solved.columns, new Array<number>(blocks).fill(1));
   const limits = (position: number): readonly [number, number] => {
     const k = solved.columns[position]!;
     const estimate = solved.settled.theta[k]!;

@@ -60,6 +60,8 @@ export interface Bound {
   readonly byGroup: readonly Float64Array[];
   readonly cross: readonly (readonly Float64Array[])[];
   run(theta: Float64Array, moved: boolean): void;
+  /** Only h and dh/dx, after the columns were moved. */
+  near(theta: Float64Array): void;
   /** After the columns were written. */
   load(): void;
 }
@@ -75,6 +77,7 @@ export function bind(model: Model, x: readonly Float64Array[], n: number, slopes
   const tape: Tape = compile(outputs, groups, constants, own);
   tape.load();
   const columns = tape.out;
+  const short = slopes && !model.straight ? compile([model.value, ...model.byGroup], groups, constants, own) : undefined;
   return {
     x: own,
     h: columns[0]!,
@@ -82,6 +85,14 @@ export function bind(model: Model, x: readonly Float64Array[], n: number, slopes
     byGroup: columns.slice(1 + p, 1 + p + g),
     cross: model.constants.map((_, j) => columns.slice(1 + p + g + j * g, 1 + p + g + (j + 1) * g)),
     load: tape.load,
+    near: (theta) => {
+      if (short === undefined) return;
+      short.load();
+      short.run(theta);
+      short.out.forEach((column, k) => {
+        columns[k === 0 ? 0 : p + k]!.set(column);
+      });
+    },
     run: (theta, moved) => {
       if (moved) tape.load();
       tape.run(theta);

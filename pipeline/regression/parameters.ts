@@ -16,8 +16,8 @@ export interface Coordinate {
   readonly degreesOfFreedom: number;
 }
 
-/** Estimates with their intervals, in the order of form.constants, in natural units. */
-export function parametersOf(solved: Solved, shifts: Shifts, options: FitOptions): readonly Parameter[] {
+/** Estimates with their intervals, in the order of form.constants, in natural units; `onlyT`: no profiles. */
+export function parametersOf(solved: Solved, shifts: Shifts, options: FitOptions, onlyT = false): readonly Parameter[] {
   const { eq, settled, columns, search, held } = solved;
   const { model } = eq.problem;
   const values = inNature(model, settled.theta);
@@ -31,7 +31,7 @@ export function parametersOf(solved: Solved, shifts: Shifts, options: FitOptions
     const at = position < 0 ? undefined : coordinate(solved, shifts, position);
     if (at === undefined) return { ...base, ...without(fixed) };
     const total = Math.hypot(at.random, at.systematic);
-    const limits = limitsOf(solved, at, position, options);
+    const limits = limitsOf(solved, at, position, options, onlyT);
     const natural = (value: number): number => (model.asLogarithm[j] ? Math.exp(value) : value);
     return {
       ...base,
@@ -97,13 +97,15 @@ function limitsOf(
   at: Coordinate,
   position: number,
   { confidence }: FitOptions,
+  onlyT: boolean,
 ): { readonly lower: number; readonly upper: number; readonly by: 't' | 'profile' } {
   const total = Math.hypot(at.random, at.systematic);
   const t = studentQuantile((1 + confidence) / 2, withKnownPart(at.degreesOfFreedom, at.random, total));
   const k = solved.columns[position]!;
   const [least, most] = [solved.search.lower[k]!, solved.search.upper[k]!];
   const within = (value: number): number => Math.min(most, Math.max(least, value));
-  if (solved.eq.problem.model.linear) return { lower: within(at.estimate - t * total), upper: within(at.estimate + t * total), by: 't' };
+  if (onlyT || solved.eq.problem.model.linear)
+    return { lower: within(at.estimate - t * total), upper: within(at.estimate + t * total), by: 't' };
   const tRandom = studentQuantile((1 + confidence) / 2, at.degreesOfFreedom);
   const side = (sign: -1 | 1): number => {
     const limit = profileLimit(solved, position, sign, tRandom);

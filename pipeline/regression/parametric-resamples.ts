@@ -14,7 +14,7 @@ export function parametricResamples(solved: Solved, count: number, seed: number)
   const { settled, search, eq } = solved;
   const { problem } = eq;
   const own = { ...problem, y: problem.y.slice(), x: problem.x.map((column) => column.slice()) };
-  const drawn = equations(own);
+  const drawn = equations(own, REFIT.step);
   const draw = drawer(solved, seeded(seedFor(seed, 'parametric')), own.y, own.x);
   return collectResamples(count, () => {
     draw();
@@ -26,7 +26,7 @@ export function parametricResamples(solved: Solved, count: number, seed: number)
 /** Writes a new study into y and x each time it is called. */
 function drawer(solved: Solved, random: Random, y: Float64Array, x: readonly Float64Array[]): () => void {
   const { eq, settled } = solved;
-  const { n, sigma, scatter, block, blocks } = eq.problem;
+  const { n, sigma, response, scatter, block, blocks } = eq.problem;
   const width = 1 + x.length;
   const truth = adjustedPoints(solved);
   const law = lawAt(solved, truth);
@@ -45,7 +45,11 @@ function drawer(solved: Solved, random: Random, y: Float64Array, x: readonly Flo
     for (let c = 0; c < blocks; c++) shift[c] = Math.sqrt(settled.components.campaign) * random.normal();
     for (let i = 0; i < n; i++) {
       if (roots !== undefined) for (let k = 0; k < width; k++) normal[k] = random.normal();
-      y[i] = law[i]! + shift[block[i]!]! + Math.sqrt(settled.components.scatter * scatter[i]!) * random.normal() + error(i, 0);
+      y[i] =
+        law[i]! +
+        shift[block[i]!]! +
+        Math.sqrt(settled.components.scatter * scatter[i]! + (response?.[i] ?? 0)) * random.normal() +
+        error(i, 0);
       for (let k = 0; k < x.length; k++) x[k]![i] = truth[k]![i]! + error(i, k + 1);
     }
   };

@@ -7,7 +7,7 @@ import { bilinear, satterthwaite, withKnownPart } from './degrees-of-freedom.ts'
 import type { Fit } from './fit.ts';
 
 /** What one standard uncertainty of a source does at a condition: to ln of each group (to the value itself for absolute errors), and to ln of the factor. */
-export interface SourceShift {
+interface SourceShift {
   readonly groups: Readonly<Record<string, number>>;
   readonly factor: number;
 }

@@ -22,18 +22,18 @@ export function prepare(form: Form, data: FitData, options: FitOptions): Prepare
   const n = data.trials.length;
   const model = modelOf(form, data.scale);
   const effect = campaignEffectOf(data, options);
-  const sigma = options.weights === 'uncertainty' ? stackOf(data, model) : undefined;
+  const stated = options.weights === 'uncertainty' ? errorsOf(data, model) : {};
   const random = effect === 'random';
   const numbers = [...new Set(data.campaign)].sort((a, b) => a - b);
   return {
     effect,
-    stated: sigma !== undefined,
+    stated: stated.sigma !== undefined || stated.response !== undefined,
     problem: {
       n,
       model,
       y: data.y,
       x: data.x,
-      ...(sigma === undefined ? {} : { sigma }),
+      ...stated,
       scatter: sharesOf(data, options),
       block: Int32Array.from(data.campaign, (campaign) => (random ? numbers.indexOf(campaign) : 0)),
       blocks: random ? numbers.length : 1,
@@ -43,14 +43,16 @@ export function prepare(form: Form, data: FitData, options: FitOptions): Prepare
   };
 }
 
-/** All covariances in one array, or undefined where every reading is exact. */
-function stackOf(data: FitData, model: Model): Float64Array | undefined {
+/** All covariances in one array; only the variances of the response where every group is exact; nothing where all readings are. */
+function errorsOf(data: FitData, model: Model): Pick<Problem, 'sigma' | 'response'> {
   const size = (1 + model.groups.length) ** 2;
-  const out = new Float64Array(data.sigma.length * size);
+  const sigma = new Float64Array(data.sigma.length * size);
   data.sigma.forEach((matrix, i) => {
-    out.set(matrix, i * size);
+    sigma.set(matrix, i * size);
   });
-  return out.some((value) => value !== 0) ? out : undefined;
+  if (sigma.some((value, at) => value !== 0 && at % size !== 0)) return { sigma };
+  const response = Float64Array.from(data.sigma, (matrix) => matrix[0]!);
+  return response.some((value) => value !== 0) ? { response } : {};
 }
 
 /** Scatter variance of a trial is sigma^2 over its prior weight. */

@@ -6,8 +6,10 @@ export interface Problem {
   readonly model: Model;
   readonly y: Float64Array;
   readonly x: readonly Float64Array[];
-  /** n blocks of (1+g) x (1+g): covariance of (y, x) of each trial; undefined where all readings count as exact. */
+  /** n blocks of (1+g) x (1+g): covariance of (y, x) of each trial; undefined where the groups count as exact. */
   readonly sigma?: Float64Array;
+  /** n: variance of y where the groups are exact and the response is not. */
+  readonly response?: Float64Array;
   /** Scatter variance of trial i is sigma^2 times this; ones unless prior weights are given. */
   readonly scatter: Float64Array;
   /** Campaign of each trial for the random effect; one block of zeros where there is none. */

@@ -22,8 +22,14 @@ interface Startable {
  * others drawn (seeded).
  * theta holds parameters in the model's coordinates, then fixed shifts.
  */
-export function plainStart({ form, trusted }: Startable, problem: Problem, given: Readonly<Record<string, number>>, search: Search, seed: number): Solution {
-  const { sigma: _sigma, ...rest } = problem;
+export function plainStart(
+  { form, trusted }: Startable,
+  problem: Problem,
+  given: Readonly<Record<string, number>>,
+  search: Search,
+  seed: number,
+): Solution {
+  const { sigma: _sigma, response: _response, ...rest } = problem;
   const plain = equations({ ...rest, scatter: problem.scatter, block: new Int32Array(problem.n), blocks: 1 });
   const unit = { scatter: 1, campaign: 0 };
   const follow = (values: ArrayLike<number>, iterations?: number): Solution =>
@@ -50,7 +56,11 @@ export function plainStart({ form, trusted }: Startable, problem: Problem, given
 }
 
 /** Follows the best candidates until the lowest minimum has been reached twice. */
-function bestEnd(ranked: readonly Looked[], follow: (values: readonly number[]) => Solution, reached: Solution | undefined): Solution | undefined {
+function bestEnd(
+  ranked: readonly Looked[],
+  follow: (values: readonly number[]) => Solution,
+  reached: Solution | undefined,
+): Solution | undefined {
   let best = reached;
   for (const { values } of ranked.slice(0, STARTS.followed)) {
     const end = follow(values);

@@ -25,7 +25,7 @@ function chiSquared(
 ): { readonly chiSquared: number; readonly degreesOfFreedom: number } | undefined {
   const { eq, settled, search } = solved;
   const { problem } = eq;
-  if (problem.sigma === undefined || !eq.measured.every((d) => d > 0)) return undefined;
+  if (!eq.measured.every((d) => d > 0)) return undefined;
   const p = problem.model.constants.length;
   const alone: Problem = { ...problem, shifts, block: new Int32Array(problem.n), blocks: 1, estimate: { scatter: false, campaign: false } };
   const theta = Float64Array.from([...settled.theta.subarray(0, p), ...shifts.map(() => 0)]);
@@ -47,8 +47,15 @@ function levels(campaign: readonly number[]): readonly Float64Array[] {
 export function uncorrectedTheta(solved: Solved): Float64Array {
   const { eq, settled, search } = solved;
   if (eq.problem.sigma === undefined) return settled.theta;
-  const { sigma: _sigma, ...rest } = eq.problem;
+  const { sigma, ...rest } = eq.problem;
+  const size = sigma.length / eq.problem.n;
+  const response = Float64Array.from({ length: eq.problem.n }, (_, i) => sigma[i * size]!);
   const spread = settled.components.scatter + eq.measured.reduce((sum, d) => sum + d, 0) / eq.problem.n;
   const estimate = { ...eq.problem.estimate, scatter: true };
-  return settle(equations({ ...rest, estimate }), settled.theta, { scatter: spread, campaign: settled.components.campaign }, search).theta;
+  return settle(
+    equations({ ...rest, response, estimate }),
+    settled.theta,
+    { scatter: spread, campaign: settled.components.campaign },
+    search,
+  ).theta;
 }

@@ -29,7 +29,7 @@ export function systematicShifts(solved: Solved, data: FitData): Shifts {
 }
 
 /** dh/dx at the adjusted points, g columns of n. */
-export function slopesOf({ eq, settled }: Solved): readonly Float64Array[] {
+function slopesOf({ eq, settled }: Solved): readonly Float64Array[] {
   const { model, x, n } = eq.problem;
   if (eq.bound.byGroup.length === model.groups.length) return eq.bound.byGroup;
   const bound = bind(model, x, n, true);

@@ -27,7 +27,7 @@ const general =
   (copies) =>
     solveTheta(eq, settled.theta, settled.components, { ...search, ...REFIT, copies });
 
-/** Nothing but plain weights: no errors in the groups, no shifts, nothing held or bounded. */
+/** Nothing but weights: no errors in the groups, no shifts, nothing held or bounded. */
 function isPlain({ eq, search }: Solved): boolean {
   const { problem } = eq;
   const open = [...search.lower, ...search.upper].every((bound) => !Number.isFinite(bound));
@@ -35,9 +35,8 @@ function isPlain({ eq, search }: Solved): boolean {
 }
 
 function kernel({ eq, settled }: Solved): Refit {
-  const { model, y, x, scatter } = eq.problem;
-  const inverse = scatter.map((share) => 1 / share);
-  const refits = resampler(model, y, x, inverse, settled.theta);
+  const { model, y, x } = eq.problem;
+  const refits = resampler(model, y, x, eq.variance.inverse.slice(), settled.theta);
   return (copies) => {
     const theta = new Float64Array(settled.theta.length);
     const why = refits.fit(copies, theta) ? 'converged' : 'no further descent';

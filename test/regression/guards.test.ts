@@ -87,6 +87,11 @@ describe('campaigns, by their number alone', () => {
     expect(fit.parameters[0]!.degreesOfFreedom).toBeLessThan(28);
   });
 
+  test('whatever their number: what a prediction holds and what not is said once for each law', () => {
+    for (const count of [1, 2, 5])
+      expect(codes(run({ campaigns: count })).filter((code) => code === 'what-predictions-hold')).toHaveLength(1);
+  });
+
   test('told not to differ: said', () => {
     expect(codes(run({}, { campaignEffect: 'none' }))).toContain('campaigns-ignored');
   });

@@ -4,7 +4,7 @@ import { describe, expect, test } from 'vitest';
 import { settings } from './settings.ts';
 import { coverages, obeys, tally } from './tally.ts';
 
-// The long run is `npx tsx test/strength/calibration.ts`; here a short, seeded one and a look at the table that it left.
+// The long run is `npm run calibrate`; here a short, seeded one and a look at the table that it left.
 
 const rows = readFileSync(join(import.meta.dirname, 'calibration.md'), 'utf8')
   .split('\n')

@@ -3,7 +3,7 @@ import { join } from 'node:path';
 import { settings } from './settings.ts';
 import { coverages, isLow, obeys, type Tally, tally } from './tally.ts';
 
-// npx tsx test/strength/calibration.ts [studies]: makes calibration.md anew; some minutes on one core.
+// npm run calibrate [-- studies]: makes calibration.md anew; some minutes on one core.
 
 const SEED = 20_000;
 const studies = Number(process.argv[2] ?? 2000);
@@ -32,7 +32,7 @@ const rows = settings.map((setting, k) => {
 
 const text = `# Calibration of the intervals, by simulation
 
-Made by \`npx tsx test/strength/calibration.ts\` (${studies} studies a row, seed ${SEED} + row, Node ${process.versions.node.split('.')[0]}). Every study is invented: its truth is known, readings, campaigns, scatter and
+Made by \`npm run calibrate\` (${studies} studies a row, seed ${SEED} + row, Node ${process.versions.node.split('.')[0]}). Every study is invented: its truth is known, readings, campaigns, scatter and
 systematic shifts are drawn anew, the law is fitted, and the 95 % intervals are held against the truth. Unless a row says otherwise: power law with exponent 0.6, u(ln Re) 0.1,
 u(ln Sh) 0.03, scatter 0.05, campaign standard deviation 0.1, uncertainties stated as they are. Standard error of a coverage of 95 %: ${percent(Math.sqrt((0.95 * 0.05) / studies))} %.
 

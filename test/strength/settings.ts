@@ -93,7 +93,7 @@ export interface Draw {
   readonly outside: Asked;
 }
 
-export interface Asked {
+interface Asked {
   readonly condition: Condition;
   readonly line: number;
   readonly coefficient: number;

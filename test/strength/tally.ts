@@ -5,7 +5,7 @@ import { predictor } from '../../pipeline/regression/predict-ln.ts';
 import { type Draw, draw, type Setting } from './settings.ts';
 
 /** Median error with its standard error, and the share of intervals that hold the truth. Factors in front as logarithms. */
-export interface ParameterTally {
+interface ParameterTally {
   readonly name: string;
   readonly bias: number;
   readonly biasError: number;
@@ -99,7 +99,7 @@ function summary(name: string, list: readonly { error: number; held: boolean }[]
 }
 
 /** The least coverage that an interval may have without a warning. */
-export const LEAST = 0.925;
+const LEAST = 0.925;
 
 /** Coverages of a setting, named. */
 export const coverages = ({ parameters, law, prediction }: Tally): readonly { readonly of: string; readonly share: number }[] => [

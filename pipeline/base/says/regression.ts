@@ -34,6 +34,9 @@ export const attenuated = (reliability: number, uncorrected: string): string =>
 
 export const uncorrected = (values: string): string => `with errors of the groups ignored the parameters would be ${values}`;
 
+export const whatPredictionsHold = (): string =>
+  'a prediction is for the true coefficient of a new campaign: its interval holds the law, the difference between campaigns where it is known, scatter and systematic sources. The measurement errors of the rig are not in it (they do not go to the plant), and neither is any difference between one unit and another (trials of one rig cannot know it)';
+
 export const oneCampaign = (law: string): string =>
   `all trials of ${law} are of one campaign (or named as one): how much a new campaign, batch or set-up would shift the coefficient is not known from them, and no interval here contains it; experience or a second campaign must`;
 
