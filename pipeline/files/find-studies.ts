@@ -7,7 +7,7 @@ import { causeOf } from './cause.ts';
 import { globPattern, hasGlob } from './glob.ts';
 
 /** The name that makes a folder a study. */
-export const studyFileName = 'study.yaml';
+const studyFileName = 'study.yaml';
 
 const skipped = new Set(['node_modules', '.git']);
 const mostStudies = 10_000;

@@ -39,7 +39,7 @@ export function parseAmount(text: string, quantity?: Quantity, unit?: string): A
   return isFault(read) ? read : amountOf(value, read, text);
 }
 
-export function amountOf(value: number, unit: Unit, text: string): Amount | Fault {
+function amountOf(value: number, unit: Unit, text: string): Amount | Fault {
   const si = toSI(value, unit);
   if (!Number.isFinite(si)) return fault('number-overflow', says.overflow(text));
   if (unit.offset !== 0 && !(si >= 0)) return fault('below-absolute-zero', says.belowZero(text));

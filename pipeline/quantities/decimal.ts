@@ -18,7 +18,7 @@ export function readDecimal(text: string, mark: '.' | ','): number | Fault {
 }
 
 /** Which kind of non-number it is, as a key of the sentences. */
-export type NumberFault =
+type NumberFault =
   | 'empty'
   | 'hexadecimal'
   | 'infinity'

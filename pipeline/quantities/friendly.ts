@@ -14,7 +14,7 @@ export function numberText(value: number, digits = 4): string {
 }
 
 /** The unit of the quantity's friendly ones that gives a number between 1 and 1000, else its first, else SI. */
-export function friendlyUnit(si: number, quantity: Quantity): Unit | undefined {
+function friendlyUnit(si: number, quantity: Quantity): Unit | undefined {
   const units = [...quantity.friendly, quantity.unit].flatMap((text) => {
     const unit = unitFor(quantity, text);
     return isFault(unit) ? [] : [unit];

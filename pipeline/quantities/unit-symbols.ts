@@ -2,7 +2,7 @@ import { type Dimension, dimension, dimensionless } from './dimension.ts';
 import { aliases } from './unit-aliases.ts';
 
 /** One symbol of a unit: SI value = number * times / over + offset. */
-export interface UnitSymbol {
+interface UnitSymbol {
   readonly times: number;
   readonly over: number;
   readonly offset: number;

@@ -201,7 +201,4 @@ export const toSI = (value: number, unit: Unit): number => (value * unit.times) 
 /** The inverse of `toSI`. */
 export const fromSI = (si: number, unit: Unit): number => ((si - unit.offset) * unit.over) / unit.times;
 
-/** degC, degF: a temperature's scale with its own zero. */
-export const hasOwnZero = (unit: Unit): boolean => unit.offset !== 0;
-
 export const isPlainNumber = (unit: Unit): boolean => isDimensionless(unit.dimension);

@@ -20,7 +20,7 @@ export interface Quantity {
   readonly friendly: readonly string[];
 }
 
-export type Kind = 'temperature' | 'temperature difference' | 'plain' | 'text';
+type Kind = 'temperature' | 'temperature difference' | 'plain' | 'text';
 
 interface Extra {
   readonly kind?: Kind;

@@ -4,7 +4,7 @@ import { type Amount, parseAmount } from '../../pipeline/quantities/amount.ts';
 import { readDecimal } from '../../pipeline/quantities/decimal.ts';
 import { type Fault, isFault } from '../../pipeline/quantities/fault.ts';
 import { amountText, numberText } from '../../pipeline/quantities/friendly.ts';
-import { parseRange } from '../../pipeline/quantities/range.ts';
+import { isRange, parseRange } from '../../pipeline/quantities/range.ts';
 import { parseSpread } from '../../pipeline/quantities/spread.ts';
 import { unitFor } from '../../pipeline/quantities/unit-for.ts';
 import { quantityOf } from '../../pipeline/quantities/vocabulary.ts';
@@ -93,6 +93,7 @@ describe('ranges', () => {
   test('the unit may stand once or twice', () => {
     const speed = given(parseRange('400 to 600 rpm', quantityOf('rotation_speed')));
     expect([speed.from.si, speed.to.si]).toEqual([400 / 60, 10]);
+    expect(['400 to 600 rpm', '400 rpm', 'torr'].map(isRange)).toEqual([true, false, false]);
     const temperature = given(parseRange('15 degC to 313.15 K', quantityOf('temperature')));
     expect([temperature.from.si, temperature.to.si]).toEqual([288.15, 313.15]);
   });

@@ -50,11 +50,8 @@ const jobs: Readonly<Record<string, (log: Iterable<Buffer>) => Promise<unknown>>
     ),
 };
 
-const rows = Number(process.argv[2] ?? 1_000_000);
-console.log(`${rows} rows of 10 columns, node ${process.version}`);
-
 /** Most memory in use while the log is made and read piece by piece, above what was in use before, MB. */
-async function memoryOf(job: (log: Iterable<Buffer>) => Promise<unknown>): Promise<number> {
+async function memoryOf(rows: number, job: (log: Iterable<Buffer>) => Promise<unknown>): Promise<number> {
   const before = process.memoryUsage().rss;
   let peak = before;
   function* watched(): Generator<Buffer> {
@@ -67,20 +64,37 @@ async function memoryOf(job: (log: Iterable<Buffer>) => Promise<unknown>): Promi
   return (peak - before) / 1e6;
 }
 
-const memory = new Map<string, number>();
-for (const [name, job] of Object.entries(jobs)) memory.set(name, await memoryOf(job));
+export interface LogSpeed {
+  readonly job: string;
+  /** CPU seconds, best of three. */
+  readonly seconds: number;
+  readonly megabytes: number;
+}
 
-let base = 0;
-const log = [...pieces(rows)];
-for (const [name, job] of Object.entries(jobs)) {
-  let best = Number.POSITIVE_INFINITY;
-  for (let run = 0; run < 3; run++) {
-    const begin = process.cpuUsage();
-    await job(log);
-    best = Math.min(best, process.cpuUsage(begin).user / 1e6);
+/** csv-parse alone first, then ours. */
+export async function measure(rows: number): Promise<readonly LogSpeed[]> {
+  const megabytes = new Map<string, number>();
+  for (const [name, job] of Object.entries(jobs)) megabytes.set(name, await memoryOf(rows, job));
+  const log = [...pieces(rows)];
+  const measured: LogSpeed[] = [];
+  for (const [name, job] of Object.entries(jobs)) {
+    let seconds = Number.POSITIVE_INFINITY;
+    for (let run = 0; run < 3; run++) {
+      const begin = process.cpuUsage();
+      await job(log);
+      seconds = Math.min(seconds, process.cpuUsage(begin).user / 1e6);
+    }
+    measured.push({ job: name, seconds, megabytes: megabytes.get(name)! });
   }
-  base ||= best;
-  console.log(
-    `${name.padEnd(24)} ${best.toFixed(2)} s CPU, ${(best / base).toFixed(2)} x; memory up by ${memory.get(name)!.toFixed(0)} MB`,
-  );
+  return measured;
+}
+
+if (process.argv[1]?.endsWith('log-speed.ts')) {
+  const rows = Number(process.argv[2] ?? 1_000_000);
+  console.log(`${rows} rows of 10 columns, node ${process.version}`);
+  const measured = await measure(rows);
+  for (const { job, seconds, megabytes } of measured)
+    console.log(
+      `${job.padEnd(24)} ${seconds.toFixed(2)} s CPU, ${(seconds / measured[0]!.seconds).toFixed(2)} x; memory up by ${megabytes.toFixed(0)} MB`,
+    );
 }
