@@ -271,7 +271,7 @@ function smallest(f: (slope: number) => number): number {
   return (a + b) / 2;
 }
 
-/** York's standard errors: with sigma and tau held at zero, A differs from B by the errors in x alone; B^-1 = Phi-sandwich undone. */
+/** York's squared standard errors: the diagonal of B^-1. */
 function inverseOfB(fit: ReturnType<typeof fitLaw>): number[] {
   return fit.inverseOfB.map((row, j) => row[j]!);
 }
