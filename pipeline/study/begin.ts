@@ -191,7 +191,13 @@ function reduction(draft: Draft, route: RouteGuess | undefined, keys: ReadonlySe
   else draft.add(`coefficient: {route: ${route.name}${route.setting === undefined ? '' : `, ${route.setting}`}}`);
   if (route?.setting !== undefined) draft.ask(says.whichArrangement());
   if (route !== undefined && route.lacks.length > 0) draft.ask(says.routeLacks(route.name, route.lacks));
-  draft.ask(says.whichFluid(), 'fluid: {name: water, temperature: temperature}');
+  const two = [...keys].some((key) => key.endsWith('_other'));
+  draft.ask(
+    says.whichFluid(),
+    two
+      ? 'fluid: {own: {name: water, temperature: temperature}, other: {name: water, temperature: temperature_other}}'
+      : 'fluid: {name: water, temperature: temperature}',
+  );
   draft.add('');
 }
 
@@ -229,7 +235,7 @@ const responseOf = (route: RouteGuess | undefined, keys: ReadonlySet<string>): s
 function dimensionless(draft: Draft, response: string, keys: ReadonlySet<string>): void {
   const basis = keys.has('rotation_speed') ? 'impeller' : keys.has('particle_diameter') ? 'particle' : 'pipe';
   draft.ask(says.whichBasis());
-  draft.add('groups:', `  Re: ${basis}`, `  ${response}: ${basis}`, '');
+  draft.add('groups:', `  Re: ${basis}`, `  ${response}: ${keys.has('particle_diameter') ? 'particle' : basis}`, '');
   draft.add('laws:', `  - ${quoted(`${response} = C * Re^a * ${response === 'Nu' ? 'Pr' : 'Sc'}^(1/3)`)}`);
 }
 

@@ -1,5 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
+import { makePlan } from '../../pipeline/plan/make-plan.ts';
 import { beginStudy } from '../../pipeline/study/begin.ts';
 import { parseStudy } from '../../pipeline/study/parse-study.ts';
 import { guessColumns } from '../../pipeline/trials/guess-columns.ts';
@@ -170,6 +171,15 @@ describe('the study file it writes', () => {
       undefined,
     ]);
     expect(questions.length).toBe(2);
+  });
+
+  const plan = (text: string) =>
+    makePlan(parseStudy(begun(text).yaml, 'study.yaml'), { trials: tableOf(text), tables: new Map(), catalogue: [], own: [] });
+
+  test('check accepts it where the columns are enough, and lists what is missing where they are not', () => {
+    expect(plan('run,Re,Pr,Nu\nA,1e4,7,80\n').laws[0]!.form.constants).toEqual(['C', 'a', 'b']);
+    expect(plan('run,power_x,y\nA,1,2\n').laws[0]!.form.constants).toEqual(['C', 'a']);
+    expect(() => plan('run,flow [L/min],T_in [degC],T_out [degC],T_wall [degC]\nA,10,20,30,60\n')).toThrow(/diameter/u);
   });
 
   test('whatever the headers, the file parses (1,000 seeded)', () => {

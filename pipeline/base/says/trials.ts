@@ -95,4 +95,11 @@ export const says = {
     `${windows} steady window${windows === 1 ? '' : 's'} with ${count(used)} of ${count(rows)} rows of the log, found by the test of Kelly and Hedengren (2013) on every column; each is one trial, its means with standard uncertainties that count autocorrelation (Geyer 1992, Wolff 2004). A drift smaller than the scatter of a window passes the test`,
   fewIndependent: (keys: readonly string[], least: number): string =>
     `${keys.map(quoted).join(', ')}: the window is worth only ${Math.max(1, Math.round(least))} independent samples, so the uncertainty of the mean is too small by tens of per cent; log longer`,
+  noCurve: (trial: string): string => `trial ${quoted(trial)} has no logged curve`,
+  severalCurves: (trial: string, names: readonly string[]): string =>
+    `trial ${quoted(trial)} names ${names.length} files for its curve (${some(names, 4)}); one trial has one curve`,
+  curveWithoutTrial: (names: readonly string[]): string =>
+    `the log holds curves that no trial of the table names, and they were not used: ${some(names, 6)}`,
+  seriesTrial: (): string => 'one log for several trials needs trial: the column of the log that names the trial',
+  windowReversed: (): string => 'give the earlier end of the window first, such as [0 s, 120 s]',
 };
