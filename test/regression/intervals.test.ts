@@ -95,7 +95,11 @@ describe('against closed forms', () => {
       { length: 6 },
       (_, c) => trials.y.reduce((sum, value, i) => sum + (trials.campaign[i] === c ? value / 4 : 0), 0) - overall,
     );
-    agree(clusterErrors(solved.eq, solved.columns, [1, 1, 1, 1, 1, 1])[0]!, Math.sqrt(deviations.reduce((sum, d) => sum + d * d, 0)) / 6, 9);
+    agree(
+      clusterErrors(solved.eq, solved.columns, [1, 1, 1, 1, 1, 1])[0]!,
+      Math.sqrt(deviations.reduce((sum, d) => sum + d * d, 0)) / 6,
+      9,
+    );
   });
 });
 
