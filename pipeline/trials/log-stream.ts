@@ -40,7 +40,7 @@ export async function streamLog(
 ): Promise<LogTotals> {
   const chunks = characters(pieces, file);
   const first = chunks.next().value ?? Buffer.alloc(0);
-  const start = wholeLines(first.toString());
+  const start = first.toString();
   const head = tableOf(readDelimited(start, file), expects);
   const counter = new RowCounter(head, open(head));
   const parser = parse({
@@ -70,16 +70,10 @@ const quote = 0x22;
 const lineFeed = 0x0a;
 const headBytes = 1 << 18;
 
-/** Cut after the last line break, where there is one. */
-const wholeLines = (text: string): string => {
-  const end = Math.max(text.lastIndexOf('\n'), text.lastIndexOf('\r'));
-  return end > 0 ? text.slice(0, end + 1) : text;
-};
-
 /** The log as UTF-8 in whole lines, whatever its encoding. */
 function* characters(pieces: Iterable<Uint8Array>, file: string): Generator<Buffer, undefined> {
   let line = 1;
-  for (const chunk of inWholeLines(utf8(startingLarge(pieces), file))) {
+  for (const chunk of inWholeLines(utf8(startingLarge(pieces), file), file)) {
     if (!isUtf8(chunk)) throw decodeFault(chunk, file, line);
     line += countLines(chunk);
     yield chunk;
@@ -126,19 +120,22 @@ function widePiece(decoder: InstanceType<typeof TextDecoder>, piece: Uint8Array,
   }
 }
 
-/** Pieces cut after a line feed, so that no character is cut. */
-function* inWholeLines(pieces: Iterable<Uint8Array>): Generator<Buffer> {
+/** Pieces cut after a line feed, so that no character and no row is cut; the last one goes to the end of the log. */
+function* inWholeLines(pieces: Iterable<Uint8Array>, file: string): Generator<Buffer> {
+  let lines = Buffer.alloc(0);
   let rest: Uint8Array = new Uint8Array(0);
   for (const piece of pieces) {
     const end = piece.lastIndexOf(lineFeed) + 1;
     if (end === 0) {
       rest = Buffer.concat([rest, piece]);
+      if (rest.length > caps.tableBytes) throw new InputError([{ code: 'field-too-long', text: says.noLineFeed(), place: { file } }], 3);
       continue;
     }
-    yield Buffer.concat([rest, piece.subarray(0, end)]);
+    if (lines.length > 0) yield lines;
+    lines = Buffer.concat([rest, piece.subarray(0, end)]);
     rest = piece.subarray(end);
   }
-  if (rest.length > 0) yield Buffer.from(rest);
+  if (lines.length + rest.length > 0) yield Buffer.concat([lines, rest]);
 }
 
 /** The fault of `decodeText`, its line counted from the start of the log. */

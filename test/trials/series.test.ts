@@ -5,9 +5,11 @@ import { seeded } from '../../pipeline/numerics/random.ts';
 import { quantityOf } from '../../pipeline/quantities/vocabulary.ts';
 import { clockSeconds } from '../../pipeline/trials/clock.ts';
 import { sumLedger } from '../../pipeline/trials/ledger.ts';
+import { streamLog } from '../../pipeline/trials/log-stream.ts';
 import { readLog } from '../../pipeline/trials/log-table.ts';
 import { meanOfSeries } from '../../pipeline/trials/mean-of-series.ts';
 import { quickDecimal } from '../../pipeline/trials/quick-decimal.ts';
+import { readTable } from '../../pipeline/trials/read-table.ts';
 import { readSeries, type SeriesSpec } from '../../pipeline/trials/series.ts';
 import { steadyShare } from '../../pipeline/trials/steadiness.ts';
 import { findSteady, steadyTrials } from '../../pipeline/trials/steady.ts';
@@ -98,6 +100,37 @@ describe('logged curves', () => {
     expect([...wide.value.curves.get('R1')!.value]).toEqual([293.65, 294.65, 295.15]);
     const quoted = await readSeries(log('note,t [s],T [K]\n"a\nb",0,300\n,1,301\n,2,x\n,3,302\n', 1000), spec());
     expect(quoted.notes[0]!.place!.line).toBe(5);
+  });
+
+  test('a log is read row by row as a table is, or stops for the same reason (1,000 seeded)', async () => {
+    const cell = fc.oneof(
+      fc.string({ maxLength: 6 }),
+      fc.constantFrom('1', '2.5', '1,5', '"', '\0', ',', ';', '\t', '\n', '\r\n', '[rpm]', '°C'),
+    );
+    const outcome = async (act: () => Promise<number>): Promise<string> => {
+      try {
+        return String(await act());
+      } catch (error) {
+        if (!(error instanceof InputError)) throw error;
+        return error.messages[0]!.code;
+      }
+    };
+    await fc.assert(
+      fc.asyncProperty(
+        fc.array(cell, { maxLength: 40 }),
+        fc.constantFrom(',', ';', '\t', '\n'),
+        fc.integer({ min: 1, max: 9 }),
+        async (cells, join, size) => {
+          const bytes = Buffer.from(cells.join(join));
+          const asTable = await outcome(async () => {
+            const { rows, badRows } = readTable(bytes, { file: 'log.csv' });
+            return rows.length + badRows.length;
+          });
+          expect(await outcome(async () => (await streamLog(log(bytes, size), [], () => () => {})).rows)).toBe(asTable);
+        },
+      ),
+      { seed: 27, numRuns: 1000 },
+    );
   });
 
   test('a number is read to the last bit (1,000 seeded)', () => {

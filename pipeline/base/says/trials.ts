@@ -102,4 +102,5 @@ export const says = {
     `the log holds curves that no trial of the table names, and they were not used: ${some(names, 6)}`,
   seriesTrial: (): string => 'one log for several trials needs trial: the column of the log that names the trial',
   windowReversed: (): string => 'give the earlier end of the window first, such as [0 s, 120 s]',
+  noLineFeed: (): string => 'the log has no line feeds; save it with one row a line',
 };
