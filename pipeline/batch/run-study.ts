@@ -88,7 +88,7 @@ export async function runStudy(file: string, { out, seed }: RunOptions = {}): Pr
   const read = readTrials(trials, plan.study.trials, plan.columns);
   const result = analyse(plan, read, { version, node: process.versions.node, seed: seed ?? SEED, files });
   const { renderReport } = await import('../../reports/page.ts');
-  const { html, charts } = await renderReport(result, { assets: plan.study.output.assets });
+  const { html, charts } = await renderReport(result);
   const written = new Map(resultFiles(result));
   written.set('report.html', html);
   for (const [name, spec] of Object.entries(charts)) written.set(`charts/${name}.vl.json`, `${JSON.stringify(spec, null, 2)}\n`);

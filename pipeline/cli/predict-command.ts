@@ -1,5 +1,5 @@
 import { says } from '../base/says/cli.ts';
-import { flag, textOption } from './arguments.ts';
+import { wrongCommandLine } from './arguments.ts';
 import type { Command } from './command.ts';
 
 /** `pilotlaw predict LAWS PLANT` */
@@ -15,15 +15,7 @@ export const predictCommand: Command = {
     { name: 'out', value: 'FILE', about: says.optionOutFile },
     { name: 'json', about: says.optionJson },
   ],
-  run: async (given, terminal) => {
-    const request = {
-      laws: String(given.laws),
-      plant: String(given.plant),
-      law: textOption(given, 'law'),
-      out: textOption(given, 'out'),
-      json: flag(given, 'json'),
-    };
-    const { predictPlant } = await import('./predict-plant.ts');
-    return predictPlant(request, terminal);
+  run: async () => {
+    throw wrongCommandLine(says.notYet('predict'));
   },
 };

@@ -1,4 +1,4 @@
-import { closeSync, fstatSync, openSync, readSync } from 'node:fs';
+import { closeSync, existsSync, fstatSync, openSync, readSync } from 'node:fs';
 import { InputError } from '../base/input-error.ts';
 import type { Place } from '../base/place.ts';
 import { says } from '../base/says/files.ts';
@@ -79,3 +79,6 @@ function openFile(path: string, options: ReadOptions): number {
 
 const refusal = (text: string, code: string, name: string, { place }: ReadOptions): InputError =>
   new InputError([{ code, text, place: place ?? { file: name } }]);
+
+/** Whether something stands at a path. */
+export const fileExists = (path: string): boolean => existsSync(path);

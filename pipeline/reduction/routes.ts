@@ -1,13 +1,23 @@
-import type { Rule } from '../rules/rule.ts';
+import { heatRate } from './heat-rate.ts';
 import { logMeanDifference } from './log-mean-difference.ts';
 import { measured } from './measured.ts';
 import { pelletDissolution } from './pellet-dissolution.ts';
-import type { Route, RouteContext, Settings } from './route.ts';
+import type { Route } from './route.ts';
+import { seriesResistance, thenSeriesResistance } from './series-resistance.ts';
 import { sphereCooling } from './sphere-cooling.ts';
+import { vesselHeating } from './vessel-heating.ts';
 
 export type { Route, RouteContext, Settings } from './route.ts';
 
-const list: readonly Route[] = [measured, logMeanDifference, sphereCooling, pelletDissolution];
+const list: readonly Route[] = [
+  thenSeriesResistance(measured),
+  heatRate,
+  thenSeriesResistance(logMeanDifference),
+  seriesResistance,
+  sphereCooling,
+  thenSeriesResistance(vesselHeating),
+  pelletDissolution,
+];
 
 /** Every route by name. */
 export const routes: Readonly<Record<string, Route>> = Object.fromEntries(list.map((route) => [route.name, route]));
@@ -15,6 +25,3 @@ export const routes: Readonly<Record<string, Route>> = Object.fromEntries(list.m
 /** Names of the routes for one kind of transfer. */
 export const routeNames = (transfer: 'heat' | 'mass'): readonly string[] =>
   list.filter((route) => route.transfer === transfer || route.transfer === 'either').map(({ name }) => name);
-
-/** All rules of a route with its settings, those of `then` included. */
-export const routeRules = (route: Route, settings: Settings, context: RouteContext): readonly Rule[] => route.rules(settings, context);

@@ -1,6 +1,6 @@
 import { groupRules } from '../../pipeline/groups/groups.ts';
 import { plainContext, type RouteContext, type Settings } from '../../pipeline/reduction/route.ts';
-import { routeRules, routes } from '../../pipeline/reduction/routes.ts';
+import { routes } from '../../pipeline/reduction/routes.ts';
 import { derivedRulesFor } from '../../pipeline/rules/derived/derived-rules.ts';
 import { evaluate, failedChecks, sizeOf } from '../../pipeline/rules/evaluate.ts';
 import { resolve, ruleBook } from '../../pipeline/rules/resolve.ts';
@@ -29,7 +29,7 @@ export interface RouteCase {
 export function runRoute(name: string, { settings = {}, given, context = {}, stated = {}, also = [] }: RouteCase): Reduced {
   const route = routes[name]!;
   const whole: RouteContext = { ...plainContext, stated: (key) => stated[key], ...context };
-  const book = ruleBook([...routeRules(route, settings, whole), ...derivedRulesFor(whole.equipment), ...groupRules]);
+  const book = ruleBook([...route.rules(settings, whole), ...derivedRulesFor(whole.equipment), ...groupRules]);
   const inputs = Object.entries(given).map(([key, constant]) => ({ key, constant, label: key }));
   const wanted = [route.gives(settings, whole), ...also];
   const { recipe, missing } = resolve(book, inputs, wanted);

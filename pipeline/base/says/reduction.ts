@@ -49,6 +49,7 @@ export const says = {
   noFouling: 'No fouling_resistance is stated; none is taken off.',
   flatWall: 'The wall is taken as flat: no pair of diameters is given.',
   noWall: 'The resistance of the wall is left out: wall_conductivity or its thickness is not given.',
+  wallByResistances: 'The wall temperature on the own side follows from the resistances in series.',
   smallShare: (share: number): string =>
     `the wanted resistance is ${percent(share)} of the whole: under 30 % its error is more than three times that of the overall coefficient`,
   nothingLeft: (whole: number, others: number): string =>
@@ -80,6 +81,9 @@ export const says = {
     `the curve's residuals (${n(sd, 2)} K) hang together (lag-1 correlation ${n(lag1, 2)}): its uncertainty is widened ${n(widening, 2)} times, and one exponential may not hold`,
 
   // vessels
+  noLossConductance: 'No loss_conductance is stated; none is taken off.',
+  noConstantLoss: 'No constant heat_loss is stated; none is taken off.',
+  ambientMissing: 'loss_conductance is given, but not the ambient_temperature that it counts from',
   noEquipmentHeat: 'No equipment_heat_capacity is stated; the vessel itself is left out of the heat balance.',
   timeMean: 'Bulk temperature is the mean over time of an exponential approach.',
   beyondJacket: (start: number, end: number, jacket: number): string =>
@@ -88,6 +92,27 @@ export const says = {
     `the jacket stream gives up ${percent(share)} of what it could: its flow, more than the coefficient, sets the rate`,
 
   // mass
+  rateByMolarMass: 'Rates by mass and concentrations by amount (or the other way round) are matched by molar_mass.',
+  noApproach: (a: number, b: number, s: number): string =>
+    `concentration going from ${n(a)} to ${n(b)} does not approach saturation at ${n(s)} from one side`,
+  constantFlow: 'The volume flow is taken as constant along the wall.',
+  shortBed: (lengths: number): string =>
+    `the bed is ${n(lengths, 2)} particle diameters long: below 20, axial mixing and end effects make the coefficient read low`,
+  pinched: (share: number, ratio: number): string =>
+    `${percent(share)} of the inlet difference left at a flow ratio S of ${n(ratio)} cannot be reached in counter flow: a flow, a concentration or the equilibrium is wrong`,
+  overallOnSide: (side: string): string => `The coefficient is overall, on the ${side} side, per volume of packing.`,
+  wholeArea: 'The whole surface of the packing is taken as wetted.',
+  noMigration: 'Migration of the ion in the electric field is left out: supporting electrolyte in excess.',
+  vapourAtSurface: 'vapour_pressure is that at the surface.',
+  dryGas: 'The gas is taken as free of the vapour: neither relative_humidity nor bulk_concentration is given.',
+  atmospheric: 'The total pressure is taken as 101.325 kPa: pressure is not given.',
+  filmConcentration: 'Concentrations of the vapour are counted at film temperature.',
+  boils: (surface: number, total: number): string =>
+    `the vapour pressure at the surface, ${n(surface)} Pa, is not below the total pressure of ${n(total)} Pa: the liquid would boil`,
+  evaporationBackwards: (rate: number, surface: number, bulk: number): string =>
+    `${rate > 0 ? 'mass is lost' : 'mass is gained'}, but the vapour pressure is ${n(surface)} Pa at the surface and ${n(bulk)} Pa in the gas`,
+  highFlux: (factor: number): string =>
+    `the flow of vapour itself carries ${percent(Math.abs(factor - 1))} ${factor > 1 ? 'more' : 'less'} than diffusion alone; it is taken out`,
   noSolute: (quantity: string): string => `${quantity} is not given and taken as zero.`,
   byMolarMass: 'Concentrations by amount are turned into mass by molar_mass.',
   constantBulk: "The liquid's concentration is taken as constant: liquid_volume is not given.",

@@ -10,24 +10,31 @@ const FEWEST = 8;
 const exponential: SeparableModel = { basis: (t, k) => [Math.exp(-k * t)], slopes: (t, k) => [-t * Math.exp(-k * t)] };
 
 /**
- * A curve that approaches the temperature `bath` as one exponential. It comes down to its rate, how that moves with the bath's temperature (whose own uncertainty thus
- * reaches the coefficient), the temperature it was fitted at, and the start and end of the fitted curve.
+ * A curve that approaches the temperature `bath` as one exponential. It comes down to its rate, how that moves with the temperature approached (whose uncertainty thus
+ * reaches the coefficient; a vessel that loses heat approaches another one), the temperature it was fitted at, and the start and end of the fitted curve.
  */
 export function relaxation(bath: Key): SeriesReduction {
   return {
     value: 'temperature',
-    gives: ['curve_rate', 'curve_rate_slope', 'curve_bath', 'window_start', 'curve_start', 'curve_end'],
+    gives: ['curve_rate', 'curve_rate_slope', 'curve_rate_curvature', 'curve_bath', 'window_start', 'curve_start', 'curve_end'],
     needs: [bath],
     optional: [],
     reduce: ({ time, value }, given) => reduce(time, value, given(bath)!),
   };
 }
 
-/** Rate at the bath temperature in force: the fitted one, moved by its slope. */
+/** Keys of `rateAt`, without the temperature. */
+export const rateKeys: readonly Key[] = ['curve_rate', 'curve_rate_slope', 'curve_rate_curvature', 'curve_bath'];
+
+/** Rate of a curve were it to approach T instead of the temperature it was fitted at: second order. */
+export const rateAt = (rate: number, slope: number, curvature: number, fitted: number, T: number): number =>
+  rate + slope * (T - fitted) + (curvature * (T - fitted) ** 2) / 2;
+
+/** Rate at the bath temperature in force. */
 export const rateAtBath = (bath: Key): Rule => ({
   gives: 'relaxation_rate',
-  from: ['curve_rate', 'curve_rate_slope', 'curve_bath', bath],
-  of: (rate, slope, fitted, T) => rate! + slope! * (T! - fitted!),
+  from: [...rateKeys, bath],
+  of: (rate, slope, curvature, fitted, T) => rateAt(rate!, slope!, curvature!, fitted!, T!),
   formula: 'rate of T - T_bath = B exp(-rate t), least squares over the window',
   source: 'definition',
 });
@@ -43,7 +50,7 @@ function reduce(time: Float64Array, value: Float64Array, bath: number): CurveRes
     );
   const fit = at(bath);
   if (fit === undefined) return { refused: { code: 'no-rate', text: says.noRate(bath) } };
-  const step = 1e-3 * Math.abs(fit.linear[0]!);
+  const step = 1e-2 * Math.abs(fit.linear[0]!);
   const [above, below] = [at(bath + step), at(bath - step)];
   if (above === undefined || below === undefined) return { refused: { code: 'no-rate', text: says.noRate(bath) } };
   const exact = (x: number) => ({ value: x, u: 0 });
@@ -52,6 +59,7 @@ function reduce(time: Float64Array, value: Float64Array, bath: number): CurveRes
     readings: {
       curve_rate: { value: fit.rate, u: fit.uRate },
       curve_rate_slope: exact((above.rate - below.rate) / (2 * step)),
+      curve_rate_curvature: exact((above.rate - 2 * fit.rate + below.rate) / (step * step)),
       curve_bath: exact(bath),
       window_start: exact(time[0]!),
       curve_start: exact(fitted[0]!),

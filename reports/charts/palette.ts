@@ -1,0 +1,27 @@
+/** The few colours of the page, light scheme. The page shows them through variables, so that a dark scheme can replace them. */
+export const palette = {
+  ink: '#16191d',
+  quiet: '#59626c',
+  faint: '#b9c0c7',
+  grid: '#e6e9ec',
+  accent: '#0a6a74',
+  band: '#cfe3e4',
+  warm: '#a4471c',
+} as const;
+
+/** Colour -> variable of the page's style. */
+export const variables: Readonly<Record<string, string>> = Object.fromEntries(Object.entries(palette).map(([name, colour]) => [colour, `var(--${name})`]));
+
+/** Config that all charts share: quiet axes, text at one size, no frame. */
+export const config = {
+  background: 'transparent',
+  font: 'system-ui, sans-serif',
+  view: { stroke: null },
+  axis: { labelColor: palette.quiet, titleColor: palette.ink, titleFontWeight: 'normal', gridColor: palette.grid, domainColor: palette.faint, tickColor: palette.faint, labelFontSize: 12, titleFontSize: 13, labelOverlap: 'greedy', minExtent: 38, titlePadding: 8 },
+  header: { labelColor: palette.ink, titleColor: palette.ink },
+  text: { fontSize: 12, color: palette.quiet },
+} as const;
+
+export type Spec = Record<string, unknown>;
+
+export const SCHEMA = 'https://vega.github.io/schema/vega-lite/v6.json';

@@ -1,0 +1,23 @@
+import * as vega from 'vega';
+import { compile, type TopLevelSpec } from 'vega-lite';
+import { type Spec, variables } from './palette.ts';
+
+/** A chart as static SVG for the page, its colours as variables. Throws where the compiler warns: a chart with a warning is a defect. */
+export async function svgOf(spec: Spec, name: string): Promise<string> {
+  const warnings: string[] = [];
+  const warn = (...texts: readonly unknown[]): typeof logger => {
+    warnings.push(texts.join(' '));
+    return logger;
+  };
+  const silent = (): typeof logger => logger;
+  const logger = { level: silent, warn, info: silent, debug: silent, error: warn } as unknown as vega.LoggerInterface;
+  const compiled = compile(spec as unknown as TopLevelSpec, { logger });
+  const view = new vega.View(vega.parse(compiled.spec), { renderer: 'none', logger });
+  const svg = await view.toSVG();
+  view.finalize();
+  if (warnings.length > 0) throw new Error(`chart ${name}: ${warnings.join('; ')}`);
+  return Object.entries(variables).reduce((text, [colour, variable]) => text.replaceAll(`"${colour}"`, `"${variable}"`), svg).replace(/<svg /, '<svg role="presentation" focusable="false" ');
+}
+
+/** Numbering of gradients and clips starts anew for each report, so that the same result gives the same bytes. */
+export const startReport = (): void => vega.resetSVGDefIds();
