@@ -9,9 +9,15 @@ export type Child = Markup | string | number | false | null | undefined | readon
 
 const entities: Readonly<Record<string, string>> = { '&': '&amp;', '<': '&lt;', '>': '&gt;', '"': '&quot;', "'": '&#39;' };
 
+/** Control characters that no HTML text may hold. */
+const isControl = (code: number): boolean => code === 0x7f || (code < 0x20 && code !== 0x09 && code !== 0x0a && code !== 0x0d);
+
 /** Text for element content and quoted attributes; characters that no HTML text may hold are shown as a mark. */
-// biome-ignore lint/suspicious/noControlCharactersInRegex: control characters are what is looked for
-export const escaped = (text: string): string => text.replace(/[&<>"']/g, (c) => entities[c]!).replace(/[\u0000-\u0008\u000b\u000c\u000e-\u001f\u007f]/g, '\ufffd');
+const escaped = (text: string): string =>
+  Array.from(
+    text.replace(/[&<>"']/g, (c) => entities[c]!),
+    (c) => (isControl(c.codePointAt(0)!) ? '\ufffd' : c),
+  ).join('');
 
 function render(child: Child): string {
   if (child === false || child === null || child === undefined) return '';
@@ -21,4 +27,5 @@ function render(child: Child): string {
 }
 
 /** Template of markup; everything put in is escaped unless it is markup itself. */
-export const html = (parts: TemplateStringsArray, ...children: readonly Child[]): Markup => raw(parts.reduce((all, part, i) => all + render(children[i - 1]) + part));
+export const html = (parts: TemplateStringsArray, ...children: readonly Child[]): Markup =>
+  raw(parts.reduce((all, part, i) => all + render(children[i - 1]) + part));

@@ -38,7 +38,8 @@ export function valueBy(value: number, lower: number, upper: number): string {
 
 /** `0.662 (0.611 to 0.713)` */
 export function withInterval(value: number, lower: number, upper: number): string {
-  const place = (one: number): string => (Number.isFinite(one) ? roundedLike(one, value, lower, upper) : one > 0 ? 'no upper limit' : 'no lower limit');
+  const place = (one: number): string =>
+    Number.isFinite(one) ? roundedLike(one, value, lower, upper) : one > 0 ? 'no upper limit' : 'no lower limit';
   if (Number.isNaN(lower) || Number.isNaN(upper)) return `${plainNumber(value)} (interval not known)`;
   return `${valueBy(value, lower, upper)} (${place(lower)} to ${place(upper)})`;
 }
@@ -49,7 +50,8 @@ export function roundedLike(one: number, value: number, lower: number, upper: nu
 }
 
 /** `11 %` */
-export const percent = (share: number): string => (Number.isFinite(share) ? `${Math.abs(share) >= 0.0995 ? Math.round(100 * share) : Number((100 * share).toPrecision(2))} %` : MISSING);
+export const percent = (share: number): string =>
+  Number.isFinite(share) ? `${Math.abs(share) >= 0.0995 ? Math.round(100 * share) : Number((100 * share).toPrecision(2))} %` : MISSING;
 
 /** A standard deviation of a logarithm as a share: exp(s) - 1. */
 export const percentOfLn = (ln: number): string => (Number.isFinite(ln) ? percent(Math.expm1(ln)) : MISSING);

@@ -2,8 +2,8 @@ import { createHash } from 'node:crypto';
 import type { StudyResult } from '../pipeline/results/study-result.ts';
 import { lawChart } from './charts/law-chart.ts';
 import type { Spec } from './charts/palette.ts';
-import { parityChart, residualChart } from './charts/residual-charts.ts';
 import { startReport, svgOf } from './charts/render.ts';
+import { parityChart, residualChart } from './charts/residual-charts.ts';
 import { html, type Markup, raw } from './html.ts';
 import { answer } from './sections/answer.ts';
 import { audit } from './sections/audit.ts';
@@ -41,6 +41,12 @@ function chartsOf(result: StudyResult): Record<string, Spec> {
     const found = result.columns.find((column) => column.name === name)?.unit ?? '1';
     return found === '1' ? name : `${name} in ${found}`;
   };
-  const laws = result.curves.map((curve, k) => [`law-${k + 1}`, lawChart(curve, { x: unit(curve.group), y: unit(fit.form.response), log })] as const);
-  return { ...Object.fromEntries(laws), parity: parityChart(result, fit, unit(fit.form.response)), residuals: residualChart(result, fit, log) };
+  const laws = result.curves.map(
+    (curve, k) => [`law-${k + 1}`, lawChart(curve, { x: unit(curve.group), y: unit(fit.form.response), log })] as const,
+  );
+  return {
+    ...Object.fromEntries(laws),
+    parity: parityChart(result, fit, unit(fit.form.response)),
+    residuals: residualChart(result, fit, log),
+  };
 }

@@ -21,7 +21,7 @@ export function inseparable(form: Form): readonly string[] {
   for (let i = 0; i < POINTS * 4 && columns[0]!.length < POINTS; i++) {
     const at = Object.fromEntries(groups.map((name, k) => [name, 0.5 + 2 * spread(7 * i + 3 * k + 2)]));
     const row = slopes.map((slope) => evaluate(slope, at, theta));
-    if (row.every(Number.isFinite)) row.forEach((value, k) => columns[k]!.push(value));
+    if (row.every(Number.isFinite)) for (const [k, value] of row.entries()) columns[k]!.push(value);
   }
   if (columns[0]!.length < POINTS) return [];
   const dependent = firstDependent(columns);

@@ -1,5 +1,6 @@
 import { dirname, join, resolve } from 'node:path';
 import { analyse, type RunFacts } from '../analyse.ts';
+import { InputError } from '../base/input-error.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
 import { sha256 } from '../files/hash.ts';
@@ -46,7 +47,7 @@ export async function loadStudy(file: string): Promise<Loaded> {
     return bytes;
   };
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
-  const study = parseStudy(decodeText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
+  const study = parseStudy(studyText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
   const trials = readTable(inside(study.trials.file), {
     file: study.trials.file.is,
     ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),
@@ -63,6 +64,15 @@ export async function loadStudy(file: string): Promise<Loaded> {
       ? []
       : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
   return { plan: makePlan(study, { trials, tables, catalogue, own }), trials, files };
+}
+
+/** A study file that is no text is a wrong study file (exit 2), not data that cannot be used. */
+function studyText(bytes: Buffer, file: string): string {
+  try {
+    return decodeText(bytes, file);
+  } catch (error) {
+    throw error instanceof InputError ? new InputError(error.messages) : error;
+  }
 }
 
 const columnsAsked = (study: Study): readonly string[] =>

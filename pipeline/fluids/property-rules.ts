@@ -27,7 +27,7 @@ const ofStream = (key: Key, stream: Stream): Key => (stream === 'own' ? key : `$
 export const pressureKey = (stream: Stream): Key => ofStream('fluid_pressure', stream);
 
 /** Keys of properties whose pressure rule has a stated default: 101.325 kPa. */
-export const ATMOSPHERIC = 101_325; // Pa, standard atmosphere, ISO 2533
+const ATMOSPHERIC = 101_325; // Pa, standard atmosphere, ISO 2533
 
 /** Every property of a fluid at bulk, film and wall conditions of one stream. */
 export function propertyRules(fluid: Fluid, stream: Stream, at: Conditions): readonly Rule[] {
@@ -71,7 +71,7 @@ function propertyRule(fluid: Fluid, model: PropertyModel, gives: Key, from: read
 }
 
 /** `property: viscosity of water (IAPWS R12-08)`: the same at the rig and at the plant, in bulk, film and at the wall. */
-export const accuracySource = (property: string, fluid: Fluid, source: string): string =>
+const accuracySource = (property: string, fluid: Fluid, source: string): string =>
   `property: ${property.replaceAll('_', ' ')} of ${fluid.title} (${source.split(',')[0]})`;
 
 /** The pressure given, else the ambient pressure given, else the standard atmosphere, which is said. */

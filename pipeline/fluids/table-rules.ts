@@ -18,7 +18,7 @@ export interface PropertyTable {
 }
 
 /** What a table may run over. */
-export const tableConditions: readonly string[] = [
+const tableConditions: readonly string[] = [
   'temperature',
   'pressure',
   'mass_fraction',

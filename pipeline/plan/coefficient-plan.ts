@@ -24,7 +24,16 @@ export function planCoefficient(study: Study, quantities: QuantityPlan, faults: 
   const { is: name, place } = coefficient.route;
   const route = routes[name];
   if (route === undefined) {
-    faults.add('unknown-route', says.unknownRoute(name, Object.values(routes).filter((one) => one.transfer === 'either' || one.transfer === study.transfer).map((one) => one.name)), place);
+    faults.add(
+      'unknown-route',
+      says.unknownRoute(
+        name,
+        Object.values(routes)
+          .filter((one) => one.transfer === 'either' || one.transfer === study.transfer)
+          .map((one) => one.name),
+      ),
+      place,
+    );
     return undefined;
   }
   if (route.transfer !== 'either' && route.transfer !== study.transfer)
@@ -41,7 +50,8 @@ function readSettings(route: Route, study: Study, faults: Faults): Readonly<Reco
     if (setting === undefined) faults.add('unknown-setting', says.unknownSetting(route.name, key, Object.keys(route.settings)), place);
     else if (setting.allowed !== undefined && !setting.allowed.includes(is))
       faults.add('wrong-setting', says.wrongSetting(key, is, setting.allowed), place);
-    else if (setting.reads !== undefined && !setting.reads(is)) faults.add('wrong-setting', says.unreadableSetting(key, is, setting.says), place);
+    else if (setting.reads !== undefined && !setting.reads(is))
+      faults.add('wrong-setting', says.unreadableSetting(key, is, setting.says), place);
     else settings[key] = is;
   }
   return settings;

@@ -82,6 +82,13 @@ function rules(settings: Settings): readonly Rule[] {
     ),
     {
       gives: 'mass_transfer_coefficient',
+      from: ['volumetric_coefficient', 'interfacial_area'],
+      of: (Ka, a) => Ka! / a!,
+      formula: 'K = Ka/a_i',
+      source,
+    },
+    {
+      gives: 'mass_transfer_coefficient',
       from: ['volumetric_coefficient', 'specific_area'],
       of: (Ka, a) => Ka! / a!,
       formula: 'K = Ka/a',

@@ -45,6 +45,7 @@ function pressures(settings: Settings, { concentrations }: RouteContext): readon
     },
     ofConcentration('surface_pressure', 'saturation_concentration', 'wall_temperature'),
     ofConcentration('bulk_pressure', 'bulk_concentration', 'temperature'),
+    ofWater('bulk_pressure', 'temperature', true),
     where('bulk_pressure', 0, says.dryGas),
     { ...where('pressure', 101_325, says.atmospheric), source: 'standard atmosphere, ISO 2533' },
   ];

@@ -1,6 +1,15 @@
+import { bedExposure } from './bed-exposure.ts';
+import { counterCurrentTransfer } from './counter-current-transfer.ts';
+import { evaporation } from './evaporation.ts';
+import { gassingIn } from './gassing-in.ts';
 import { heatRate } from './heat-rate.ts';
+import { layerPermeation } from './layer-permeation.ts';
+import { limitingCurrent } from './limiting-current.ts';
+import { logMeanConcentration } from './log-mean-concentration.ts';
 import { logMeanDifference } from './log-mean-difference.ts';
+import { massRate } from './mass-rate.ts';
 import { measured } from './measured.ts';
+import { otherSidePlot } from './other-side-plot.ts';
 import { pelletDissolution } from './pellet-dissolution.ts';
 import type { Route } from './route.ts';
 import { seriesResistance, thenSeriesResistance } from './series-resistance.ts';
@@ -16,7 +25,16 @@ const list: readonly Route[] = [
   seriesResistance,
   sphereCooling,
   thenSeriesResistance(vesselHeating),
+  otherSidePlot,
+  massRate,
+  logMeanConcentration,
+  bedExposure,
+  counterCurrentTransfer,
   pelletDissolution,
+  gassingIn,
+  limitingCurrent,
+  evaporation,
+  layerPermeation,
 ];
 
 /** Every route by name. */

@@ -10,7 +10,7 @@ const side: RouteSetting = {
 };
 
 /** Own stream inside the tube, except where the equipment says otherwise. */
-const sideOf = (settings: Settings, { equipment }: RouteContext): 'inside' | 'outside' =>
+export const sideOf = (settings: Settings, { equipment }: RouteContext): 'inside' | 'outside' =>
   (settings.side as 'inside' | 'outside' | undefined) ?? (equipment === 'annulus' || equipment === 'cylinder' ? 'outside' : 'inside');
 
 /** Bore of the tube between the streams. `diameter` is another thing in an annulus and in a vessel. */

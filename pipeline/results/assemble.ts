@@ -127,7 +127,9 @@ function statementsOf(options: FitOptions, contenders: readonly Contender[]): re
 /** Each free parameter's interval with the method that made it. */
 const intervalsOf = (contenders: readonly Contender[]): StudyResult['intervals'] =>
   contenders.flatMap(({ fit }) =>
-    fit.parameters.filter((parameter) => !parameter.fixed).map(({ name, lower, upper, intervalBy }) => ({ law: fit.name, parameter: name, method: intervalBy, lower, upper, note: '' })),
+    fit.parameters
+      .filter((parameter) => !parameter.fixed)
+      .map(({ name, lower, upper, intervalBy }) => ({ law: fit.name, parameter: name, method: intervalBy, lower, upper, note: '' })),
   );
 
 /** The same sentence is told once. */

@@ -28,7 +28,16 @@ export interface LawCurve {
   readonly lower: readonly number[];
   readonly upper: readonly number[];
   /** Trials in the order of the result, moved along the law to the middle of the other groups, with one standard uncertainty either way. */
-  readonly trials: readonly { readonly trial: string; readonly campaign: string; readonly x: number; readonly y: number; readonly xLower: number; readonly xUpper: number; readonly yLower: number; readonly yUpper: number }[];
+  readonly trials: readonly {
+    readonly trial: string;
+    readonly campaign: string;
+    readonly x: number;
+    readonly y: number;
+    readonly xLower: number;
+    readonly xUpper: number;
+    readonly yLower: number;
+    readonly yUpper: number;
+  }[];
   readonly published: readonly PublishedCurve[];
 }
 
@@ -56,10 +65,28 @@ function curve(fit: Fit, data: FitData, group: string, g: number, published: rea
     const width = 1 + data.x.length;
     const [uy, ux] = [Math.sqrt(data.sigma[i]![0]!), Math.sqrt(data.sigma[i]![(g + 1) * width + g + 1]!)];
     const y = shift(relative ? Math.exp(data.y[i]!) : data.y[i]!);
-    return { trial: data.trials[i]!, campaign: data.campaigns[data.campaign[i]!]!, x: value, y, ...spread('x', value, ux, relative), ...spread('y', y, uy, relative) };
+    return {
+      trial: data.trials[i]!,
+      campaign: data.campaigns[data.campaign[i]!]!,
+      x: value,
+      y,
+      ...spread('x', value, ux, relative),
+      ...spread('y', y, uy, relative),
+    };
   });
   const lines = published.flatMap((row) => publishedCurve(row, fit, natural, middle, group, g));
-  return { group, at, x, fitted: bands.map((b) => b.value), lawLower: bands.map((b) => b.lawLower), lawUpper: bands.map((b) => b.lawUpper), lower: bands.map((b) => b.lower), upper: bands.map((b) => b.upper), trials: moved as LawCurve['trials'], published: lines };
+  return {
+    group,
+    at,
+    x,
+    fitted: bands.map((b) => b.value),
+    lawLower: bands.map((b) => b.lawLower),
+    lawUpper: bands.map((b) => b.lawUpper),
+    lower: bands.map((b) => b.lower),
+    upper: bands.map((b) => b.upper),
+    trials: moved as LawCurve['trials'],
+    published: lines,
+  };
 }
 
 const middleOf = (column: Float64Array, relative: boolean): number => {
@@ -68,7 +95,10 @@ const middleOf = (column: Float64Array, relative: boolean): number => {
 };
 
 const spread = <N extends 'x' | 'y'>(name: N, value: number, u: number, relative: boolean): Record<`${N}Lower` | `${N}Upper`, number> =>
-  ({ [`${name}Lower`]: relative ? value * Math.exp(-u) : value - u, [`${name}Upper`]: relative ? value * Math.exp(u) : value + u }) as Record<`${N}Lower` | `${N}Upper`, number>;
+  ({
+    [`${name}Lower`]: relative ? value * Math.exp(-u) : value - u,
+    [`${name}Upper`]: relative ? value * Math.exp(u) : value + u,
+  }) as Record<`${N}Lower` | `${N}Upper`, number>;
 
 /** Moves a response from one point to another along the law: by the ratio of its values, or by their difference. */
 function shifted(fit: Fit, from: Readonly<Record<string, number>>, to: Readonly<Record<string, number>>): (y: number) => number {
@@ -77,7 +107,10 @@ function shifted(fit: Fit, from: Readonly<Record<string, number>>, to: Readonly<
 }
 
 /** Confidence of the law and expectation of a new trial at one point, by Student's t on Satterthwaite degrees of freedom. */
-function interval(fit: Fit, at: Readonly<Record<string, number>>): { readonly value: number; readonly lawLower: number; readonly lawUpper: number; readonly lower: number; readonly upper: number } {
+function interval(
+  fit: Fit,
+  at: Readonly<Record<string, number>>,
+): { readonly value: number; readonly lawLower: number; readonly lawUpper: number; readonly lower: number; readonly upper: number } {
   const relative = fit.scale === 'relative';
   const tree = relative ? call('ln', fit.form.tree) : fit.form.tree;
   const h = evaluate(tree, at, fit.values);
@@ -93,7 +126,14 @@ function interval(fit: Fit, at: Readonly<Record<string, number>>): { readonly va
 }
 
 /** ln-quadratic through the published values at the trials in range: its curvature over one study is smaller than that. */
-function publishedCurve(row: AuditRow, fit: Fit, natural: readonly (readonly number[])[], middle: Readonly<Record<string, number>>, group: string, g: number): readonly PublishedCurve[] {
+function publishedCurve(
+  row: AuditRow,
+  fit: Fit,
+  natural: readonly (readonly number[])[],
+  middle: Readonly<Record<string, number>>,
+  group: string,
+  g: number,
+): readonly PublishedCurve[] {
   const points = row.predicted.flatMap((value, i) => {
     if (!row.inside[i]) return [];
     const own = Object.fromEntries(fit.form.groups.map((name, k) => [name, natural[k]![i]!]));
@@ -105,7 +145,15 @@ function publishedCurve(row: AuditRow, fit: Fit, natural: readonly (readonly num
   const centre = (low + high) / 2;
   const f = quadratic(points.map((p) => ({ x: p.x - centre, y: p.y })));
   const x = Array.from({ length: 21 }, (_, i) => low + ((high - low) * i) / 20);
-  return [{ id: row.id, label: `${row.authors} ${row.year}`, analogy: row.basis === 'analogy', x: x.map(Math.exp), y: x.map((v) => Math.exp(f(v - centre))) }];
+  return [
+    {
+      id: row.id,
+      label: `${row.authors} ${row.year}`,
+      analogy: row.basis === 'analogy',
+      x: x.map(Math.exp),
+      y: x.map((v) => Math.exp(f(v - centre))),
+    },
+  ];
 }
 
 /** Least-squares parabola by orthogonal columns. */

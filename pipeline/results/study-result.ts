@@ -1,11 +1,11 @@
 import type { AuditResult } from '../audit/verdict.ts';
 import type { Note } from '../base/message.ts';
-import type { LawCurve } from './curves.ts';
 import type { Budget } from '../budget/budget.ts';
 import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
+import type { LawCurve } from './curves.ts';
 
 /** A group or quantity that appears in a law, as the report names it. */
 export interface Definition {
@@ -140,4 +140,4 @@ export interface StudyResult {
   };
 }
 
-export type { Choice, LawCurve, Identifiability, InfluenceRow, TheoryTest };
+export type { Choice, Identifiability, InfluenceRow, LawCurve, TheoryTest };

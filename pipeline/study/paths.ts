@@ -3,7 +3,7 @@ import type { Faults } from './faults.ts';
 import type { Placed } from './study.ts';
 
 /** A path stays in the study's folder: relative, without a way up, on every system. */
-export function staysInside(path: string): boolean {
+function staysInside(path: string): boolean {
   if (/^([/\\~]|[A-Za-z]:)/.test(path) || path.includes('\0')) return false;
   let depth = 0;
   for (const part of path.split(/[/\\]/)) {

@@ -10,14 +10,28 @@ export const palette = {
 } as const;
 
 /** Colour -> variable of the page's style. */
-export const variables: Readonly<Record<string, string>> = Object.fromEntries(Object.entries(palette).map(([name, colour]) => [colour, `var(--${name})`]));
+export const variables: Readonly<Record<string, string>> = Object.fromEntries(
+  Object.entries(palette).map(([name, colour]) => [colour, `var(--${name})`]),
+);
 
 /** Config that all charts share: quiet axes, text at one size, no frame. */
 export const config = {
   background: 'transparent',
   font: 'system-ui, sans-serif',
   view: { stroke: null },
-  axis: { labelColor: palette.quiet, titleColor: palette.ink, titleFontWeight: 'normal', gridColor: palette.grid, domainColor: palette.faint, tickColor: palette.faint, labelFontSize: 12, titleFontSize: 13, labelOverlap: 'greedy', minExtent: 38, titlePadding: 8 },
+  axis: {
+    labelColor: palette.quiet,
+    titleColor: palette.ink,
+    titleFontWeight: 'normal',
+    gridColor: palette.grid,
+    domainColor: palette.faint,
+    tickColor: palette.faint,
+    labelFontSize: 12,
+    titleFontSize: 13,
+    labelOverlap: 'greedy',
+    minExtent: 38,
+    titlePadding: 8,
+  },
   header: { labelColor: palette.ink, titleColor: palette.ink },
   text: { fontSize: 12, color: palette.quiet },
 } as const;

@@ -16,7 +16,9 @@ export async function svgOf(spec: Spec, name: string): Promise<string> {
   const svg = await view.toSVG();
   view.finalize();
   if (warnings.length > 0) throw new Error(`chart ${name}: ${warnings.join('; ')}`);
-  return Object.entries(variables).reduce((text, [colour, variable]) => text.replaceAll(`"${colour}"`, `"${variable}"`), svg).replace(/<svg /, '<svg role="presentation" focusable="false" ');
+  return Object.entries(variables)
+    .reduce((text, [colour, variable]) => text.replaceAll(`"${colour}"`, `"${variable}"`), svg)
+    .replace(/<svg /, '<svg role="presentation" focusable="false" ');
 }
 
 /** Numbering of gradients and clips starts anew for each report, so that the same result gives the same bytes. */

@@ -16,7 +16,16 @@ export function answer(result: StudyResult, pictures: ReadonlyMap<string, Markup
 <div class="law">${text}</div>
 <p>${result.choice.why}</p>
 ${warnings.length > 0 && html`<div class="warnings"><h3>What to mind</h3><ul>${warnings.map((note) => html`<li>${note.text}</li>`)}</ul></div>`}
-${result.curves.map((curve, k) => html`<figure>${pictures.get(`law-${k + 1}`)}<figcaption>${fit.form.response} against ${curve.group}${Object.keys(curve.at).length === 0 ? '' : `, trials moved along the law to ${Object.entries(curve.at).map(([name, value]) => `${name} ${plainNumber(value)}`).join(', ')}`}. Dots: trials with one standard uncertainty; line: the law; inner band: its ${Math.round(100 * fit.confidence)} % confidence; outer band: where a further trial is expected; thin lines: published correlations in their range.</figcaption></figure>`)}
+${result.curves.map(
+  (curve, k) =>
+    html`<figure>${pictures.get(`law-${k + 1}`)}<figcaption>${fit.form.response} against ${curve.group}${
+      Object.keys(curve.at).length === 0
+        ? ''
+        : `, trials moved along the law to ${Object.entries(curve.at)
+            .map(([name, value]) => `${name} ${plainNumber(value)}`)
+            .join(', ')}`
+    }. Dots: trials with one standard uncertainty; line: the law; inner band: its ${Math.round(100 * fit.confidence)} % confidence; outer band: where a further trial is expected; thin lines: published correlations in their range.</figcaption></figure>`,
+)}
 <div class="wide"><table><caption>Parameters of ${fit.name}, intervals at ${Math.round(100 * fit.confidence)} %</caption><thead><tr><th scope="col">parameter</th><th scope="col" class="n">estimate</th><th scope="col" class="n">from</th><th scope="col" class="n">to</th><th scope="col" class="n">degrees of freedom</th><th scope="col">remark</th></tr></thead><tbody>
 ${fit.parameters.map((p) => html`<tr><th scope="row">${p.name}</th><td class="n">${valueBy(p.estimate, p.lower, p.upper)}</td><td class="n">${Number.isFinite(p.lower) ? roundedLike(p.lower, p.estimate, p.lower, p.upper) : 'open'}</td><td class="n">${Number.isFinite(p.upper) ? roundedLike(p.upper, p.estimate, p.lower, p.upper) : 'open'}</td><td class="n">${plainNumber(p.degreesOfFreedom)}</td><td>${p.fixed ? 'held, not measured' : p.onBound ? 'on its bound' : ''}</td></tr>`)}
 </tbody></table></div>

@@ -16,7 +16,13 @@ export function evidence(result: StudyResult, pictures: ReadonlyMap<string, Mark
 ${result.choice.compared.map((row) => html`<tr><th scope="row">${row.law}</th><td class="n">${row.parameters}</td><td class="n">${plainNumber(row.aicc, 4)}</td><td class="n">${plainNumber(row.bic, 4)}</td><td class="n">${relative ? percentOfLn(row.cvRmsLn) : plainNumber(row.cvRmsLn)}</td><td>${row.says}</td></tr>`)}
 </tbody></table></div>
 <div class="wide"><table><caption>Which source carries the uncertainty of each parameter</caption><thead><tr><th scope="col">parameter</th><th scope="col">sources, largest first</th></tr></thead><tbody>
-${result.budgets.map((one) => html`<tr><th scope="row">${one.of}</th><td>${one.shares.slice(0, 6).map(({ source, kind, share }) => `${source} (${kind}) ${percent(share)}`).join(', ')}</td></tr>`)}
+${result.budgets.map(
+  (one) =>
+    html`<tr><th scope="row">${one.of}</th><td>${one.shares
+      .slice(0, 6)
+      .map(({ source, kind, share }) => `${source} (${kind}) ${percent(share)}`)
+      .join(', ')}</td></tr>`,
+)}
 </tbody></table></div>
 ${names.length > 0 && html`<div class="wide"><table><caption>The law without a campaign or an influential trial</caption><thead><tr><th scope="col">without</th>${names.map((name) => html`<th scope="col" class="n">${name}</th>`)}</tr></thead><tbody>${result.influence.map((row) => html`<tr><th scope="row">${row.kind} ${row.left}</th>${names.map((name) => html`<td class="n">${plainNumber(row.values[name] ?? Number.NaN)}</td>`)}</tr>`)}</tbody></table></div>`}
 </section>`;

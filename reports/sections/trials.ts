@@ -20,6 +20,8 @@ ${rows.map((row) => {
 function walk({ trials: all }: StudyResult): Markup | false {
   const one = all[0];
   if (one === undefined || one.trace.length === 0) return false;
-  return html`<h3>Trial ${one.trial}, step by step</h3><p class="fine">Read, in SI: ${Object.entries(one.raw).map(([key, value]) => `${key} ${plainNumber(value, 5)}`).join(', ')}.</p>
+  return html`<h3>Trial ${one.trial}, step by step</h3><p class="fine">Read, in SI: ${Object.entries(one.raw)
+    .map(([key, value]) => `${key} ${plainNumber(value, 5)}`)
+    .join(', ')}.</p>
 <div class="wide"><table><thead><tr><th scope="col">step</th><th scope="col" class="n">value</th><th scope="col">unit</th><th scope="col">formula</th><th scope="col">source</th></tr></thead><tbody>${one.trace.map((step) => html`<tr><th scope="row">${step.key}</th><td class="n">${plainNumber(step.value, 5)}</td><td>${step.unit}</td><td>${step.formula}</td><td>${step.source}</td></tr>`)}</tbody></table></div>`;
 }

@@ -58,7 +58,11 @@ test('there are sixty', () => {
 
 describe.concurrent('broken studies and tables', { timeout: 60_000 }, () => {
   test.each(broken.map((one) => [one.what, one] as const))('%s', async (_, { study, trials, files, exit, says }) => {
-    const written = { 'study.yaml': study === undefined ? goodStudy : study(goodStudy), 'trials.csv': trials === undefined ? goodTrials : trials(goodTrials), ...files };
+    const written = {
+      'study.yaml': study === undefined ? goodStudy : study(goodStudy),
+      'trials.csv': trials === undefined ? goodTrials : trials(goodTrials),
+      ...files,
+    };
     await inFolder(written, (folder, ended) => {
       expect(ended.err).not.toMatch(/\n\s+at .*:\d+:\d+\)?\n/);
       expect(ended.exit, ended.err).toBe(exit);

@@ -32,7 +32,8 @@ export const says = {
   optionAt: 'Evaluate there, such as "Re=6071, Pr=0.70"',
   optionCount: 'How many trials to propose',
   optionOutFile: 'File to write instead of standard output',
-  notYet: (command: string): string => `${command} is not part of this version yet: laws.json holds the law with its covariance and ranges for use elsewhere`,
+  notYet: (command: string): string =>
+    `${command} is not part of this version yet: laws.json holds the law with its covariance and ranges for use elsewhere`,
   studyExists: (): string => 'this study file exists; --force overwrites it',
   begun: (file: string, questions: number): string =>
     questions === 0 ? `${file} is written` : `${file} is written; ${questions} ${questions === 1 ? 'question is' : 'questions are'} open:`,

@@ -80,6 +80,16 @@ export const says = {
   correlatedResiduals: (lag1: number, widening: number, sd: number): string =>
     `the curve's residuals (${n(sd, 2)} K) hang together (lag-1 correlation ${n(lag1, 2)}): its uncertainty is widened ${n(widening, 2)} times, and one exponential may not hold`,
 
+  noGassingRate: (tau: number): string =>
+    `the curve does not determine kLa${tau > 0 ? ` behind a probe of ${n(tau)} s` : ''}: it is too short, over at once, or not an approach to saturation`,
+  noLag: 'The probe is taken as instantaneous: probe_time is not given. A probe that is slow against kLa makes it read low.',
+  stepAtStart: 'The window begins with the step of the gas, liquid and probe in equilibrium before it.',
+  slowProbe: (kLa: number, tau: number): string =>
+    `kLa times probe time is ${n(kLa * tau)}: the probe is slower than the transfer, and an error in its time constant is a large one in kLa`,
+  noPermeation: 'the curve has no slope: nothing comes through in its window',
+  notYetSteady: (from: number, lag: number): string =>
+    `the window begins at ${n(from)} s, less than twice the time lag of ${n(lag)} s: permeation is not yet steady there, and rate and lag read low`,
+
   // vessels
   noLossConductance: 'No loss_conductance is stated; none is taken off.',
   noConstantLoss: 'No constant heat_loss is stated; none is taken off.',
@@ -126,4 +136,16 @@ export const says = {
     `${percent(share)} of the mass is lost; it must lie between 0 and 100 %${share >= 1 ? ': what is gone altogether gives only a lower bound' : ''}`,
   nearSaturation: (share: number): string => `the liquid ends at ${percent(share)} of the way to saturation`,
   saturates: 'What dissolves would saturate the liquid before it has dissolved: mass, volume and saturation do not fit together.',
+  // layers
+  oneSideFree: (side: string): string => `No coefficient is given on the ${side} side of the layer; it has no resistance there.`,
+  sidesFree: 'No coefficients are given on the two sides of the layer; they have no resistance.',
+  layerHasNone: (whole: number, sides: number): string =>
+    `the resistances on both sides, ${n(sides)} s/m, are more than the whole, ${n(whole)} s/m`,
+  onePhase: 'partition_coefficient is not given and taken as one: concentrations count inside the layer.',
+  insideLayer: 'Sh of the layer is on concentrations inside it, for which steady diffusion has Sh = 1.',
+  coefficientIsLayer: 'The coefficient is that through the layer (with the other side, where given), on concentrations in the fluid.',
+
+  // other side
+  otherSideConstant:
+    'All resistances but that of the law are one constant within a campaign: the other side must be held at the same flow and temperatures, and fouling must not grow.',
 } as const;

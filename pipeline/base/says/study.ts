@@ -3,7 +3,7 @@ import { didYouMean } from '../nearest.ts';
 const thousands = (n: number): string => String(n).replace(/\B(?=(\d{3})+$)/g, ',');
 
 /** What was read, short enough to stand in a sentence. */
-export function shown(value: unknown): string {
+function shown(value: unknown): string {
   if (value === null || value === '') return 'nothing';
   if (Array.isArray(value)) return 'a list';
   if (typeof value === 'object') return 'a map of keys';

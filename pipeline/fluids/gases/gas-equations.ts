@@ -23,7 +23,7 @@ interface Virial {
 type Critical = Gas['critical'];
 
 /** Abbott's form of the Pitzer correlation: Smith and Van Ness, Introduction to Chemical Engineering Thermodynamics, 3rd ed. 1975 (from memory). */
-export function secondVirial({ T: Tc, p: pc, acentric }: Critical, T: number): Virial {
+function secondVirial({ T: Tc, p: pc, acentric }: Critical, T: number): Virial {
   const t = T / Tc;
   const scale = (R * Tc) / pc;
   const power = (a: number, n: number): Virial => ({
