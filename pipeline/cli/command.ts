@@ -11,7 +11,7 @@ export interface Command {
   readonly run: (given: Given, terminal: Terminal) => Promise<Exit>;
 }
 
-export interface Argument {
+interface Argument {
   /** As the help writes it: `STUDY`; in lower case the key under which it is given. */
   readonly name: string;
   readonly about: string;
@@ -19,7 +19,7 @@ export interface Argument {
   readonly optional?: boolean;
 }
 
-export interface Option {
+interface Option {
   readonly name: string;
   /** What follows it: `DIR`; left out for a flag. */
   readonly value?: string;

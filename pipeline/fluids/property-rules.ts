@@ -26,7 +26,7 @@ const ofStream = (key: Key, stream: Stream): Key => (stream === 'own' ? key : `$
 /** Key of the pressure at which a stream's properties are taken. */
 export const pressureKey = (stream: Stream): Key => ofStream('fluid_pressure', stream);
 
-/** Keys of properties whose pressure rule has a stated default: 101.325 kPa. */
+/** The pressure where none is given; said to the reader. */
 const ATMOSPHERIC = 101_325; // Pa, standard atmosphere, ISO 2533
 
 /** Every property of a fluid at bulk, film and wall conditions of one stream. */

@@ -48,7 +48,7 @@ const quantityFields = fields(
   },
   'a value such as 120 mm, or a map with column, value or formula',
 );
-export const quantity = either(
+const quantity = either(
   text('a value with its unit'),
   quantityFields,
   'a value such as 120 mm, or a map with column, value or formula',
@@ -70,7 +70,7 @@ const oneFluid = fields(
   'a fluid by name, or a table of properties',
 );
 const stream = either(word('the name of a fluid'), oneFluid, 'the name of a fluid, or a map with name or table');
-export const fluid = either(
+const fluid = either(
   fields({ own: stream.optional(), other: stream.optional() }, 'own and other'),
   stream,
   'the name of a fluid, a map with name or table, or own and other for two streams',

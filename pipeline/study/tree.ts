@@ -11,7 +11,7 @@ export interface ScalarTree {
   readonly place: Place;
 }
 
-export interface ListTree {
+interface ListTree {
   readonly kind: 'list';
   readonly items: readonly Tree[];
   readonly place: Place;
