@@ -18,12 +18,7 @@ export interface PropertyTable {
 }
 
 /** What a table may run over. */
-const tableConditions: readonly string[] = [
-  'temperature',
-  'pressure',
-  'mass_fraction',
-  'relative_humidity',
-] satisfies readonly Condition[];
+const tableConditions: readonly string[] = ['temperature', 'pressure', 'mass_fraction', 'relative_humidity'] satisfies readonly Condition[];
 
 /** These run over orders of magnitude: their logarithm is interpolated. */
 const IN_LOGARITHM = new Set(['viscosity', 'kinematic_viscosity', 'vapour_pressure', 'consistency', 'diffusivity']);

@@ -48,11 +48,7 @@ const quantityFields = fields(
   },
   'a value such as 120 mm, or a map with column, value or formula',
 );
-const quantity = either(
-  text('a value with its unit'),
-  quantityFields,
-  'a value such as 120 mm, or a map with column, value or formula',
-);
+const quantity = either(text('a value with its unit'), quantityFields, 'a value such as 120 mm, or a map with column, value or formula');
 
 const quantities = named(quantity, 'quantities by name');
 
