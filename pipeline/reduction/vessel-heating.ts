@@ -10,7 +10,7 @@ import { rateAt, rateKeys, relaxation } from './series/relaxation.ts';
 
 const flowing = (settings: Settings): boolean => settingOf(vesselHeating, settings, 'jacket') === 'flowing';
 
-/** Time-averaged approach: heat to contents and equipment is G (T_j - T) - G_l (T - T_a) - Q_l, T from start to end in t. Solved for the conductance G, W/K. */
+/** Heat to contents and equipment is G (T_j - T) - G_l (T - T_a) - Q_l, T from start to end in t. Solved for the conductance G, W/K. */
 export function conductance(
   capacity: number,
   start: number,
@@ -30,7 +30,7 @@ export function conductance(
   // what the contents lack at the end of t, relative to the way to go
   const lack = (G: number): number => final(G) + (start - final(G)) * Math.exp(-rate(G) * t) - end;
   const sign = Math.sign(end - start);
-  return root((x) => sign * lack(Math.exp(x)), Math.log(plain) - 12, Math.log(plain) + 8);
+  return Math.exp(root((x) => sign * lack(Math.exp(x)), Math.log(plain) - 12, Math.log(plain) + 8));
 }
 
 /** Conductance G from the rate of a logged curve as a function of the temperature it approaches. */
