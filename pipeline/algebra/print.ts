@@ -63,12 +63,14 @@ function numberPiece(value: number, number: NumberText): Piece {
   return { text: number(value), strength: value < 0 ? strength.sign : strength.atom };
 }
 
+const coprime = (a: number, b: number): boolean => (b === 0 ? a === 1 : coprime(b, a % b));
+
 /** Exponents such as 1/3 are written as the fraction they are. */
 export function fractionText(value: number): string | undefined {
   if (value > 0) {
     for (const over of [3, 6, 7, 9]) {
       const above = Math.round(value * over);
-      if (above > 0 && above < 3 * over && above % over !== 0 && above / over === value) return `${above}/${over}`;
+      if (above > 0 && above < 3 * over && coprime(above, over) && above / over === value) return `${above}/${over}`;
     }
   }
   return undefined;

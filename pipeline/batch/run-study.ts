@@ -1,6 +1,7 @@
 import { dirname, join, resolve } from 'node:path';
 import { analyse, type RunFacts } from '../analyse.ts';
 import { InputError } from '../base/input-error.ts';
+import * as says from '../base/says/analyse.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
 import { sha256 } from '../files/hash.ts';
@@ -46,8 +47,11 @@ export async function loadStudy(file: string): Promise<Loaded> {
     files.push({ file: name, sha256: sha256(bytes) });
     return bytes;
   };
+  const notYet = (place: Placed<string>['place']): InputError =>
+    new InputError([{ code: 'series-not-read', text: says.seriesNotYet(), place }]);
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
   const study = parseStudy(studyText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
+  if (study.coefficient?.series !== undefined) throw notYet(study.coefficient.place);
   const trials = readTable(inside(study.trials.file), {
     file: study.trials.file.is,
     ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),

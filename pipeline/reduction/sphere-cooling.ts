@@ -186,7 +186,7 @@ export const sphereCooling: Route = {
     ...byCurve(bodyOf(settings)),
     ...byTwoTemperatures(bodyOf(settings), whereOf(settings)),
   ],
-  series: () => relaxation('temperature'),
+  series: () => relaxation(['temperature'], ['ambient_temperature']),
   ledger: ['remaining_share', 'relaxation_rate', 'Bi', 'Fo'],
   numbers: {
     remaining_share: { unit: '1', symbol: 'theta', says: 'share of the temperature difference that is left' },

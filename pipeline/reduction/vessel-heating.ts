@@ -230,7 +230,10 @@ export const vesselHeating: Route = {
       source,
     },
   ],
-  series: (settings) => relaxation(flowing(settings) ? 'inlet_temperature_other' : 'temperature_other'),
+  series: (settings) =>
+    flowing(settings)
+      ? relaxation(['inlet_temperature_other'])
+      : relaxation(['temperature_other'], ['inlet_temperature_other', 'outlet_temperature_other']),
   ledger: ['effective_conductance', 'heat_conductance', 'total_heat_capacity'],
   numbers: {
     effective_conductance: { unit: 'W/K', symbol: 'G', says: 'heat per kelvin between entering jacket and contents' },

@@ -1,4 +1,5 @@
 import { join } from 'node:path';
+import type { ColumnTable } from 'arquero';
 import { sha256 } from '../files/hash.ts';
 import { makeFolder, removeFile, replaceFile } from '../files/write.ts';
 import { lawsJson } from './laws-json.ts';
@@ -8,16 +9,19 @@ import { workbook } from './workbook.ts';
 
 const PROVENANCE = 'provenance.json';
 
+/** One line end after the last row. */
+const csvOf = (table: ColumnTable): string => `${table.toCSV().trimEnd()}\n`;
+
 /** Every result file but the report, by name. */
 export function resultFiles(result: StudyResult): ReadonlyMap<string, string | Uint8Array> {
   const files = new Map<string, string | Uint8Array>([
     ['laws.json', lawsJson(result)],
-    ['trials.csv', `${trialsTable(result).toCSV()}\n`],
+    ['trials.csv', csvOf(trialsTable(result))],
   ]);
   const audited = auditTable(result);
   const plant = plantTable(result);
-  if (audited !== undefined) files.set('audit.csv', `${audited.toCSV()}\n`);
-  if (plant !== undefined) files.set('plant.csv', `${plant.toCSV()}\n`);
+  if (audited !== undefined) files.set('audit.csv', csvOf(audited));
+  if (plant !== undefined) files.set('plant.csv', csvOf(plant));
   files.set('results.xlsx', workbook(result));
   return files;
 }

@@ -76,6 +76,8 @@ export const says = {
 
   // logged curves
   shortCurve: (points: number, fewest: number): string => `the curve has ${points} points in its window; ${fewest} or more are needed`,
+  noBath: (keys: readonly string[]): string =>
+    `the curve needs the temperature it approaches as a column or value of the trial: ${keys.join(' or ')}`,
   noRate: (bath: number): string => `the curve does not approach ${celsius(bath)} as an exponential whose rate its window determines`,
   correlatedResiduals: (lag1: number, widening: number, sd: number): string =>
     `the curve's residuals (${n(sd, 2)} K) hang together (lag-1 correlation ${n(lag1, 2)}): its uncertainty is widened ${n(widening, 2)} times, and one exponential may not hold`,

@@ -10,17 +10,29 @@ const FEWEST = 8;
 const exponential: SeparableModel = { basis: (t, k) => [Math.exp(-k * t)], slopes: (t, k) => [-t * Math.exp(-k * t)] };
 
 /**
- * A curve that approaches the temperature `bath` as one exponential. It comes down to its rate, how that moves with the temperature approached (whose uncertainty thus
+ * A curve that approaches the temperature of a bath as one exponential; `baths` are the quantities that may hold it, their mean where they are several. It comes down to its rate, how that moves with the temperature approached (whose uncertainty thus
  * reaches the coefficient; a vessel that loses heat approaches another one), the temperature it was fitted at, and the start and end of the fitted curve.
  */
-export function relaxation(bath: Key): SeriesReduction {
+export function relaxation(...baths: readonly (readonly Key[])[]): SeriesReduction {
   return {
     value: 'temperature',
     gives: ['curve_rate', 'curve_rate_slope', 'curve_rate_curvature', 'curve_bath', 'window_start', 'curve_start', 'curve_end'],
-    needs: [bath],
-    optional: [],
-    reduce: ({ time, value }, given) => reduce(time, value, given(bath)!),
+    needs: [],
+    optional: baths.flat(),
+    reduce: ({ time, value }, given) => {
+      const bath = bathOf(baths, given);
+      return bath === undefined ? { refused: { code: 'no-bath', text: says.noBath(baths.flat()) } } : reduce(time, value, bath);
+    },
   };
+}
+
+/** Mean of the first ones that are all given. */
+function bathOf(baths: readonly (readonly Key[])[], given: (key: Key) => number | undefined): number | undefined {
+  for (const keys of baths) {
+    const values = keys.map(given);
+    if (values.every((value) => value !== undefined)) return values.reduce((sum, value) => sum + value, 0) / values.length;
+  }
+  return undefined;
 }
 
 /** Keys of `rateAt`, without the temperature. */
