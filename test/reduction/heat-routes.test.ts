@@ -116,6 +116,16 @@ describe('heat-rate', () => {
     expect(h({ loss_conductance: 0.5, ambient_temperature: C(20) })).toBeCloseTo(120, 10);
   });
 
+  test('a stagnant slab, film or wall layer has Nu = 1, a straight profile', () => {
+    // Q = lambda A dT/s, the definition of the conductivity
+    const [lambda, s] = [0.2, 0.004];
+    const { of } = runRoute('heat-rate', {
+      given: { ...surface, heat_rate: (lambda * 0.1 * 40) / s, wall_thickness: s, thermal_conductivity: lambda },
+      also: ['Nu@layer'],
+    });
+    expect(of('Nu@layer')).toBeCloseTo(1, 13);
+  });
+
   test('heated cylinder in an air stream, measured', () => {
     // Incropera et al., 6th ed., Example 7.4: 46 W, 15 % lost, 12.7 mm x 94 mm, 128.4 against 26.2 degC: h 102 W/(m2 K) (from memory)
     const { of } = runRoute('heat-rate', {

@@ -16,7 +16,7 @@ export const agitationRules: readonly Rule[] = [
   definition('power', ['power_ungassed'], (p) => p!, 'P = P_0', says.notGassed),
   definition('power', ['power_per_volume', 'liquid_volume'], (p, v) => p! * v!, 'P = (P/V) V'),
   definition('power', ['power_per_mass', 'density', 'liquid_volume'], (p, rho, v) => p! * rho! * v!, 'P = (P/m) rho V'),
-  definition('power_per_volume', ['power', 'liquid_volume'], (p, v) => p! / v!, 'P/V'),
+  definition('power_per_volume', ['power', 'liquid_volume'], (p, v) => p! / v!, 'P/V = power/liquid_volume'),
   definition('power_per_volume', ['power_per_mass', 'density'], (p, rho) => p! * rho!, 'P/V = (P/m) rho'),
   definition('power_per_mass', ['power', 'density', 'liquid_volume'], (p, rho, v) => p! / (rho! * v!), 'P/m = P/(rho V)'),
   definition('power_per_mass', ['power_per_volume', 'density'], (p, rho) => p! / rho!, 'P/m = (P/V)/rho'),

@@ -18,7 +18,7 @@ export const gassedPower: Rule = {
   from: ['power_ungassed', 'gas_velocity', 'vessel_diameter', 'rotation_speed', 'impeller_diameter', 'liquid_volume'],
   of: (p, u, vessel, n, d, v) => p! * Math.min(1, gassedShare((Math.PI / 4) * vessel! * vessel! * u!, n!, d!, v!)),
   formula: 'P = P_0 min(1, 0.10 (Q/(N V))^(-1/4) (N^2 d^4/(g W V^(2/3)))^(-1/5)), W = d/5',
-  source: 'Hughmark 1980, Ind. Eng. Chem. Process Des. Dev. 19, 638',
+  source: 'Hughmark 1980, Ind. Eng. Chem. Process Des. Dev. 19, 638 (constants from memory)',
   accuracy: { source: 'model: gassed power of a disk turbine (Hughmark 1980)', share: 0.12 },
   assumes: says.gassedTurbine,
 };
