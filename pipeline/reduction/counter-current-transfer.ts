@@ -11,7 +11,7 @@ const gasSide = (settings: Settings): boolean => settingOf(counterCurrentTransfe
  * Overall transfer units of one stream in counter flow with another, both dilute, straight equilibrium line: Colburn 1939. `ratio` = slope times own over other flow,
  * `share` = (c_out - c*)/(c_in - c*) with c* in equilibrium with the other stream as it enters.
  */
-export function counterCurrentUnits(share: number, ratio: number): number {
+function counterCurrentUnits(share: number, ratio: number): number {
   const r = 1 - ratio;
   // ln((1 - S)/share + S)/(1 - S) = ln(1 + (1 - S)(1/share - 1))/(1 - S)
   const x = r * (1 / share - 1);

@@ -11,7 +11,7 @@ const water = (settings: Settings): boolean => settingOf(evaporation, settings, 
 const source = 'definition';
 
 /** ln((p - p_b)/(p - p_s)) over (p_s - p_b)/p: how much more is carried than by diffusion alone, Stefan 1874. */
-export function highFluxFactor(surface: number, bulk: number, total: number): number {
+function highFluxFactor(surface: number, bulk: number, total: number): number {
   const x = (surface - bulk) / (total - surface);
   return x === 0 ? total / (total - bulk) : (Math.log1p(x) * total) / (surface - bulk);
 }

@@ -8,7 +8,7 @@ import { plainContext } from './route.ts';
 import { seriesResistanceRules, sideOf } from './series-resistance.ts';
 
 /** Names that an embedded law uses beside its own. */
-export const otherSideNames = {
+const otherSideNames = {
   response: 'U',
   scale: 'side_conductance',
   campaign: 'campaign_number',
@@ -16,7 +16,7 @@ export const otherSideNames = {
 } as const;
 
 /** Number of a trial's campaign, from 1; an input that the observations supply. */
-export const campaignNumberKey: Key = 'campaign_number';
+const campaignNumberKey: Key = 'campaign_number';
 
 /** A law of one side written as a law of the overall coefficient, with what its names mean and the rules for what is new in it. */
 export interface OtherSideLaw {

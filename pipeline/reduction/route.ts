@@ -44,7 +44,7 @@ export interface Need {
 }
 
 /** A number a route works with that is no quantity of the study file: how it is printed. */
-export interface RouteNumber {
+interface RouteNumber {
   readonly unit: string;
   readonly symbol: string;
   readonly says: string;

@@ -16,8 +16,6 @@ import { seriesResistance, thenSeriesResistance } from './series-resistance.ts';
 import { sphereCooling } from './sphere-cooling.ts';
 import { vesselHeating } from './vessel-heating.ts';
 
-export type { Route, RouteContext, Settings } from './route.ts';
-
 const list: readonly Route[] = [
   thenSeriesResistance(measured),
   heatRate,

@@ -11,7 +11,7 @@ import { rateAt, rateKeys, relaxation } from './series/relaxation.ts';
 const flowing = (settings: Settings): boolean => settingOf(vesselHeating, settings, 'jacket') === 'flowing';
 
 /** Heat to contents and equipment is G (T_j - T) - G_l (T - T_a) - Q_l, T from start to end in t. Solved for the conductance G, W/K. */
-export function conductance(
+function conductance(
   capacity: number,
   start: number,
   end: number,

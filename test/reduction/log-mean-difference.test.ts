@@ -131,8 +131,16 @@ describe('two streams', () => {
   test('the weighted duty leans to the stream that is known better', () => {
     // u_own = 1 % of flow, u_other = 3 %: weights by inverse variance 1/125.4^2 and 1/(0.03*13376)^2
     const stated = { mass_flow: { share: 0.01 }, mass_flow_other: { share: 0.03 } };
-    const given = { ...streams, mass_flow_other: 0.16, density: 998, density_other: 985 };
+    const given = { ...streams, mass_flow_other: 0.16 };
     const { of } = runRoute('log-mean-difference', { settings: { arrangement: 'counter', duty: 'weighted' }, given, stated });
+    const [p, q] = [1 / 125.4 ** 2, 1 / (0.03 * 13376) ** 2];
+    expect(of('heat_duty')).toBeCloseTo((p * 12540 + q * 13376) / (p + q), 6);
+  });
+
+  test('a volume flow known in its own unit is weighed through the density', () => {
+    const { mass_flow: _, ...rest } = { ...streams, mass_flow_other: 0.16, volume_flow: 2e-4, density: 1000 };
+    const stated = { volume_flow: { si: 2e-6 }, mass_flow_other: { share: 0.03 } };
+    const { of } = runRoute('log-mean-difference', { settings: { arrangement: 'counter', duty: 'weighted' }, given: rest, stated });
     const [p, q] = [1 / 125.4 ** 2, 1 / (0.03 * 13376) ** 2];
     expect(of('heat_duty')).toBeCloseTo((p * 12540 + q * 13376) / (p + q), 6);
   });

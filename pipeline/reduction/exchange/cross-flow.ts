@@ -42,7 +42,7 @@ export function crossFlowUnits(P: number, R: number): number {
 }
 
 /** Transfer units of counter flow at the same effectiveness and capacity ratio. */
-export function counterFlowUnits(P: number, R: number): number {
+function counterFlowUnits(P: number, R: number): number {
   if (!(P > 0 && P < 1 && R * P < 1)) return Number.NaN;
   const r = 1 - R;
   // ln((1 - R P)/(1 - P))/(1 - R), whose limit at R = 1 is P/(1 - P)

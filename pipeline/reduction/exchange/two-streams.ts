@@ -4,7 +4,7 @@ import { wellKnown } from '../checks.ts';
 import { heatLoss, where } from '../defaults.ts';
 import type { RouteContext } from '../route.ts';
 import { type Arrangement, differenceRules } from './differences.ts';
-import { gain, gainVariance, type StreamName, streamKeys } from './duty.ts';
+import { type GainVariance, gain, gainVariance, type StreamName, streamKeys } from './duty.ts';
 
 export type Duty = 'own' | 'other' | 'mean' | 'weighted';
 
@@ -50,8 +50,15 @@ function chosenDuty({ duty, arrangement }: TwoStreams, context: RouteContext): R
 function weightedDuty(gives: Key, from: readonly Key[], towards: (a: number, b: number) => number, context: RouteContext): Rule {
   const own = gainVariance('own', context);
   const other = gainVariance('other', context);
-  const known = !Number.isNaN(own(1, 1, 1, 2, 1)) && !Number.isNaN(other(1, 1, 1, 2, 1));
-  const needs = [...from, 'duty_own', 'duty_other', ...streamKeys('own'), 'density', ...streamKeys('other'), 'density_other'];
+  const known = !Number.isNaN(own.of(1, 1, 1, 2, 1)) && !Number.isNaN(other.of(1, 1, 1, 2, 1));
+  // a density that is not looked at is stood in for by the flow, so that none need be known
+  const density = (name: StreamName, { needsDensity }: GainVariance): Key =>
+    needsDensity ? (name === 'own' ? 'density' : 'density_other') : streamKeys(name)[0];
+  const needs = [
+    ...[...from, 'duty_own', 'duty_other'],
+    ...[...streamKeys('own'), density('own', own)],
+    ...[...streamKeys('other'), density('other', other)],
+  ];
   const source = 'inverse variances, JCGM 100';
   if (!known)
     return {
@@ -66,8 +73,8 @@ function weightedDuty(gives: Key, from: readonly Key[], towards: (a: number, b: 
     gives,
     from: needs,
     of: (a, b, p, q, ...x) => {
-      const wOwn = 1 / own(x[0]!, x[1]!, x[2]!, x[3]!, x[4]!);
-      const wOther = 1 / other(x[5]!, x[6]!, x[7]!, x[8]!, x[9]!);
+      const wOwn = 1 / own.of(x[0]!, x[1]!, x[2]!, x[3]!, x[4]!);
+      const wOther = 1 / other.of(x[5]!, x[6]!, x[7]!, x[8]!, x[9]!);
       return (towards(a!, b!) * (wOwn * p! + wOther * q!)) / (wOwn + wOther);
     },
     formula: 'Q = (Q_own/u_own^2 + Q_other/u_other^2)/(1/u_own^2 + 1/u_other^2)',

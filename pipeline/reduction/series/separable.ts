@@ -126,7 +126,7 @@ function backSubstitute(r: readonly (readonly number[])[], b: readonly number[])
   return x;
 }
 
-export function autocorrelation(x: Float64Array, lag: number): number {
+function autocorrelation(x: Float64Array, lag: number): number {
   const whole = dot(x, x);
   let sum = 0;
   for (let i = lag; i < x.length; i++) sum += x[i]! * x[i - lag]!;

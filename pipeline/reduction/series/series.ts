@@ -7,7 +7,7 @@ export interface Curve {
 }
 
 /** A reading with its standard uncertainty (random, k = 1) as found in the curve itself. */
-export interface CurveReading {
+interface CurveReading {
   readonly value: number;
   readonly u: number;
 }
