@@ -9,6 +9,9 @@ const APART = 1e-9;
 /** Numbers spread over (0, 1) without a pattern that laws could share (golden-ratio sequence). */
 const spread = (k: number): number => (0.5 + k * 0.6180339887498949) % 1;
 
+/** Every other point near one, the rest over six decades, so that both branches of a piecewise law are met. */
+const pointAt = (i: number, share: number): number => (i % 2 === 0 ? 0.5 + 2 * share : 10 ** (6 * share - 2));
+
 /**
  * Parameters that no data could tell apart, such as C and D of `C * D * Re^a`: the columns d f/d parameter are linearly dependent at points without pattern.
  * Empty where all can be told apart. A law that has no value at any such point is left to the data.
@@ -19,9 +22,10 @@ export function inseparable(form: Form): readonly string[] {
   const theta = Object.fromEntries(constants.map((name, k) => [name, 0.3 + spread(k + 1)]));
   const columns: number[][] = constants.map(() => []);
   for (let i = 0; i < POINTS * 4 && columns[0]!.length < POINTS; i++) {
-    const at = Object.fromEntries(groups.map((name, k) => [name, 0.5 + 2 * spread(7 * i + 3 * k + 2)]));
+    const at = Object.fromEntries(groups.map((name, k) => [name, pointAt(i, spread(7 * i + 3 * k + 2))]));
     const row = slopes.map((slope) => evaluate(slope, at, theta));
-    if (row.every(Number.isFinite)) for (const [k, value] of row.entries()) columns[k]!.push(value);
+    const size = Math.max(...row.map(Math.abs));
+    if (size > 0 && row.every(Number.isFinite)) for (const [k, value] of row.entries()) columns[k]!.push(value / size);
   }
   if (columns[0]!.length < POINTS) return [];
   const dependent = firstDependent(columns);

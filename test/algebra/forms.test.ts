@@ -46,6 +46,10 @@ describe.each(laws)('%s', (text) => {
   });
 });
 
+test('a piecewise law whose branches meet far from one is no fault', () => {
+  expect(form('Sh = max(A, C * Re^a) * Sc^c').constants).toEqual(['A', 'C', 'a', 'c']);
+});
+
 test('1/3 is printed as the fraction it is, one half as a number', () => {
   expect(exprText(form('Nu = C * Re^0.5 * Pr^(1/3)').tree)).toBe('C * Re^0.5 * Pr^(1/3)');
 });
