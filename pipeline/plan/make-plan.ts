@@ -3,7 +3,7 @@ import type { Note } from '../base/message.ts';
 import { nearest } from '../base/nearest.ts';
 import * as says from '../base/says/plan.ts';
 import { groupRules } from '../groups/groups.ts';
-import { derivedRules } from '../rules/derived/derived-rules.ts';
+import { derivedRulesFor } from '../rules/derived/derived-rules.ts';
 import { type RuleBook, resolve, rootsOfMissing, ruleBook } from '../rules/resolve.ts';
 import type { Input, Key, Missing, Recipe, Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
@@ -49,7 +49,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanI
     ...groups.rules,
     ...(coefficient?.rules ?? []),
     ...fluids,
-    ...derivedRules,
+    ...derivedRulesFor(study.equipment.is),
     ...groupRules,
   ];
   const canHave = haver(ruleBook(base), inputs);
