@@ -1,29 +1,59 @@
 /** The page's style: quiet, one accent, printable, dark scheme respected. */
 export const style = `
-:root{--ink:#16191d;--quiet:#59626c;--faint:#b9c0c7;--grid:#e6e9ec;--accent:#0a6a74;--band:#cfe3e4;--warm:#a4471c;--page:#fff}
-@media (prefers-color-scheme:dark){:root{--ink:#e9ecef;--quiet:#a7b0b9;--faint:#5c656e;--grid:#2a3036;--accent:#5cc3cc;--band:#1d3f43;--warm:#f0a07c;--page:#14171a}}
+:root{color-scheme:light dark;--ink:#16191d;--quiet:#59626c;--faint:#868f98;--grid:#e6e9ec;--accent:#0a6a74;--band:#cfe3e4;--warm:#a4471c;--page:#fff}
+@media screen and (prefers-color-scheme:dark){:root{--ink:#e9ecef;--quiet:#a7b0b9;--faint:#7b848d;--grid:#2a3036;--accent:#5cc3cc;--band:#1d3f43;--warm:#f0a07c;--page:#14171a}}
 *{box-sizing:border-box}
-body{margin:0 auto;max-width:64rem;padding:2rem 1.25rem 5rem;background:var(--page);color:var(--ink);font:16px/1.55 system-ui,sans-serif}
-h1{font-size:1.6rem;line-height:1.25;margin:0 0 .3rem}
-h2{font-size:1.25rem;margin:3.2rem 0 .6rem;padding-top:1rem;border-top:1px solid var(--grid)}
-h3{font-size:1rem;margin:1.6rem 0 .4rem}
-p{max-width:46rem}
-.lead{font-size:1.08rem}
+html{scroll-padding-top:1rem}
+body{margin:0 auto;max-width:66rem;padding:2.5rem 1.5rem 6rem;background:var(--page);color:var(--ink);font:16px/1.55 system-ui,sans-serif;overflow-wrap:anywhere}
+h1{font-size:1.7rem;line-height:1.25;margin:0 0 .3rem}
+h2{font-size:1.3rem;line-height:1.3;margin:4rem 0 .7rem}
+h3{font-size:1rem;margin:2rem 0 .4rem}
+p,li{max-width:46rem}
+.lead{font-size:1.1rem}
 .fine,figcaption,caption{color:var(--quiet);font-size:.9rem}
-nav a{margin-right:1rem}
+nav ol{list-style:none;display:flex;flex-wrap:wrap;gap:.2rem 1.4rem;padding:0;margin:1rem 0 0}
 a{color:var(--accent)}
-figure{margin:1.2rem 0;break-inside:avoid}
-figure svg{max-width:100%;height:auto;display:block}
-.wide{overflow-x:auto}
-table{border-collapse:collapse;font-size:.9rem;min-width:100%}
-caption{text-align:left;padding:.3rem 0}
-th,td{text-align:left;padding:.32rem .7rem .32rem 0;border-bottom:1px solid var(--grid);vertical-align:top}
+figure{margin:1.8rem 0;max-width:100%}
+figcaption{max-width:46rem;margin-top:.4rem}
+.picture{overflow-x:auto}
+.picture svg{display:block;max-width:100%;height:auto;min-width:min(100%,26rem)}
+.pair{display:flex;flex-wrap:wrap;gap:0 2.5rem}
+.half{flex:1 1 24rem;max-width:28rem}
+.wide{overflow-x:auto;margin:1.4rem 0}
+table{border-collapse:collapse;font-size:.9rem;line-height:1.4;min-width:100%}
+caption{text-align:left;padding:.3rem 0;caption-side:top}
+th,td{text-align:left;padding:.34rem 1.1rem .34rem 0;border-bottom:1px solid var(--grid);vertical-align:top;min-width:3.5rem;max-width:24rem;overflow-wrap:break-word}
+thead th{border-bottom-color:var(--faint);vertical-align:bottom}
 th{font-weight:600}
-td.n,th.n{text-align:right;font-variant-numeric:tabular-nums;white-space:nowrap}
-.law{overflow-x:auto;padding:.6rem 0;font:1.1rem/1.5 ui-monospace,monospace;overflow-wrap:anywhere}
-.warnings{border-left:3px solid var(--warm);padding:.1rem 0 .1rem 1rem}
-.warnings li{max-width:46rem}
-.sign td{height:2.4rem;min-width:10rem}
+td.n,th.n{text-align:right;font-variant-numeric:tabular-nums}
+td.n{white-space:nowrap}
+.formula,.law,.hash{font-family:ui-monospace,monospace;font-size:.95em}
+.hash{overflow-wrap:anywhere}
+.law{overflow-x:auto;padding:.8rem 0;font-size:1.1rem;line-height:1.6}
+.warnings{border-left:3px solid var(--warm);padding:.1rem 0 .1rem 1.2rem;margin:1.6rem 0}
+.warnings h3{margin-top:.4rem}
+.notes{padding-left:1.2rem}
+.sign td{height:2.6rem;min-width:11rem}
+details{margin:1.4rem 0}
+summary{cursor:pointer;color:var(--accent)}
 :focus-visible{outline:2px solid var(--accent);outline-offset:2px}
-@media print{body{max-width:none;padding:0;font-size:10.5pt}nav{display:none}thead{display:table-header-group}tr,figure{break-inside:avoid}h2,h3{break-after:avoid}.wide{overflow:visible}}
+[hidden]{display:none!important}
+@media print{
+:root{color-scheme:light}
+@page{size:A4;margin:16mm 15mm}
+body{max-width:none;padding:0;font-size:10pt}
+h2{margin-top:9mm}
+nav,.live,.controls{display:none!important}
+thead{display:table-header-group}
+tr,figure,.warnings,.sign{break-inside:avoid}
+h2,h3,caption{break-after:avoid}
+.lead{break-before:avoid}
+.wide,.picture,.law{overflow:visible}
+.wide table{font-size:8pt}
+th,td{padding-right:.6rem;min-width:0}
+td.n{white-space:normal}
+details::details-content{content-visibility:visible}
+a{color:inherit;text-decoration:none}
+.half{flex:1 1 45%;max-width:48%}
+}
 `;

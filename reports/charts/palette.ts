@@ -2,11 +2,12 @@
 export const palette = {
   ink: '#16191d',
   quiet: '#59626c',
-  faint: '#b9c0c7',
+  faint: '#868f98',
   grid: '#e6e9ec',
   accent: '#0a6a74',
   band: '#cfe3e4',
   warm: '#a4471c',
+  page: '#ffffff',
 } as const;
 
 /** Colour -> variable of the page's style. */
@@ -14,12 +15,18 @@ export const variables: Readonly<Record<string, string>> = Object.fromEntries(
   Object.entries(palette).map(([name, colour]) => [colour, `var(--${name})`]),
 );
 
-/** Config that all charts share: quiet axes, text at one size, no frame. */
+/** The same picture with its colours as variables of the page. */
+export const inPageColours = (text: string): string =>
+  Object.entries(variables).reduce((all, [colour, variable]) => all.replaceAll(`"${colour}"`, `"${variable}"`), text);
+
+/** Config that all charts share: quiet axes, text at one size, no frame; the page gives each picture its text alternative. */
 export const config = {
   background: 'transparent',
   font: 'system-ui, sans-serif',
   view: { stroke: null },
+  mark: { aria: false },
   axis: {
+    aria: false,
     labelColor: palette.quiet,
     titleColor: palette.ink,
     titleFontWeight: 'normal',
@@ -29,10 +36,8 @@ export const config = {
     labelFontSize: 12,
     titleFontSize: 13,
     labelOverlap: 'greedy',
-    minExtent: 38,
     titlePadding: 8,
   },
-  header: { labelColor: palette.ink, titleColor: palette.ink },
   text: { fontSize: 12, color: palette.quiet },
 } as const;
 

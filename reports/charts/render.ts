@@ -1,6 +1,6 @@
 import * as vega from 'vega';
 import { compile, type TopLevelSpec } from 'vega-lite';
-import { type Spec, variables } from './palette.ts';
+import { inPageColours, type Spec } from './palette.ts';
 
 /** A chart as static SVG for the page, its colours as variables. Throws where the compiler warns: a chart with a warning is a defect. */
 export async function svgOf(spec: Spec, name: string): Promise<string> {
@@ -16,9 +16,7 @@ export async function svgOf(spec: Spec, name: string): Promise<string> {
   const svg = await view.toSVG();
   view.finalize();
   if (warnings.length > 0) throw new Error(`chart ${name}: ${warnings.join('; ')}`);
-  return Object.entries(variables)
-    .reduce((text, [colour, variable]) => text.replaceAll(`"${colour}"`, `"${variable}"`), svg)
-    .replace(/<svg /, '<svg role="presentation" focusable="false" ');
+  return inPageColours(svg).replace(/<svg /, '<svg role="presentation" focusable="false" ');
 }
 
 /** Numbering of gradients and clips starts anew for each report, so that the same result gives the same bytes. */

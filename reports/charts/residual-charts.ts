@@ -1,73 +1,143 @@
 import type { Fit } from '../../pipeline/regression/fit.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
+import { type Axis, along, axisFrom, axisOver, NUMBERS_EXTENT } from './axis.ts';
+import { axisTitle } from './labels.ts';
 import { config, palette, SCHEMA, type Spec } from './palette.ts';
+import { isDrawn, pickedTrial, shared, trialDots } from './trials.ts';
 
-/** Measured against fitted, with the line of equality. */
-export function parityChart(result: StudyResult, fit: Fit, response: string): Spec {
-  const column = result.columns.findIndex((one) => one.key === result.response.key);
-  const values = result.trials.map((trial, i) => ({
-    trial: trial.trial,
-    fitted: fit.diagnostics.fitted[i]!,
-    measured: trial.values[column]!,
-  }));
-  const log = fit.scale === 'relative';
-  const all = values.flatMap((one) => [one.fitted, one.measured]).filter((one) => Number.isFinite(one) && (!log || one > 0));
-  const [low, high] = [Math.min(...all), Math.max(...all)];
-  const scale = {
-    type: log ? 'log' : 'linear',
-    nice: false,
-    zero: false,
-    domain: log ? [low / 1.1, high * 1.1] : [low - 0.05 * (high - low), high + 0.05 * (high - low)],
-  };
-  const at = (field: string, title: string) => ({
-    field,
-    type: 'quantitative',
-    scale: log ? { type: 'log', nice: false, domain: scale.domain } : scale,
-    title,
-    axis: { tickCount: 5, format: '~g' },
-  });
-  const ends = scale.domain.map((v) => ({ fitted: v, measured: v }));
+interface Dot {
+  readonly row: number;
+  readonly trial: string;
+  readonly campaign: string;
+  readonly x: number;
+  readonly y: number;
+}
+
+const WIDTH = 320;
+
+/** Dots of the trials over two axes, with lines behind them. */
+function dotsChart(
+  dots: readonly Dot[],
+  { x, y, height }: { readonly x: Axis; readonly y: Axis; readonly height: number },
+  behind: readonly unknown[],
+  front: readonly unknown[] = [],
+): Spec {
+  const at = { x: along('x', x), y: along('y', y, NUMBERS_EXTENT) };
+  const tooltip = [
+    { field: 'x', type: 'quantitative', title: x.title, format: '.4g' },
+    { field: 'y', type: 'quantitative', title: y.title, format: '.4g' },
+  ];
   return {
     $schema: SCHEMA,
-    width: 380,
-    height: 320,
+    width: WIDTH,
+    height,
     config,
-    layer: [
-      {
-        data: { values: ends },
-        mark: { type: 'line', color: palette.faint },
-        encoding: { x: at('fitted', `fitted ${response}`), y: at('measured', `measured ${response}`) },
-      },
-      {
-        data: { values },
-        mark: { type: 'point', filled: true, color: palette.ink, size: 34, opacity: 1 },
-        encoding: { x: at('fitted', `fitted ${response}`), y: at('measured', `measured ${response}`) },
-      },
-    ],
+    params: shared,
+    datasets: { trials: dots },
+    layer: [...behind, trialDots('trials', at, dots.length, tooltip), ...front, ...pickedTrial('trials', at)],
   };
 }
 
-/** Studentised residuals against the fitted value, with the lines of two standard deviations. */
-export function residualChart(_result: StudyResult, fit: Fit, log: boolean): Spec {
-  const values = fit.diagnostics.studentised
-    .map((r, i) => ({ r, fitted: fit.diagnostics.fitted[i]! }))
-    .filter((one) => Number.isFinite(one.r) && Number.isFinite(one.fitted));
-  const x = {
-    field: 'fitted',
-    type: 'quantitative',
-    scale: log ? { type: 'log', nice: false } : { zero: false },
-    title: `fitted ${fit.form.response}`,
-    axis: { tickCount: 5, format: '~g' },
+/** One dot for each trial where both numbers exist (and are above zero, on logarithmic axes). */
+function dotsOf(result: StudyResult, x: (row: number) => number, y: (row: number) => number, log = false): readonly Dot[] {
+  return result.trials.flatMap(({ trial, campaign }, row) => {
+    const one = { row, trial, campaign, x: x(row), y: y(row) };
+    return isDrawn(one.x, one.y) && (!log || (one.x > 0 && one.y > 0)) ? [one] : [];
+  });
+}
+
+/** Measured against fitted, with the line of equality and those of 20 % either way. */
+export function parityChart(result: StudyResult, fit: Fit): Spec {
+  const column = result.columns.findIndex((one) => one.key === result.response.key);
+  const log = fit.scale === 'relative';
+  const dots = dotsOf(
+    result,
+    (row) => fit.diagnostics.fitted[row] ?? Number.NaN,
+    (row) => result.trials[row]!.values[column] ?? Number.NaN,
+    log,
+  );
+  const name = axisTitle(fit.form.response, result.columns);
+  const { domain } = axisOver(
+    dots.flatMap((one) => [one.x, one.y]),
+    '',
+    log,
+    0.06,
+  );
+  const [x, y] = [axisFrom(domain, `fitted ${name}`, log), axisFrom(domain, `measured ${name}`, log)];
+  const line = (factor: number, strokeDash: readonly number[]) => ({
+    data: { values: domain.map((v) => ({ x: v, y: v * factor })) },
+    mark: { type: 'line', color: palette.faint, strokeWidth: 1, strokeDash, clip: true },
+    encoding: { x: along('x', x), y: along('y', y, NUMBERS_EXTENT) },
+  });
+  return dotsChart(dots, { x, y, height: WIDTH }, [line(1, [1, 0]), ...(log ? [line(1.2, [4, 4]), line(1 / 1.2, [4, 4])] : [])]);
+}
+
+/** Studentised residuals against anything, with the lines of none and of two standard deviations. */
+function residualChart(result: StudyResult, fit: Fit, x: (row: number) => number, title: string, log: boolean): Spec {
+  const dots = dotsOf(result, x, (row) => fit.diagnostics.studentised[row] ?? Number.NaN).filter((one) => !log || one.x > 0);
+  const across = axisOver(
+    dots.map((one) => one.x),
+    title,
+    log,
+    0.06,
+  );
+  const up = axisOver([-2.6, 2.6, ...dots.map((one) => one.y)], 'studentised residual', false, 0.05);
+  const rule = (value: number, strokeDash: readonly number[]) => ({
+    data: { values: [{ y: value }] },
+    mark: { type: 'rule', color: palette.faint, strokeDash },
+    encoding: { y: along('y', up, NUMBERS_EXTENT) },
+  });
+  return dotsChart(dots, { x: across, y: up, height: 190 }, [rule(0, [1, 0]), rule(2, [4, 4]), rule(-2, [4, 4])]);
+}
+
+/** Residuals against one group of the law. */
+export function residualsAgainst(result: StudyResult, fit: Fit, group: string): Spec {
+  const column = result.columns.findIndex((one) => one.key === fit.groups[group]);
+  return residualChart(
+    result,
+    fit,
+    (row) => result.trials[row]!.values[column] ?? Number.NaN,
+    axisTitle(group, result.columns),
+    fit.scale === 'relative',
+  );
+}
+
+/** Residuals in the order of the table of trials. */
+export const residualsInOrder = (result: StudyResult, fit: Fit): Spec =>
+  residualChart(result, fit, (row) => row + 1, 'order in the table of trials', false);
+
+/** Residuals against the fitted value. */
+export const residualsAgainstFitted = (result: StudyResult, fit: Fit): Spec =>
+  residualChart(
+    result,
+    fit,
+    (row) => fit.diagnostics.fitted[row] ?? Number.NaN,
+    `fitted ${axisTitle(fit.form.response, result.columns)}`,
+    fit.scale === 'relative',
+  );
+
+const NAMED = 3;
+
+/** Leverage against residual: far right and far from zero moves the law most; the three trials with the largest Cook's distance are named. */
+export function leverageChart(result: StudyResult, fit: Fit): Spec {
+  const dots = dotsOf(
+    result,
+    (row) => fit.diagnostics.leverage[row] ?? Number.NaN,
+    (row) => fit.diagnostics.studentised[row] ?? Number.NaN,
+  );
+  const cook = (one: Dot): number => fit.diagnostics.cook[one.row] ?? 0;
+  const named = [...dots].sort((a, b) => cook(b) - cook(a)).slice(0, dots.length > 6 ? NAMED : 0);
+  const x = axisOver([0, ...dots.map((one) => one.x)], 'leverage (share of its own information that a trial takes)', false, 0.08);
+  const y = axisOver([-2.6, 2.6, ...dots.map((one) => one.y)], 'studentised residual', false, 0.05);
+  const names = {
+    data: { values: named },
+    mark: { type: 'text', dy: -11, color: palette.quiet, limit: 110 },
+    encoding: { x: along('x', x), y: along('y', y, NUMBERS_EXTENT), text: { field: 'trial', type: 'nominal' } },
   };
-  const y = { field: 'r', type: 'quantitative', title: 'studentised residual' };
-  return {
-    $schema: SCHEMA,
-    width: 380,
-    height: 240,
-    config,
-    layer: [
-      { data: { values: [{ r: -2 }, { r: 0 }, { r: 2 }] }, mark: { type: 'rule', color: palette.faint }, encoding: { y } },
-      { data: { values }, mark: { type: 'point', filled: true, color: palette.ink, size: 34, opacity: 1 }, encoding: { x, y } },
-    ],
+  const zero = {
+    data: { values: [{ y: 0 }] },
+    mark: { type: 'rule', color: palette.faint },
+    encoding: { y: along('y', y, NUMBERS_EXTENT) },
   };
+  return dotsChart(dots, { x, y, height: 240 }, [zero], [names]);
 }

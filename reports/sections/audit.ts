@@ -1,15 +1,91 @@
+import type { AuditRow } from '../../pipeline/audit/verdict.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
-import { html, type Markup } from '../html.ts';
+import { type Pictures, picturesOf } from '../figure.ts';
+import { type Child, html, type Markup } from '../html.ts';
 import { percent, percentOfLn, plainNumber, withInterval } from '../numbers.ts';
+import * as says from '../says/sections.ts';
+import { columns, table } from '../table.ts';
+import { notesOf, section } from './section.ts';
 
 /** Why not a published one? */
-export function audit(result: StudyResult): Markup {
+export function audit(result: StudyResult, pictures: Pictures): Markup {
   const found = result.audit;
-  if (found === null)
-    return html`<section id="audit"><h2>Why not a published one?</h2><p>The study asks for no comparison with published correlations.</p></section>`;
-  return html`<section id="audit"><h2>Why not a published one?</h2><p class="lead">${found.says}</p>
-<div class="wide"><table><caption>Published correlations against the trials, tolerance ${percent(found.tolerance)}; bias is measured over predicted</caption><thead><tr><th scope="col">correlation</th><th scope="col">verdict</th><th scope="col" class="n">in range</th><th scope="col" class="n">bias</th><th scope="col" class="n">scatter</th><th scope="col" class="n">rig factor</th><th scope="col" class="n">error on left-out trials, as published</th><th scope="col" class="n">with factor</th><th scope="col" class="n">fitted law, same trials</th></tr></thead><tbody>
-${found.rows.map((row) => html`<tr><th scope="row">${row.authors} (${row.year})${row.basis === 'analogy' ? ', by analogy' : ''}${row.reads === 'mean line' ? '' : `, ${row.reads}`}<br><span class="fine">${row.text}</span></th><td>${row.verdict}<br><span class="fine">${row.why}</span></td><td class="n">${row.nInRange} of ${row.n}</td><td class="n">${plainNumber(row.bias)}</td><td class="n">${percentOfLn(row.scatterLn)}</td><td class="n">${Number.isFinite(row.rigFactor) ? withInterval(row.rigFactor, row.rigFactorLower, row.rigFactorUpper) : ''}</td><td class="n">${percentOfLn(row.cvRmsLnAsPublished)}</td><td class="n">${percentOfLn(row.cvRmsLnWithFactor)}</td><td class="n">${percentOfLn(row.cvRmsLnFittedLaw)}</td></tr>`)}
-</tbody></table></div>
-${found.notes.map((note) => html`<p class="fine">${note.text}</p>`)}</section>`;
+  if (found === null) return section('audit', says.noAudit(), notesOf(result, 'audit'));
+  const compared = found.rows.filter((row) => row.verdict !== 'not comparable');
+  const others = found.rows.filter((row) => row.verdict === 'not comparable');
+  return section(
+    'audit',
+    found.rows.length === 0 ? says.noRows() : found.says,
+    html`${picturesOf(pictures, 'audit-bias')}
+${compared.length > 0 && html`${verdicts(compared, found.tolerance)}<p class="fine">${says.measuredOver()}</p>${ranges(compared)}`}
+${others.length > 0 && lacking(others)}
+${found.notes.map((note) => html`<p class="fine">${note.text}</p>`)}
+${notesOf(result, 'audit', (note) => found.notes.some((one) => one.text === note.text))}`,
+  );
 }
+
+/** Who, with all that changes how the line reads. */
+const who = (row: AuditRow): Markup =>
+  html`${row.authors} (${row.year})${row.basis === 'analogy' && ', by analogy'}${row.own && ', your own'}${row.reads !== 'mean line' && `, ${row.reads}`}<br><span class="fine">${row.title}<br><span class="formula">${row.text}</span></span>`;
+
+const number = (value: number, text: (v: number) => string): Child => (Number.isFinite(value) ? text(value) : '–');
+
+const verdicts = (rows: readonly AuditRow[], tolerance: number): Markup =>
+  table(
+    `Published correlations against the trials; tolerance ${percent(tolerance)}`,
+    columns(
+      'correlation',
+      'verdict',
+      '#in range',
+      '#bias',
+      '#scatter',
+      '#rig factor',
+      '#error on left-out trials: as published',
+      '#with factor',
+      '#fitted law',
+    ),
+    rows.map((row) => [
+      who(row),
+      html`${row.verdict}<br><span class="fine">${row.why}</span>`,
+      `${row.nInRange} of ${row.n}`,
+      number(row.bias, plainNumber),
+      number(row.scatterLn, percentOfLn),
+      number(row.rigFactor, (v) => withInterval(v, row.rigFactorLower, row.rigFactorUpper)),
+      number(row.cvRmsLnAsPublished, percentOfLn),
+      number(row.cvRmsLnWithFactor, percentOfLn),
+      number(row.cvRmsLnFittedLaw, percentOfLn),
+    ]),
+  );
+
+/** Ranges, trends and what each claims for itself: the fine print of the comparison. */
+const ranges = (rows: readonly AuditRow[]): Markup =>
+  table(
+    'Their ranges, trends and sources',
+    columns(
+      'correlation',
+      'limits, and trials inside',
+      'trend of measured over predicted',
+      '#within 20 %',
+      '#within 30 %',
+      'stated accuracy',
+      'source',
+    ),
+    rows.map((row) => [
+      `${row.authors} (${row.year})`,
+      row.limits.length === 0 ? 'none stated' : row.limits.map((limit) => `${limit.says}: ${limit.inside} of ${row.n}`).join('; '),
+      row.trends.length === 0
+        ? '–'
+        : row.trends.map((one) => `${one.group}: power ${withInterval(one.slope, one.lower, one.upper)}`).join('; '),
+      number(row.within20, percent),
+      number(row.within30, percent),
+      row.accuracy,
+      row.source,
+    ]),
+  );
+
+const lacking = (rows: readonly AuditRow[]): Markup =>
+  html`<h3>${says.notCompared()}</h3>${table(
+    says.notCompared(),
+    columns('correlation', 'what it lacks here', 'why'),
+    rows.map((row) => [who(row), row.lacks.join(', ') || '–', row.why]),
+  )}`;

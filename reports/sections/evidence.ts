@@ -1,29 +1,97 @@
-import type { StudyResult } from '../../pipeline/results/study-result.ts';
+import type { Fit } from '../../pipeline/regression/fit.ts';
+import type { Identifiability, StudyResult } from '../../pipeline/results/study-result.ts';
+import { MOST_CURVES } from '../charts/series-charts.ts';
+import { type Pictures, picturesOf } from '../figure.ts';
 import { html, type Markup } from '../html.ts';
-import { percent, percentOfLn, plainNumber } from '../numbers.ts';
+import { chosenFit } from '../law-text.ts';
+import { percent, percentOfLn, plainNumber, roundedLike } from '../numbers.ts';
+import * as says from '../says/sections.ts';
+import { columns, table } from '../table.ts';
+import { notesOf, section } from './section.ts';
 
 /** Can these trials tell that? */
-export function evidence(result: StudyResult, pictures: ReadonlyMap<string, Markup>): Markup {
+export function evidence(result: StudyResult, pictures: Pictures): Markup {
+  const fit = chosenFit(result);
   const own = result.identifiability.find((one) => one.law === result.chosen);
-  const notes = result.notes.filter((note) => note.section === 'evidence');
+  return section(
+    'evidence',
+    (own?.says ?? []).join(' ') || says.noGroups(),
+    html`${notesOf(result, 'evidence')}
+<div class="pair">${picturesOf(pictures, 'parity')}${picturesOf(pictures, 'leverage')}${picturesOf(pictures, 'residual')}</div>
+${fit?.statedUncertainty !== undefined && html`<p>${says.statedUncertainty(plainNumber(fit.statedUncertainty.chiSquared), plainNumber(fit.statedUncertainty.degreesOfFreedom), plainNumber(fit.statedUncertainty.above, 2))}</p>`}
+${picturesOf(pictures, 'influence')}
+${fit !== undefined && influence(result, fit)}
+${laws(result)}
+${own !== undefined && identifiability(own)}
+${picturesOf(pictures, 'budget')}
+${budgets(result)}
+${picturesOf(pictures, 'interval-methods')}
+${fit !== undefined && methods(result, fit)}
+<div class="pair">${picturesOf(pictures, 'series')}</div>
+${result.series.length > MOST_CURVES && html`<p class="fine">${says.notDrawn(result.series.length - MOST_CURVES)}</p>`}`,
+  );
+}
+
+function influence(result: StudyResult, fit: Fit): Markup | false {
+  const names = fit.parameters.filter((one) => !one.fixed).map((one) => one.name);
+  if (result.influence.length === 0 || names.length === 0) return false;
+  const shown = (name: string, value: number): string => {
+    const one = fit.parameters.find((parameter) => parameter.name === name)!;
+    return Number.isFinite(value) ? roundedLike(value, one.estimate, one.lower, one.upper) : plainNumber(value);
+  };
+  return table(
+    'The law without a campaign or an influential trial',
+    columns('without', ...names.map((name) => `#${name}`)),
+    result.influence.map((row) => [`${row.kind} ${row.left}`, ...names.map((name) => shown(name, row.values[name] ?? Number.NaN))]),
+  );
+}
+
+function laws(result: StudyResult): Markup {
   const relative = result.options.error === 'relative';
-  const names = Object.keys(result.influence[0]?.values ?? {});
-  return html`<section id="evidence"><h2>Can these trials tell that?</h2><p class="lead">${(own?.says ?? []).join(' ') || 'The law has no groups that vary.'}</p>
-<ul>${notes.map((note) => html`<li>${note.level === 'warning' ? html`<strong>Warning.</strong> ` : ''}${note.text}</li>`)}</ul>
-<figure>${pictures.get('parity')}<figcaption>Measured against fitted; the line is equality.</figcaption></figure>
-<figure>${pictures.get('residuals')}<figcaption>Studentised residuals; beyond the outer lines one trial in twenty is expected.</figcaption></figure>
-<div class="wide"><table><caption>Laws compared</caption><thead><tr><th scope="col">law</th><th scope="col" class="n">parameters</th><th scope="col" class="n">AICc</th><th scope="col" class="n">BIC</th><th scope="col" class="n">error on left-out trials</th><th scope="col">remark</th></tr></thead><tbody>
-${result.choice.compared.map((row) => html`<tr><th scope="row">${row.law}</th><td class="n">${row.parameters}</td><td class="n">${plainNumber(row.aicc, 4)}</td><td class="n">${plainNumber(row.bic, 4)}</td><td class="n">${relative ? percentOfLn(row.cvRmsLn) : plainNumber(row.cvRmsLn)}</td><td>${row.says}</td></tr>`)}
-</tbody></table></div>
-<div class="wide"><table><caption>Which source carries the uncertainty of each parameter</caption><thead><tr><th scope="col">parameter</th><th scope="col">sources, largest first</th></tr></thead><tbody>
-${result.budgets.map(
-  (one) =>
-    html`<tr><th scope="row">${one.of}</th><td>${one.shares
-      .slice(0, 6)
-      .map(({ source, kind, share }) => `${source} (${kind}) ${percent(share)}`)
-      .join(', ')}</td></tr>`,
-)}
-</tbody></table></div>
-${names.length > 0 && html`<div class="wide"><table><caption>The law without a campaign or an influential trial</caption><thead><tr><th scope="col">without</th>${names.map((name) => html`<th scope="col" class="n">${name}</th>`)}</tr></thead><tbody>${result.influence.map((row) => html`<tr><th scope="row">${row.kind} ${row.left}</th>${names.map((name) => html`<td class="n">${plainNumber(row.values[name] ?? Number.NaN)}</td>`)}</tr>`)}</tbody></table></div>`}
-</section>`;
+  return table(
+    says.comparedLaws(),
+    columns('law', '#free parameters', '#AICc', '#BIC', '#error on left-out trials', 'remark'),
+    result.choice.compared.map((row) => [
+      row.law,
+      row.parameters,
+      plainNumber(row.aicc, 4),
+      plainNumber(row.bic, 4),
+      relative ? percentOfLn(row.cvRmsLn) : plainNumber(row.cvRmsLn),
+      row.says,
+    ]),
+  );
+}
+
+function identifiability({ law, conditionIndices, proportions, parameters }: Identifiability): Markup | false {
+  if (conditionIndices.length < 2) return false;
+  return html`${table(
+    says.condition(law),
+    columns('#condition index', ...parameters.map((name) => `#${name}`)),
+    conditionIndices.map((index, k) => [plainNumber(index), ...parameters.map((_, j) => percent(proportions[k]?.[j] ?? Number.NaN))]),
+  )}<p class="fine">${says.conditionFine()}</p>`;
+}
+
+const budgets = (result: StudyResult): Markup | false =>
+  result.budgets.length > 0 &&
+  html`<details><summary>All sources of uncertainty in numbers</summary>${table(
+    'Shares of each source in the variance of each parameter',
+    columns('parameter', 'source', 'kind', '#share'),
+    result.budgets.flatMap((budget) => budget.shares.map((one) => [budget.of, one.source, one.kind, percent(one.share)])),
+  )}</details>`;
+
+function methods(result: StudyResult, fit: Fit): Markup | false {
+  const rows = result.intervals.filter((one) => one.law === fit.name);
+  return (
+    rows.length > 0 &&
+    table(
+      'Intervals of the parameters by method',
+      columns('parameter', 'method', '#from', '#to', 'note'),
+      rows.map((row) => {
+        const one = fit.parameters.find((parameter) => parameter.name === row.parameter);
+        const end = (value: number): string =>
+          one === undefined ? plainNumber(value) : roundedLike(value, one.estimate, one.lower, one.upper);
+        return [row.parameter, row.method, end(row.lower), end(row.upper), row.note];
+      }),
+    )
+  );
 }

@@ -1,15 +1,68 @@
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { html, type Markup } from '../html.ts';
+import { plainNumber } from '../numbers.ts';
+import * as says from '../says/sections.ts';
+import { columns, table } from '../table.ts';
+import { prettyUnit } from '../units.ts';
+import { notesOf, section } from './section.ts';
 
 /** How was this computed? */
 export function method(result: StudyResult): Markup {
-  const notes = result.notes.filter((note) => note.section === 'method');
   const { provenance } = result;
-  return html`<section id="method"><h2>How was this computed?</h2>${result.method.statements.map((text) => html`<p>${text}</p>`)}
-<div class="wide"><table><caption>Definitions in force</caption><thead><tr><th scope="col">name</th><th scope="col">definition</th><th scope="col">unit</th><th scope="col">source</th></tr></thead><tbody>${result.columns.map((one) => html`<tr><th scope="row">${one.name}</th><td>${one.text}</td><td>${one.unit}</td><td>${one.source}</td></tr>`)}</tbody></table></div>
-<div class="wide"><table><caption>Inputs and their standard uncertainties (k = 1)</caption><thead><tr><th scope="col">quantity</th><th scope="col">from</th><th scope="col">random</th><th scope="col">systematic</th></tr></thead><tbody>${result.method.inputs.map((one) => html`<tr><th scope="row">${one.key}</th><td>${one.from}</td><td>${one.random}</td><td>${one.systematic}</td></tr>`)}</tbody></table></div>
-${notes.length > 0 && html`<ul>${notes.map((note) => html`<li>${note.text}</li>`)}</ul>`}
-<h3>Sources</h3><ul>${result.method.references.map((text) => html`<li>${text}</li>`)}</ul>
-<p class="fine">Numbers are rounded by JCGM 100:2008, 7.2.6: an uncertainty to two digits, its value to the same place. Version ${provenance.version}, seed ${provenance.seed}, Node ${provenance.node}.</p>
-<div class="wide"><table><caption>Input files</caption><thead><tr><th scope="col">file</th><th scope="col">SHA-256</th></tr></thead><tbody>${provenance.files.map((one) => html`<tr><th scope="row">${one.file}</th><td>${one.sha256}</td></tr>`)}</tbody></table></div></section>`;
+  return section(
+    'method',
+    says.inputLead(provenance.version, provenance.seed),
+    html`${result.method.statements.map((text) => html`<p>${text}</p>`)}
+<p>${says.rounding()}</p>
+${notesOf(result, 'method')}
+${table(
+  'Definitions in force',
+  columns('name', 'definition', 'unit', 'source'),
+  result.columns.map((one) => [one.name, one.text, prettyUnit(one.unit), one.source]),
+)}
+${table(
+  'Inputs and their standard uncertainties (k = 1)',
+  columns('quantity', 'from', 'random', 'systematic'),
+  result.method.inputs.map((one) => [one.key, one.from, one.random || 'none stated', one.systematic || 'none stated']),
+)}
+${
+  result.method.rules.length > 0 &&
+  table(
+    'Formulas in force, in working order',
+    columns('gives', 'formula', 'source'),
+    result.method.rules.map((one) => [one.gives, html`<span class="formula">${one.formula}</span>`, one.source]),
+  )
 }
+${fits(result)}
+${table(
+  'Options in force',
+  columns('option', 'value'),
+  Object.entries(result.options).map(([name, value]) => [
+    name,
+    typeof value === 'number' ? (Number.isNaN(value) ? 'not in force' : String(value)) : value,
+  ]),
+)}
+${result.method.references.length > 0 && html`<h3>Sources</h3><ul>${result.method.references.map((text) => html`<li>${text}</li>`)}</ul>`}
+${table(
+  'Input files',
+  columns('file', 'SHA-256'),
+  provenance.files.map((one) => [one.file, html`<span class="hash">${one.sha256}</span>`]),
+)}
+<p class="fine">Computed on Node ${provenance.node}.</p>`,
+  );
+}
+
+/** Each fit with why it stopped, and its numbers as they are. */
+const fits = (result: StudyResult): Markup =>
+  table(
+    says.fullText(),
+    columns('law', 'at full precision', 'the fit ended', '#trials', '#rms error, ln', '#R²'),
+    result.fits.map((fit) => [
+      fit.name,
+      html`<span class="formula">${fit.text}</span>`,
+      `${fit.stop.why} after ${fit.stop.iterations} iterations (${plainNumber(fit.stop.value)} against ${plainNumber(fit.stop.limit)})`,
+      fit.statistics.n,
+      plainNumber(fit.statistics.rmsLn),
+      plainNumber(fit.statistics.rSquared, 4),
+    ]),
+  );
