@@ -67,9 +67,10 @@ export function withInterval(value: number, lower: number, upper: number): strin
 
 /** `11 %` */
 export const percent = (share: number): string =>
-  Number.isFinite(share)
-    ? `${Math.abs(share) >= 0.0995 ? plainNumber(Math.round(100 * share)) : Number((100 * share).toPrecision(2))} %`
-    : MISSING;
+  Number.isFinite(share) ? `${Math.abs(share) >= 0.0995 ? wholePercent(share) : Number((100 * share).toPrecision(2))} %` : MISSING;
+
+/** Whole percents; a power of ten where there are too many digits. */
+const wholePercent = (share: number): string => (Math.abs(share) < 1e4 ? String(Math.round(100 * share)) : plainNumber(100 * share));
 
 /** A standard deviation of a logarithm as a share: exp(s) - 1; a factor where that is more than doubling. */
 export function percentOfLn(ln: number): string {

@@ -20,16 +20,20 @@ figcaption{max-width:46rem;margin-top:.4rem}
 .pair{display:flex;flex-wrap:wrap;gap:0 2.5rem}
 .half{flex:1 1 24rem;max-width:28rem}
 .wide{overflow-x:auto;margin:1.4rem 0}
-table{border-collapse:collapse;font-size:.9rem;line-height:1.4;min-width:100%}
+table{border-collapse:collapse;font-size:.9rem;line-height:1.4;min-width:min(100%,26rem)}
 caption{text-align:left;padding:.3rem 0;caption-side:top}
 th,td{text-align:left;padding:.34rem 1.1rem .34rem 0;border-bottom:1px solid var(--grid);vertical-align:top;min-width:3.5rem;max-width:24rem;overflow-wrap:break-word}
 thead th{border-bottom-color:var(--faint);vertical-align:bottom}
 th{font-weight:600}
+th .fine,th .formula{font-weight:400}
+.b{min-width:12rem}
 td.n,th.n{text-align:right;font-variant-numeric:tabular-nums}
 td.n{white-space:nowrap}
-.formula,.law,.hash{font-family:ui-monospace,monospace;font-size:.95em}
+.formula,.hash{font-family:ui-monospace,monospace;font-size:.95em}
 .hash{overflow-wrap:anywhere}
-.law{overflow-x:auto;padding:.8rem 0;font-size:1.1rem;line-height:1.6}
+.law{overflow-x:auto;padding:.6rem 0}
+math{font-size:1.35rem}
+math[display=block]{text-align:left;margin:.2rem 0}
 .warnings{border-left:3px solid var(--warm);padding:.1rem 0 .1rem 1.2rem;margin:1.6rem 0}
 .warnings h3{margin-top:.4rem}
 .notes{padding-left:1.2rem}

@@ -74,7 +74,7 @@ export function intervalRows({ axis, marks, band, lines = [], names }: RowsPictu
       ),
       {
         data: { name: 'rows' },
-        mark: { type: 'text', align: 'left', x: { expr: 'width + 10' }, color: palette.quiet, limit: 240 },
+        mark: { type: 'text', align: 'left', x: { expr: 'width + 10' }, color: palette.quiet },
         encoding: { y, text: { field: 'remark', type: 'nominal' } },
       },
     ],

@@ -12,7 +12,7 @@ export const rowPlaces = (count: number, room: number) => ({
 /** Names of the rows, right-aligned beside the plot. Names may repeat: rows are told apart by their number. */
 export const rowNames = (names: readonly string[], room: number) => ({
   data: { values: names.map((name, row) => ({ row, name })) },
-  mark: { type: 'text', align: 'right', x: -10, color: palette.ink, limit: room - 10 },
+  mark: { type: 'text', align: 'right', x: -10, color: palette.ink },
   encoding: { y: rowPlaces(names.length, room), text: { field: 'name', type: 'nominal' } },
 });
 

@@ -41,8 +41,8 @@ export function rangeMap(result: StudyResult): Spec | undefined {
     { group: label(group), x: 1, text: plainNumber(group.to) },
   ]);
   const title = log
-    ? 'place in the tried range, on a logarithmic scale: 0 the lowest trial, 1 the highest'
-    : 'place in the tried range: 0 the lowest trial, 1 the highest';
+    ? 'place in the tried range (logarithmic): 0 lowest trial, 1 highest'
+    : 'place in the tried range: 0 lowest trial, 1 highest';
   const x = axisOver([0, 1, ...cases.map((one) => one.x)], title, false, 0.07);
   const rows = groups.map(label);
   const at = {
@@ -52,12 +52,12 @@ export function rangeMap(result: StudyResult): Spec | undefined {
       type: 'nominal',
       sort: rows,
       title: null,
-      axis: { domain: false, ticks: false, labelFontSize: 13, labelLimit: 160, minExtent: 90 },
+      axis: { domain: false, ticks: false, labelFontSize: 13, labelLimit: 0, minExtent: 90 },
     },
   };
   const text = (data: unknown, dy: number, field: string, color: string) => ({
     data,
-    mark: { type: 'text', dy, color, fontSize: 11, limit: 110 },
+    mark: { type: 'text', dy, color, fontSize: 11 },
     encoding: { ...at, text: { field, type: 'nominal' } },
   });
   const value = { field: 'value', type: 'quantitative', title: 'value', format: '.4g' };

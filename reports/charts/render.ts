@@ -1,6 +1,10 @@
 import * as vega from 'vega';
 import { compile, type TopLevelSpec } from 'vega-lite';
 import { inPageColours, type Spec } from './palette.ts';
+import { measureText } from './text-width.ts';
+
+/** Exported by vega, missing from its types. */
+const metrics = (vega as unknown as { readonly textMetrics: { width: typeof measureText } }).textMetrics;
 
 /** A chart as static SVG for the page, its colours as variables. Throws where the compiler warns: a chart with a warning is a defect. */
 export async function svgOf(spec: Spec, name: string): Promise<string> {
@@ -12,6 +16,7 @@ export async function svgOf(spec: Spec, name: string): Promise<string> {
   const silent = (): typeof logger => logger;
   const logger = { level: silent, warn, info: silent, debug: silent, error: warn } as unknown as vega.LoggerInterface;
   const compiled = compile(spec as unknown as TopLevelSpec, { logger });
+  metrics.width = measureText;
   const view = new vega.View(vega.parse(compiled.spec), { renderer: 'none', logger });
   const svg = await view.toSVG();
   view.finalize();

@@ -127,11 +127,11 @@ export function leverageChart(result: StudyResult, fit: Fit): Spec {
   );
   const cook = (one: Dot): number => fit.diagnostics.cook[one.row] ?? 0;
   const named = [...dots].sort((a, b) => cook(b) - cook(a)).slice(0, dots.length > 6 ? NAMED : 0);
-  const x = axisOver([0, ...dots.map((one) => one.x)], 'leverage (share of its own information that a trial takes)', false, 0.08);
+  const x = axisOver([0, ...dots.map((one) => one.x)], 'leverage', false, 0.08);
   const y = axisOver([-2.6, 2.6, ...dots.map((one) => one.y)], 'studentised residual', false, 0.05);
   const names = {
     data: { values: named },
-    mark: { type: 'text', dy: -11, color: palette.quiet, limit: 110 },
+    mark: { type: 'text', dy: -11, color: palette.quiet },
     encoding: { x: along('x', x), y: along('y', y, NUMBERS_EXTENT), text: { field: 'trial', type: 'nominal' } },
   };
   const zero = {

@@ -33,7 +33,7 @@ export const pickedTrial = (data: string, encoding: Record<string, unknown>) => 
   {
     data: { name: data },
     transform: [{ filter: 'datum.row === picked' }],
-    mark: { type: 'text', dy: -14, fontWeight: 'bold', color: palette.accent, limit: 140 },
+    mark: { type: 'text', dy: -14, fontWeight: 'bold', color: palette.accent },
     encoding: { ...encoding, text: { field: 'trial', type: 'nominal' } },
   },
 ];

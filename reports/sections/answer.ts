@@ -2,10 +2,11 @@ import type { Fit } from '../../pipeline/regression/fit.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { type Pictures, picturesOf } from '../figure.ts';
 import { html, type Markup } from '../html.ts';
-import { chosenFit, lawText } from '../law-text.ts';
+import { chosenFit, lawNumbers, lawText } from '../law-text.ts';
 import { percent, plainNumber, roundedLike, valueBy } from '../numbers.ts';
 import * as says from '../says/answer.ts';
 import { columns, table } from '../table.ts';
+import { formMarkup } from '../typeset.ts';
 import { prettyUnit } from '../units.ts';
 import { section } from './section.ts';
 
@@ -17,7 +18,8 @@ export function answer(result: StudyResult, pictures: Pictures): Markup {
   return section(
     'answer',
     lead,
-    html`<div class="law" role="region" tabindex="0" aria-label="${says.lawRegion()}">${lawText(fit)}</div>
+    html`<div class="law" role="region" tabindex="0" aria-label="${says.lawRegion()}">${formMarkup(fit.form, lawNumbers(fit), fit.values)}</div>
+<p class="fine formula">${lawText(fit)}</p>
 <p>${result.choice.why}</p>
 ${warnings(result)}
 ${picturesOf(pictures, 'law')}

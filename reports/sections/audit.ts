@@ -2,7 +2,7 @@ import type { AuditRow } from '../../pipeline/audit/verdict.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { type Pictures, picturesOf } from '../figure.ts';
 import { type Child, html, type Markup } from '../html.ts';
-import { percent, percentOfLn, plainNumber, withInterval } from '../numbers.ts';
+import { percent, percentOfLn, plainNumber, roundedLike, valueBy, withInterval } from '../numbers.ts';
 import * as says from '../says/sections.ts';
 import { columns, table } from '../table.ts';
 import { notesOf, section } from './section.ts';
@@ -28,14 +28,14 @@ ${notesOf(result, 'audit', (note) => found.notes.some((one) => one.text === note
 const who = (row: AuditRow): Markup =>
   html`${row.authors} (${row.year})${row.basis === 'analogy' && ', by analogy'}${row.own && ', your own'}${row.reads !== 'mean line' && `, ${row.reads}`}<br><span class="fine">${row.title}<br><span class="formula">${row.text}</span></span>`;
 
-const number = (value: number, text: (v: number) => string): Child => (Number.isFinite(value) ? text(value) : '–');
+const number = (value: number, text: (v: number) => Child): Child => (Number.isFinite(value) ? text(value) : '–');
 
 const verdicts = (rows: readonly AuditRow[], tolerance: number): Markup =>
   table(
     `Published correlations against the trials; tolerance ${percent(tolerance)}`,
     columns(
-      'correlation',
-      'verdict',
+      '~correlation',
+      '~verdict',
       '#in range',
       '#bias',
       '#scatter',
@@ -49,26 +49,28 @@ const verdicts = (rows: readonly AuditRow[], tolerance: number): Markup =>
       html`${row.verdict}<br><span class="fine">${row.why}</span>`,
       `${row.nInRange} of ${row.n}`,
       number(row.bias, plainNumber),
-      number(row.scatterLn, percentOfLn),
-      number(row.rigFactor, (v) => withInterval(v, row.rigFactorLower, row.rigFactorUpper)),
+      row.nInRange > 1 ? number(row.scatterLn, percentOfLn) : '–',
+      number(row.rigFactor, (v) => factor(v, row)),
       number(row.cvRmsLnAsPublished, percentOfLn),
       number(row.cvRmsLnWithFactor, percentOfLn),
       number(row.cvRmsLnFittedLaw, percentOfLn),
     ]),
   );
 
+const factor = (value: number, { rigFactorLower: lower, rigFactorUpper: upper }: AuditRow): Markup =>
+  html`${valueBy(value, lower, upper)}<br><span class="fine">${roundedLike(lower, value, lower, upper)} to ${roundedLike(upper, value, lower, upper)}</span>`;
+
 /** Ranges, trends and what each claims for itself: the fine print of the comparison. */
 const ranges = (rows: readonly AuditRow[]): Markup =>
   table(
     'Their ranges, trends and sources',
     columns(
-      'correlation',
-      'limits, and trials inside',
-      'trend of measured over predicted',
+      '~correlation',
+      '~limits, and trials inside',
+      '~trend of measured over predicted',
       '#within 20 %',
       '#within 30 %',
-      'stated accuracy',
-      'source',
+      '~source and its stated accuracy',
     ),
     rows.map((row) => [
       `${row.authors} (${row.year})`,
@@ -78,14 +80,13 @@ const ranges = (rows: readonly AuditRow[]): Markup =>
         : row.trends.map((one) => `${one.group}: power ${withInterval(one.slope, one.lower, one.upper)}`).join('; '),
       number(row.within20, percent),
       number(row.within30, percent),
-      row.accuracy,
-      row.source,
+      html`${row.source}<br><span class="fine">${row.accuracy}</span>`,
     ]),
   );
 
 const lacking = (rows: readonly AuditRow[]): Markup =>
   html`<h3>${says.notCompared()}</h3>${table(
     says.notCompared(),
-    columns('correlation', 'what it lacks here', 'why'),
+    columns('~correlation', '~what it lacks here', '~why'),
     rows.map((row) => [who(row), row.lacks.join(', ') || '–', row.why]),
   )}`;

@@ -1,3 +1,4 @@
+import { quantityOf } from '../../pipeline/quantities/vocabulary.ts';
 import type { LedgerRow, StudyResult, TrialRow } from '../../pipeline/results/study-result.ts';
 import { type Child, html, type Markup } from '../html.ts';
 import { chosenFit } from '../law-text.ts';
@@ -44,7 +45,7 @@ function fullLedger(result: StudyResult): Markup {
   const fit = chosenFit(result);
   const { coefficient } = result;
   const heads: readonly Column[] = [
-    ...columns('trial', 'campaign', '#line', 'status', 'reason or remark'),
+    ...columns('trial', 'campaign', '#line', 'status', '~reason or remark'),
     ...(coefficient === null ? [] : [{ head: named(coefficient.symbol, coefficient.unit), numeric: true }]),
     ...result.columns.map((one) => ({ head: named(one.name, one.unit), numeric: true })),
     { head: `u of ${result.response.name}`, numeric: true },
@@ -76,6 +77,9 @@ function fullLedger(result: StudyResult): Markup {
   );
 }
 
+/** SI unit of a quantity that the program knows by name. */
+const unitOf = (key: string): string => quantityOf(key.split('@')[0]!)?.unit ?? '';
+
 const numberOf = (value: number | undefined): string => (value === undefined ? '' : plainNumber(value));
 
 /** The name of a trial; one that was used can be picked once scripts run. */
@@ -86,13 +90,12 @@ const nameCell = (row: LedgerRow, k: number | undefined): Child =>
 function readings(result: StudyResult): Markup | false {
   const keys = [...new Set(result.trials.flatMap((trial) => Object.keys(trial.raw)))];
   if (keys.length === 0) return false;
-  const units = new Map(result.trials.slice(0, 1).flatMap((trial) => Object.keys(trial.raw).map((key) => [key, ''])));
   return html`<details><summary>Readings of every trial</summary>${table(
     `Readings of every trial, in SI units`,
     [
       { head: 'trial' },
       { head: 'readings averaged', numeric: true },
-      ...keys.map((key) => ({ head: named(key, units.get(key) ?? ''), numeric: true })),
+      ...keys.map((key) => ({ head: named(key, unitOf(key)), numeric: true })),
     ],
     result.trials.map((trial) => [
       trial.trial,
@@ -111,7 +114,7 @@ function walk({ trials: all }: StudyResult): Markup | false {
 const walkOf = (one: TrialRow): Markup =>
   html`<h3>${says.walkLead(one.trial)}</h3>
 <p class="fine">${says.readIn()}: ${Object.entries(one.raw)
-    .map(([key, value]) => `${key} ${plainNumber(value, 6)}`)
+    .map(([key, value]) => `${key} ${plainNumber(value, 6)}${behind(unitOf(key))}`)
     .join(', ')}. ${says.walkFine()}</p>
 ${table(
   says.walkLead(one.trial),
