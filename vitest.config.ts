@@ -2,6 +2,7 @@ import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   test: {
+    globalSetup: './test/generate.ts',
     reporters: ['default', './test/last-line.ts'],
     projects: [
       { test: { name: 'source', include: ['test/**/*.test.ts'], exclude: ['test/dist/**', 'test/browser/**'], testTimeout: 30_000 } },

@@ -1,10 +1,11 @@
-import { createHash } from 'node:crypto';
 import type { StudyResult } from '../pipeline/results/study-result.ts';
 import { figuresOf } from './charts/all.ts';
 import type { Spec } from './charts/palette.ts';
-import { startReport, svgOf } from './charts/render.ts';
+import { draw, startReport } from './charts/render.ts';
+import { type Assets, dress } from './dress.ts';
 import { figureOf, type Pictures } from './figure.ts';
 import { html, type Markup } from './html.ts';
+import { liveData } from './live-data.ts';
 import { answer } from './sections/answer.ts';
 import { audit } from './sections/audit.ts';
 import { cautions } from './sections/cautions.ts';
@@ -14,7 +15,6 @@ import { nextTrials } from './sections/next-trials.ts';
 import { plant } from './sections/plant.ts';
 import { questions } from './sections/section.ts';
 import { trials } from './sections/trials.ts';
-import { style } from './theme.ts';
 
 export interface Report {
   readonly html: string;
@@ -22,19 +22,26 @@ export interface Report {
   readonly charts: Readonly<Record<string, Spec>>;
 }
 
-/** One study's result as one self-contained page: no request, and a policy that allows nothing but its own style by its hash. */
-export async function renderReport(result: StudyResult): Promise<Report> {
+/**
+ * One study's result as one page: complete without scripts, alive with them, no request to anywhere. The script stands in the page (`inline`), or is one file
+ * beside the index of a batch (`shared`, see `sharedScript`), one folder up.
+ */
+export async function renderReport(result: StudyResult, { assets = 'inline' }: { readonly assets?: Assets } = {}): Promise<Report> {
   startReport();
   const figures = figuresOf(result);
   const pictures = new Map<string, Markup>();
-  for (const figure of figures) pictures.set(figure.name, figureOf(figure, await svgOf(figure.spec, figure.name)));
-  const hash = createHash('sha256').update(style).digest('base64');
-  const title = html`${result.study.title}`.markup;
-  const page = `<!doctype html>
-<html lang="en"><head><meta charset="utf-8"><meta http-equiv="Content-Security-Policy" content="default-src 'none'; style-src 'sha256-${hash}'; base-uri 'none'; form-action 'none'"><meta name="viewport" content="width=device-width, initial-scale=1"><title>${title}</title><style>${style}</style></head><body>${head(result).markup}
-${main(result, pictures).markup}</body></html>
-`;
-  return { html: page, charts: Object.fromEntries(figures.map(({ name, spec }) => [name, spec])) };
+  const live: Record<string, unknown> = {};
+  for (const figure of figures) {
+    const drawn = await draw(figure.spec, figure.name);
+    pictures.set(figure.name, figureOf(figure, drawn.svg));
+    live[figure.name] = drawn.live;
+  }
+  const body = html`${head(result)}
+${main(result, pictures)}`;
+  return {
+    html: dress({ title: result.study.title, body, assets, data: liveData(result, live) }),
+    charts: Object.fromEntries(figures.map(({ name, spec }) => [name, spec])),
+  };
 }
 
 const head = ({ study }: StudyResult): Markup =>
@@ -50,4 +57,4 @@ const head = ({ study }: StudyResult): Markup =>
 <nav aria-label="Questions"><ol>${questions.map(([id, question]) => html`<li><a href="#${id}">${question}</a></li>`)}</ol></nav></header>`;
 
 const main = (result: StudyResult, pictures: Pictures): Markup =>
-  html`<main>${answer(result, pictures)}${audit(result, pictures)}${plant(result, pictures)}${evidence(result, pictures)}${nextTrials(result, pictures)}${trials(result)}${method(result)}${cautions(result)}</main>`;
+  html`<main><details id="controls" class="controls" hidden><summary></summary></details>${answer(result, pictures)}${audit(result, pictures)}${plant(result, pictures)}${evidence(result, pictures)}${nextTrials(result, pictures)}${trials(result)}${method(result)}${cautions(result)}</main>`;

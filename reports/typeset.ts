@@ -22,7 +22,7 @@ interface Context {
  */
 export function formMarkup(form: Form, number: (value: number) => string, values?: Readonly<Record<string, number>>): Markup {
   const tree = piece(form.tree, { values, number }).markup;
-  return html`<math display="block"><mrow>${symbol(form.response)}<mo>=</mo>${tree}</mrow></math>`;
+  return html`<math displaystyle="true"><mrow>${symbol(form.response)}<mo>=</mo>${tree}</mrow></math>`;
 }
 
 /** `Re` upright, `h_wall` with its subscript, Greek names as letters. */

@@ -14,6 +14,7 @@ interface Dot {
 }
 
 const WIDTH = 320;
+const BROKEN = { strokeDash: [4, 4] };
 
 /** Dots of the trials over two axes, with lines behind them. */
 function dotsChart(
@@ -64,12 +65,12 @@ export function parityChart(result: StudyResult, fit: Fit): Spec {
     0.06,
   );
   const [x, y] = [axisFrom(domain, `fitted ${name}`, log), axisFrom(domain, `measured ${name}`, log)];
-  const line = (factor: number, strokeDash: readonly number[]) => ({
+  const line = (factor: number, dash: object = {}) => ({
     data: { values: domain.map((v) => ({ x: v, y: v * factor })) },
-    mark: { type: 'line', color: palette.faint, strokeWidth: 1, strokeDash, clip: true },
+    mark: { type: 'line', color: palette.faint, strokeWidth: 1, ...dash, clip: true },
     encoding: { x: along('x', x), y: along('y', y, NUMBERS_EXTENT) },
   });
-  return dotsChart(dots, { x, y, height: WIDTH }, [line(1, [1, 0]), ...(log ? [line(1.2, [4, 4]), line(1 / 1.2, [4, 4])] : [])]);
+  return dotsChart(dots, { x, y, height: WIDTH }, [line(1), ...(log ? [line(1.2, BROKEN), line(1 / 1.2, BROKEN)] : [])]);
 }
 
 /** Studentised residuals against anything, with the lines of none and of two standard deviations. */
@@ -82,12 +83,12 @@ function residualChart(result: StudyResult, fit: Fit, x: (row: number) => number
     0.06,
   );
   const up = axisOver([-2.6, 2.6, ...dots.map((one) => one.y)], 'studentised residual', false, 0.05);
-  const rule = (value: number, strokeDash: readonly number[]) => ({
+  const rule = (value: number, dash: object = {}) => ({
     data: { values: [{ y: value }] },
-    mark: { type: 'rule', color: palette.faint, strokeDash },
+    mark: { type: 'rule', color: palette.faint, ...dash },
     encoding: { y: along('y', up, NUMBERS_EXTENT) },
   });
-  return dotsChart(dots, { x: across, y: up, height: 190 }, [rule(0, [1, 0]), rule(2, [4, 4]), rule(-2, [4, 4])]);
+  return dotsChart(dots, { x: across, y: up, height: 190 }, [rule(0), rule(2, BROKEN), rule(-2, BROKEN)]);
 }
 
 /** Residuals against one group of the law. */

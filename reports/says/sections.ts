@@ -11,7 +11,6 @@ export const calculator = (): string => 'Try your own values';
 export const calculatorFine = (confidence: string): string =>
   `By the same formulas as the plant cases, for group values without an uncertainty of their own, at ${confidence}. A law is silent about what lies outside its ranges: there the interval is what the law would say if it went on.`;
 export const noNext = (): string => 'No further trials were asked for: the study names no ranges of the rig or no plant case.';
-export const noScripts = (): string => 'Scripts are off: pictures and tables are complete, but nothing can be picked.';
 export const comparedLaws = (): string => 'Laws compared; errors on trials that were left out of the fit';
 export const condition = (law: string): string =>
   `What the trials tell of ${law} together: condition indices and the share of each parameter’s variance that hangs on them`;
@@ -32,12 +31,8 @@ export const ledgerSum = (l: {
 export const ledgerMismatch = (): string =>
   'These numbers do not add up: do not rely on this report, and tell those who maintain the program.';
 export const nothingLeft = (): string => 'Nothing was left out or refused.';
-export const readIn = (): string => 'Read, in SI units';
-export const walkLead = (trial: string): string => `From readings to result, step by step: trial ${trial}`;
-export const walkFine = (): string => 'Numbers to six digits, so that each step can be repeated by hand.';
 export const rounding = (): string =>
   'Numbers are rounded by one rule, JCGM 100:2008 (GUM), 7.2.6: an uncertainty to two significant digits, its value to the same place; numbers without an uncertainty to three digits. The result files hold full precision.';
 export const fullText = (): string => 'The laws at full precision';
-export const signOff = (): string => 'Reviewed by';
 export const inputLead = (version: string, seed: number): string =>
   `pilotlaw ${version} computed this from the files below with seed ${seed}; the same files, version and seed give the same numbers.`;

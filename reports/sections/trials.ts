@@ -1,12 +1,13 @@
-import { quantityOf } from '../../pipeline/quantities/vocabulary.ts';
-import type { LedgerRow, StudyResult, TrialRow } from '../../pipeline/results/study-result.ts';
+import type { LedgerRow, StudyResult } from '../../pipeline/results/study-result.ts';
 import { type Child, html, type Markup } from '../html.ts';
 import { chosenFit } from '../law-text.ts';
+import { siUnit, walkOf } from '../live-data.ts';
 import { percent, plainNumber } from '../numbers.ts';
 import * as says from '../says/sections.ts';
 import { type Column, columns, table } from '../table.ts';
-import { behind, prettyUnit } from '../units.ts';
+import { prettyUnit } from '../units.ts';
 import { notesOf, section } from './section.ts';
+import { walkMarkup } from './walk.ts';
 
 /** Which trials count? */
 export function trials(result: StudyResult): Markup {
@@ -77,9 +78,6 @@ function fullLedger(result: StudyResult): Markup {
   );
 }
 
-/** SI unit of a quantity that the program knows by name. */
-const unitOf = (key: string): string => quantityOf(key.split('@')[0]!)?.unit ?? '';
-
 const numberOf = (value: number | undefined): string => (value === undefined ? '' : plainNumber(value));
 
 /** The name of a trial; one that was used can be picked once scripts run. */
@@ -95,7 +93,7 @@ function readings(result: StudyResult): Markup | false {
     [
       { head: 'trial' },
       { head: 'readings averaged', numeric: true },
-      ...keys.map((key) => ({ head: named(key, unitOf(key)), numeric: true })),
+      ...keys.map((key) => ({ head: named(key, siUnit(key)), numeric: true })),
     ],
     result.trials.map((trial) => [
       trial.trial,
@@ -105,24 +103,8 @@ function readings(result: StudyResult): Markup | false {
   )}</details>`;
 }
 
-/** The whole way from readings to groups for one trial, the first where the reader has not picked another. */
+/** The whole way from readings to groups for one trial: the first, where the reader has not picked another. */
 function walk({ trials: all }: StudyResult): Markup | false {
   const one = all[0];
-  return one !== undefined && one.trace.length > 0 && walkOf(one);
+  return one !== undefined && one.trace.length > 0 && walkMarkup(walkOf(one));
 }
-
-const walkOf = (one: TrialRow): Markup =>
-  html`<h3>${says.walkLead(one.trial)}</h3>
-<p class="fine">${says.readIn()}: ${Object.entries(one.raw)
-    .map(([key, value]) => `${key} ${plainNumber(value, 6)}${behind(unitOf(key))}`)
-    .join(', ')}. ${says.walkFine()}</p>
-${table(
-  says.walkLead(one.trial),
-  columns('step', 'formula', '#value', 'source'),
-  one.trace.map((step) => [
-    step.key,
-    html`<span class="formula">${step.formula}</span>`,
-    `${plainNumber(step.value, 6)}${behind(step.unit)}`,
-    step.source,
-  ]),
-)}`;
