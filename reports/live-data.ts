@@ -37,6 +37,17 @@ export interface LiveData {
 /** Seven digits are more than a reading has. */
 const short = (value: number): number => (Number.isFinite(value) ? Number(value.toPrecision(7)) : value);
 
+/** A compiled picture without what the trials say anyway (their names, by row), and its numbers at seven digits. */
+const lightened = (chart: unknown): unknown =>
+  JSON.parse(
+    JSON.stringify(chart, (_, one: unknown) => {
+      if (typeof one === 'number') return short(one);
+      if (one === null || typeof one !== 'object' || !('row' in one) || !('trial' in one)) return one;
+      const { trial, campaign, ...rest } = one as unknown as Record<string, unknown>;
+      return rest;
+    }),
+  );
+
 /** SI unit of a quantity that the program knows by name. */
 export const siUnit = (key: string): string => quantityOf(key.split('@')[0]!)?.unit ?? '';
 
@@ -57,7 +68,7 @@ export function liveData(result: StudyResult, charts: Readonly<Record<string, un
   );
   const fit = chosenFit(result);
   return {
-    charts,
+    charts: Object.fromEntries(Object.entries(charts).map(([name, chart]) => [name, lightened(chart)])),
     columns: result.columns.map(({ name, unit }) => ({ name, unit })),
     coefficient: result.coefficient,
     campaigns: result.campaigns,

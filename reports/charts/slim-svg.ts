@@ -1,23 +1,32 @@
 /**
- * The same picture in fewer bytes: numbers at a tenth of a pixel, no attributes that say what is the default, dots as circles and error bars as one path.
- * Only what Vega's own writer puts out is touched, and no text.
+ * The same picture in fewer bytes: numbers at a tenth of a pixel, no attribute that says what is the default, what all children of a group share said once,
+ * dots of one style as one path of round ends, lines of one style as one path. Only what Vega's own writer puts out is touched, and no text.
  */
 export function slimmed(svg: string): string {
   return svg
-    .replace(/<(?:path|line|rect|g|text)\b[^>]*>/g, slimTag)
+    .replace(/<(?:path|line|rect|g|text|svg)\b[^>]*>/g, slimTag)
     .replace(/<path class="(?:background|foreground)"[^>]*\/>/g, '')
-    .replace(/<g class="mark-symbol[^"]*"[^>]*>(?:<path [^>]*\/>)+<\/g>/g, dotGroup)
-    .replace(/<g class="mark-rule[^"]*"[^>]*>(?:<line [^>]*\/>)+<\/g>/g, lineGroup);
+    .replace(/<g class="mark-symbol[^"]*"([^>]*)>((?:<path [^>]*\/>)+)<\/g>/g, (whole, of, inside) => dots(inside, of) ?? whole)
+    .replace(/<g class="mark-rule[^"]*"([^>]*)>((?:<line [^>]*\/>)+)<\/g>/g, (whole, of, inside) => lines(inside, of) ?? whole)
+    .replace(/<g class="mark-text[^"]*"([^>]*)>((?:<text [^>]*>[^<]*<\/text>)+)<\/g>/g, (_, of, inside) => texts(inside, of))
+    .replace(/<(g|path|rect) class="[^"]*"/g, '<$1')
+    .replace(/<svg /, '<svg font-family="system-ui, sans-serif" font-size="12" ');
 }
 
+/** Defaults of the format, what the picture's root says once, and what is said to assistive programs in the page's own words instead. */
 const inert = [
+  ' xmlns="http://www.w3.org/2000/svg"',
   ' xmlns:xlink="http://www.w3.org/1999/xlink"',
   ' version="1.1"',
   ' aria-hidden="true"',
   ' pointer-events="none"',
   ' opacity="1"',
   ' fill-opacity="1"',
+  ' stroke-width="1"',
+  ' stroke-miterlimit="4"',
   ' font-weight="normal"',
+  ' font-family="system-ui, sans-serif"',
+  ' font-size="12px"',
   ' role="graphics-object"',
   ' aria-roledescription="group mark container"',
 ];
@@ -30,33 +39,64 @@ const slimTag = (tag: string): string =>
 const shortNumbers = (text: string): string =>
   text.replace(/-?\d*\.\d\d+(?:e[-+]?\d+)?/g, (number) => String(Math.round(Number(number) * 10) / 10 || 0));
 
-/** Circles of one style: position each, the rest said once. */
-function dotGroup(group: string): string {
-  const dots = [...group.matchAll(/<path ([^>]*)\/>/g)].map((found) => dotOf(found[1]!));
-  const first = dots[0];
-  if (first === undefined || dots.some((dot) => dot === undefined || dot.rest !== first.rest)) return group;
-  return `<g${first.rest}>${dots.map((dot) => `<circle cx="${dot!.x}" cy="${dot!.y}" r="${dot!.r}"/>`).join('')}</g>`;
+const attribute = (name: string, value: string | undefined): string => (value === undefined ? '' : ` ${name}="${value}"`);
+
+const attributesOf = (tag: string): Map<string, string> =>
+  new Map([...tag.matchAll(/([\w-]+)="([^"]*)"/g)].map((found) => [found[1]!, found[2]!]));
+
+const without = (all: ReadonlyMap<string, string>, ...names: readonly string[]): string =>
+  [...all]
+    .filter(([name]) => !names.includes(name))
+    .map(([name, value]) => attribute(name, value))
+    .join('');
+
+/** Filled circles of one style as one path: each a line of no length with round ends. Undefined where they differ. */
+function dots(inside: string, of: string): string | undefined {
+  const parts = [...inside.matchAll(/<path ([^>]*)\/>/g)].map((found) => attributesOf(found[1]!));
+  const radius = (one: Map<string, string>): string | undefined =>
+    /^M([\d.]+),0A\1,\1,0,1,1,-\1,0A\1,\1,0,1,1,\1,0$/.exec(one.get('d') ?? '')?.[1];
+  const [first] = parts;
+  const [r, fill] = [radius(first!), first!.get('fill')];
+  if (r === undefined || fill === undefined || first!.has('stroke')) return undefined;
+  const alike = parts.every((one) => radius(one) === r && without(one, 'd', 'transform') === without(first!, 'd', 'transform'));
+  const places = parts.map((one) => placeOf(one.get('transform')));
+  if (!alike || places.includes(undefined)) return undefined;
+  const path = places.map((place) => `M${place![0]} ${place![1]}h0`).join('');
+  return `<path${of}${without(first!, 'd', 'transform', 'fill')} stroke="${fill}" stroke-width="${2 * Number(r)}" stroke-linecap="round" d="${path}"/>`;
 }
 
-function dotOf(attributes: string): { readonly x: string; readonly y: string; readonly r: string; readonly rest: string } | undefined {
-  const place = /transform="translate\(([^,]+),([^)]+)\)"/.exec(attributes);
-  const circle = /d="M([\d.]+),0A\1,\1,0,1,1,-\1,0A\1,\1,0,1,1,\1,0"/.exec(attributes);
-  if (place === null || circle === null) return undefined;
-  const rest = attributes.replace(place[0], '').replace(circle[0], '').replace(/\s+/g, ' ').trim();
-  return { x: place[1]!, y: place[2]!, r: circle[1]!, rest: rest === '' ? '' : ` ${rest}` };
+/** Straight lines of one style as one path. Undefined where they differ. */
+function lines(inside: string, of: string): string | undefined {
+  const parts = [...inside.matchAll(/<line ([^>]*)\/>/g)].map((found) => attributesOf(found[1]!));
+  const own = ['transform', 'x2', 'y2'];
+  const style = without(parts[0]!, ...own);
+  const places = parts.map((one) => placeOf(one.get('transform')));
+  if (places.includes(undefined) || parts.some((one) => without(one, ...own) !== style)) return undefined;
+  const path = parts.map((one, k) => `M${places[k]![0]} ${places[k]![1]}${step(one.get('x2'), one.get('y2'))}`).join('');
+  return `<path${of}${style} d="${path}"/>`;
 }
 
-/** Lines of one style as one path. */
-function lineGroup(group: string): string {
-  const lines = [...group.matchAll(/<line ([^>]*)\/>/g)].map((found) => lineOf(found[1]!));
-  const first = lines[0];
-  if (first === undefined || lines.some((line) => line === undefined || line.rest !== first.rest)) return group;
-  return `<path${first.rest} d="${lines.map((line) => line!.path).join('')}"/>`;
+const step = (x = '0', y = '0'): string => (y === '0' ? `h${x}` : x === '0' ? `v${y}` : `l${x} ${y}`);
+
+/** Texts keep what is their own; what all share stands on the group. */
+function texts(inside: string, of: string): string {
+  const parts = [...inside.matchAll(/<text ([^>]*)>([^<]*)<\/text>/g)]
+    .map((found) => ({ own: attributesOf(found[1]!), text: found[2]! }))
+    .filter((one) => one.text !== '');
+  if (parts.length === 0) return '';
+  const shared = new Map(
+    [...parts[0]!.own].filter(([name, value]) => name !== 'transform' && parts.every(({ own }) => own.get(name) === value)),
+  );
+  const each = parts.map(({ own, text }) => {
+    const place = placeOf(own.get('transform'));
+    const at = place === undefined ? attribute('transform', own.get('transform')) : ` x="${place[0]}" y="${place[1]}"`;
+    return `<text${at}${without(own, 'transform', ...shared.keys())}>${text}</text>`;
+  });
+  return `<g${of}${without(shared)}>${each.join('')}</g>`;
 }
 
-function lineOf(attributes: string): { readonly path: string; readonly rest: string } | undefined {
-  const found = /transform="translate\(([^,]+),([^)]+)\)" x2="([^"]+)" y2="([^"]+)"/.exec(attributes);
-  if (found === null) return undefined;
-  const rest = attributes.replace(found[0], '').replace(/\s+/g, ' ').trim();
-  return { path: `M${found[1]} ${found[2]}l${found[3]} ${found[4]}`, rest: rest === '' ? '' : ` ${rest}` };
+/** x and y of a plain shift. */
+function placeOf(transform: string | undefined): readonly [string, string] | undefined {
+  const found = /^translate\(([^,]+),([^)]+)\)$/.exec(transform ?? '');
+  return found === null ? undefined : [found[1]!, found[2]!];
 }

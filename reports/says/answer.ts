@@ -43,6 +43,7 @@ const shareBound = (bound: number): string => (bound < 1 ? percent(bound) : `a f
 function rangeList(result: StudyResult, fit: Fit): string {
   const all = Object.entries(fit.ranges).map(([name, [low, high]]) => {
     const unit = behind(result.columns.find((one) => one.name === name)?.unit ?? '1');
+    if (!Number.isFinite(low) || !Number.isFinite(high)) return `${name} over a range that is not known`;
     return isOneValue(low, high)
       ? `${name} at ${plainNumber(low)}${unit} only`
       : `${name} ${plainNumber(low)} to ${plainNumber(high)}${unit}`;

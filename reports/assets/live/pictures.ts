@@ -10,6 +10,7 @@ interface Axis {
 
 interface VegaSpec {
   width: number;
+  data: { name: string; values?: Record<string, unknown>[] }[];
   scales: { type: string; name: string; zero?: boolean; nice?: boolean; domain: unknown }[];
   axes: Axis[];
 }
@@ -30,6 +31,7 @@ export function livePictures(data: LiveData, store: Store): void {
   const tell = tipOver(data);
   const pictures = [...document.querySelectorAll<HTMLElement>('.picture[data-chart]')].flatMap((place): readonly Picture[] => {
     const spec = data.charts[place.dataset.chart!] as VegaSpec | undefined;
+    if (spec !== undefined) nameTrials(spec, data);
     const whole = place.querySelector('svg')?.viewBox.baseVal.width ?? 0;
     return spec === undefined ? [] : [{ place, spec, beside: whole - spec.width }];
   });
@@ -57,6 +59,15 @@ export function livePictures(data: LiveData, store: Store): void {
       for (const picture of pictures) void picture.view?.width(plotWidth(picture)).runAsync();
     }, 150);
   });
+}
+
+/** Trials get their names back, which the packed data hold once. */
+function nameTrials(spec: VegaSpec, { trials }: LiveData): void {
+  for (const { name, values } of spec.data) {
+    if (name === 'trials')
+      for (const one of values ?? [])
+        Object.assign(one, { trial: trials[Number(one.row)]?.trial, campaign: trials[Number(one.row)]?.campaign });
+  }
 }
 
 /** Plots shrink with their column, never below what can be read, never above what was drawn. */
