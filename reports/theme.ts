@@ -35,7 +35,7 @@ math{font-size:1.35rem}
 .warnings{border-left:3px solid var(--warm);padding:.1rem 0 .1rem 1.2rem;margin:1.6rem 0}
 .warnings h3{margin-top:.4rem}
 .notes{padding-left:1.2rem}
-.sign td{height:2.6rem;min-width:11rem}
+.sign td{height:2.6rem;min-width:min(11rem,24vw)}
 details{margin:1.4rem 0}
 summary{cursor:pointer;color:var(--accent)}
 :focus-visible{outline:2px solid var(--accent);outline-offset:2px}

@@ -56,7 +56,10 @@ describe('invented studies', () => {
     const named = { ...result, study: { ...result.study, title: '<script>alert(1)</script>' } };
     const [a, b] = [await renderReport(named), await renderReport(named)];
     expect(a.html).toBe(b.html);
-    expect(a.html).not.toContain('<script');
-    expect(a.html).toContain("default-src 'none'");
+    expect(a.html).not.toContain('<script>alert(1)');
+    expect(a.html).toContain('&lt;script&gt;alert(1)');
+    const policy = /http-equiv="Content-Security-Policy" content="([^"]+)"/.exec(a.html)![1]!;
+    expect(policy).toContain("default-src 'none'");
+    expect(policy).not.toMatch(/unsafe/);
   });
 });
