@@ -78,6 +78,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     ...contenders.flatMap(({ fit }) => fit.notes),
     ...evidence.notes,
     ...(audited?.notes ?? []),
+    ...notComputed(plan),
   ];
   return assemble({
     plan,
@@ -128,6 +129,16 @@ function auditOf(
     weight,
   }).value;
 }
+
+/** What the study asks for and this version does not compute is said where the reader would look for it. */
+const notComputed = ({ study }: Plan): readonly Note[] => [
+  ...(study.plant === undefined
+    ? []
+    : [{ section: 'plant', level: 'warning', code: 'not-computed', text: says.notComputed('plant') } as const]),
+  ...(study.rig === undefined
+    ? []
+    : [{ section: 'next-trials', level: 'warning', code: 'not-computed', text: says.notComputed('rig') } as const]),
+];
 
 /** Order and setting of the trials that are left, for the looks at residuals. */
 function orderAndSetting(

@@ -6,11 +6,11 @@ export const measuredOver = (): string =>
   'Bias is measured over predicted, over the trials in range; errors on left-out trials use the same left-out trials for all three.';
 export const notCompared = (): string => 'What could not be compared';
 export const noPlant = (): string =>
-  'The study names no plant case. Apply the law inside its ranges only, in the same kind of equipment; for a prediction with its interval, name the plant’s conditions.';
+  'No plant case is computed by this version. Apply the law inside its ranges only, in the same kind of equipment; the calculator below gives its value and interval at one condition.';
 export const calculator = (): string => 'Try your own values';
 export const calculatorFine = (confidence: string): string =>
   `By the same formulas as the plant cases, for group values without an uncertainty of their own, at ${confidence}. A law is silent about what lies outside its ranges: there the interval is what the law would say if it went on.`;
-export const noNext = (): string => 'No further trials were asked for: the study names no ranges of the rig or no plant case.';
+export const noNext = (): string => 'No further trials are proposed by this version.';
 export const comparedLaws = (): string => 'Laws compared; errors on trials that were left out of the fit';
 export const condition = (law: string): string =>
   `What the trials tell of ${law} together: condition indices and the share of each parameter’s variance that hangs on them`;
