@@ -1,4 +1,5 @@
 import type { Observations } from '../observations/observation.ts';
+import { inverse } from '../regression/dense.ts';
 import type { Fit, FitData } from '../regression/fit.ts';
 import { groupSlopes, whitenedDesign } from '../regression/whitened-design.ts';
 import type { Budget } from './budget.ts';
@@ -38,8 +39,11 @@ function linearWeights(fit: Fit, data: FitData): readonly Float64Array[] {
   const design = whitenedDesign(fit, data).map((column) => column.map((v, i) => v * sd[i]!));
   const solved = design.map((column) => inverseTimes(column, own, data, tau2));
   const normal = design.map((a) => solved.map((b) => a.reduce((sum, v, i) => sum + v * b[i]!, 0)));
-  const inverse = inverted(normal);
-  return inverse.map((row) => Float64Array.from(sd, (_, i) => row.reduce((sum, v, m) => sum + v * solved[m]![i]!, 0)));
+  const p = normal.length;
+  const covariance = inverse(normal.flat(), p);
+  return solved.map((_, j) =>
+    Float64Array.from(sd, (_sd, i) => solved.reduce((sum, column, m) => sum + covariance[j * p + m]! * column[i]!, 0)),
+  );
 }
 
 function inverseTimes(x: Float64Array, own: readonly number[], { campaign, campaigns }: FitData, tau2: number): Float64Array {
@@ -58,22 +62,6 @@ function inverseTimes(x: Float64Array, own: readonly number[], { campaign, campa
     });
   }
   return out;
-}
-
-/** Inverse of a small symmetric positive matrix by Gauss-Jordan with pivoting. */
-function inverted(matrix: readonly (readonly number[])[]): number[][] {
-  const p = matrix.length;
-  const a = matrix.map((row, i) => [...row, ...row.map((_, j) => (i === j ? 1 : 0))]);
-  for (let c = 0; c < p; c++) {
-    const pivot = a.reduce((best, row, i) => (i >= c && Math.abs(row[c]!) > Math.abs(a[best]![c]!) ? i : best), c);
-    [a[c], a[pivot]] = [a[pivot]!, a[c]!];
-    const scale = a[c]![c]!;
-    a[c] = a[c]!.map((v) => v / scale);
-    a.forEach((row, i) => {
-      if (i !== c) a[i] = row.map((v, k) => v - row[c]! * a[c]![k]!);
-    });
-  }
-  return a.map((row) => row.slice(p));
 }
 
 /** Each random input through the whole row (response and groups): d residual/d input times K, squared and summed over trials. */

@@ -1,13 +1,10 @@
-import { call } from '../algebra/build.ts';
-import { derivative } from '../algebra/derivative.ts';
 import { evaluate } from '../algebra/evaluate.ts';
 import type { AuditRow } from '../audit/verdict.ts';
-import { studentQuantile } from '../numerics/distributions.ts';
-import { bilinear, degreesOfFreedom, withKnownPart } from '../regression/degrees-of-freedom.ts';
 import type { Fit, FitData } from '../regression/fit.ts';
+import { predictor } from '../regression/predict-ln.ts';
 
 /** One published line over the range of the trials: as evaluated at the trials, moved like them to the middle of the other groups, then smoothed. */
-export interface PublishedCurve {
+interface PublishedCurve {
   readonly id: string;
   readonly label: string;
   readonly analogy: boolean;
@@ -57,7 +54,8 @@ function curve(fit: Fit, data: FitData, group: string, g: number, published: rea
   const middle = Object.fromEntries(fit.form.groups.map((name, k) => [name, middleOf(data.x[k]!, relative)]));
   const [low, high] = fit.ranges[group]!;
   const x = Array.from({ length: STEPS + 1 }, (_, i) => (relative ? low * (high / low) ** (i / STEPS) : low + ((high - low) * i) / STEPS));
-  const bands = x.map((value) => interval(fit, { ...middle, [group]: value }));
+  const predict = predictor(fit);
+  const bands = x.map((value) => predict({ at: { ...middle, [group]: value } }));
   const at = Object.fromEntries(Object.entries(middle).filter(([name]) => name !== group));
   const moved = natural[g]!.map((value, i) => {
     const own = Object.fromEntries(fit.form.groups.map((name, k) => [name, natural[k]![i]!]));
@@ -104,25 +102,6 @@ const spread = <N extends 'x' | 'y'>(name: N, value: number, u: number, relative
 function shifted(fit: Fit, from: Readonly<Record<string, number>>, to: Readonly<Record<string, number>>): (y: number) => number {
   const [a, b] = [evaluate(fit.form.tree, from, fit.values), evaluate(fit.form.tree, to, fit.values)];
   return (y) => (fit.scale === 'relative' ? (y * b) / a : y + b - a);
-}
-
-/** Confidence of the law and expectation of a new trial at one point, by Student's t on Satterthwaite degrees of freedom. */
-function interval(
-  fit: Fit,
-  at: Readonly<Record<string, number>>,
-): { readonly value: number; readonly lawLower: number; readonly lawUpper: number; readonly lower: number; readonly upper: number } {
-  const relative = fit.scale === 'relative';
-  const tree = relative ? call('ln', fit.form.tree) : fit.form.tree;
-  const h = evaluate(tree, at, fit.values);
-  const w = fit.form.constants.map((name) => (fit.free.includes(name) ? evaluate(derivative(tree, name), at, fit.values) : 0));
-  const random = bilinear(w, fit.covarianceRandom, w);
-  const total = bilinear(w, fit.covariance, w);
-  const nu = withKnownPart(degreesOfFreedom(fit, w), random, total);
-  const t = studentQuantile((1 + fit.confidence) / 2, nu);
-  const tau = Number.isFinite(fit.statistics.campaignSd) ? fit.statistics.campaignSd : 0;
-  const [law, whole] = [t * Math.sqrt(total), t * Math.sqrt(total + fit.statistics.residualSd ** 2 + tau ** 2)];
-  const out = (v: number): number => (relative ? Math.exp(v) : v);
-  return { value: out(h), lawLower: out(h - law), lawUpper: out(h + law), lower: out(h - whole), upper: out(h + whole) };
 }
 
 /** ln-quadratic through the published values at the trials in range: its curvature over one study is smaller than that. */

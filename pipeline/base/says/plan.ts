@@ -1,16 +1,11 @@
 import { didYouMean } from '../nearest.ts';
 
-const list = (items: readonly string[]): string => items.map((item) => `"${item}"`).join(', ');
-
 export const unlikeDimensions = (a: string, b: string): string => `${a} and ${b} cannot be added or compared`;
 export const exponentWithDimension = (dimension: string): string => `an exponent must be a number, this one has the unit ${dimension}`;
 export const openExponent = (dimension: string): string =>
   `a quantity in ${dimension} can only be raised to a number that stands in the formula`;
 export const functionOfDimension = (fn: string, dimension: string): string => `${fn} takes a number, this has the unit ${dimension}`;
 
-export const noSuchColumn = (column: string, header: readonly string[]): string =>
-  `there is no column "${column}" in the table${didYouMean(column, header)}; its columns are ${list(header)}`;
-export const columnTwice = (column: string): string => `more than one column is headed "${column}"; give each its own name`;
 export const noUnit = (name: string, unit: string): string =>
   `${name} needs a unit (in SI it is ${unit}): write it in the header as [${unit}], in a units row, or here as unit`;
 export const wrongDimension = (name: string, read: string, right: string): string =>
@@ -72,8 +67,6 @@ export const ambientAssumed = (key: string): string =>
   `${key} is read as a gauge pressure and ambient_pressure is not given: 101.325 kPa is added.`;
 export const idealGasVolume = (key: string, temperature: number, pressure: number): string =>
   `${key} is read at a reference condition of ${temperature} K and ${pressure / 1000} kPa and turned to the actual volume as an ideal gas.`;
-export const noFamily = (): string =>
-  'The equipment is given as "other", so no family of published correlations applies; name correlations under audit.against to compare some.';
 export const twoKinds = (first: string, unit: string, second: string, other: string): string =>
   `${first} is in ${unit} and ${second} in ${other}: concentrations of one study are all by mass or all by amount of substance`;
 export const unknownResponse = (name: string, known: readonly string[]): string =>

@@ -10,8 +10,6 @@ export const systematicInput = (size: string, source: string, per: string): stri
   `${size} (${source}${per === 'campaign' ? ', anew in each campaign' : ''})`;
 export const setPoint = (size: string): string => `${size}, a set point: counted in the scatter, not as error in x`;
 
-export const columnRead = (key: string, text: string): string => `${key}: ${text}`;
-
 /** Cautions, by what the case is. */
 export const reviewCaution = (): string =>
   'These numbers are input to a review by a qualified engineer. They do not replace local codes, standards, permits or licensed practice, which come first wherever they differ.';
