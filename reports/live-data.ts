@@ -5,7 +5,7 @@ import { chosenFit } from './law-text.ts';
 import type { Walk } from './sections/walk.ts';
 
 /** One trial as the live page tells it. */
-export interface LiveTrial {
+interface LiveTrial {
   readonly trial: string;
   readonly campaign: string;
   /** Values of the columns. */

@@ -2,7 +2,7 @@ import type { StudyResult } from '../pipeline/results/study-result.ts';
 import { figuresOf } from './charts/all.ts';
 import type { Spec } from './charts/palette.ts';
 import { draw, startReport } from './charts/render.ts';
-import { type Assets, dress } from './dress.ts';
+import { dress } from './dress.ts';
 import { figureOf, type Pictures } from './figure.ts';
 import { html, type Markup } from './html.ts';
 import { liveData } from './live-data.ts';
@@ -26,7 +26,7 @@ export interface Report {
  * One study's result as one page: complete without scripts, alive with them, no request to anywhere. The script stands in the page (`inline`), or is one file
  * beside the index of a batch (`shared`, see `sharedScript`), one folder up.
  */
-export async function renderReport(result: StudyResult, { assets = 'inline' }: { readonly assets?: Assets } = {}): Promise<Report> {
+export async function renderReport(result: StudyResult): Promise<Report> {
   startReport();
   const figures = figuresOf(result);
   const pictures = new Map<string, Markup>();
@@ -39,7 +39,7 @@ export async function renderReport(result: StudyResult, { assets = 'inline' }: {
   const body = html`${head(result)}
 ${main(result, pictures)}`;
   return {
-    html: dress({ title: result.study.title, body, assets, data: liveData(result, live) }),
+    html: dress({ title: result.study.title, body, data: liveData(result, live) }),
     charts: Object.fromEntries(figures.map(({ name, spec }) => [name, spec])),
   };
 }

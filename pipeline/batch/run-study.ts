@@ -39,7 +39,7 @@ interface Loaded {
 }
 
 /** Reads the study file and everything it names; throws one InputError with all faults. */
-export async function loadStudy(file: string): Promise<Loaded> {
+async function loadStudy(file: string): Promise<Loaded> {
   const folder = dirname(resolve(file));
   const files: { file: string; sha256: string }[] = [];
   const bytesOf = (name: string, path: string, place?: Placed<string>['place'], most = MOST_TABLE): Buffer => {
@@ -47,11 +47,9 @@ export async function loadStudy(file: string): Promise<Loaded> {
     files.push({ file: name, sha256: sha256(bytes) });
     return bytes;
   };
-  const notYet = (place: Placed<string>['place']): InputError =>
-    new InputError([{ code: 'series-not-read', text: says.seriesNotYet(), place }]);
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
   const study = parseStudy(studyText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
-  if (study.coefficient?.series !== undefined) throw notYet(study.coefficient.place);
+  refuseWhatIsNotThere(study);
   const trials = readTable(inside(study.trials.file), {
     file: study.trials.file.is,
     ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),
@@ -68,6 +66,24 @@ export async function loadStudy(file: string): Promise<Loaded> {
       ? []
       : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
   return { plan: makePlan(study, { trials, tables, catalogue, own }), trials, files };
+}
+
+/** Settings of the format that this version does not carry out are refused, all at once; none is passed over. */
+function refuseWhatIsNotThere(study: Study): void {
+  const top = { file: study.file, line: 1, column: 1 };
+  const asked = [
+    ...(study.coefficient?.series === undefined
+      ? []
+      : [{ code: 'series-not-read', text: says.seriesNotYet(), place: study.coefficient.place }]),
+    ...(study.fit.monteCarlo ? [{ code: 'not-there-yet', text: says.settingNotYet('fit.monte_carlo'), place: top }] : []),
+    ...(study.output.assets === 'shared'
+      ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
+      : []),
+    ...(['uncertainty', 'equal'].includes(study.fit.weights.is)
+      ? []
+      : [{ code: 'not-there-yet', text: says.settingNotYet('a column of weights'), place: study.fit.weights.place }]),
+  ];
+  if (asked.length > 0) throw new InputError(asked);
 }
 
 /** A study file that is no text is a wrong study file (exit 2), not data that cannot be used. */

@@ -31,7 +31,7 @@ export const axisFrom = (domain: readonly [number, number], title: string, log: 
 const bounded = (value: number): number => Math.min(Math.max(value, -Number.MAX_VALUE), Number.MAX_VALUE) || Number.MIN_VALUE;
 
 /** Multiples of 1, 2 or 5 times a power of ten, about five of them. */
-export function linearTicks(low: number, high: number): readonly number[] {
+function linearTicks(low: number, high: number): readonly number[] {
   const rough = high / 5 - low / 5;
   if (!(rough > 0) || !Number.isFinite(rough)) return [low, high];
   const power = 10 ** Math.floor(Math.log10(rough));
@@ -44,7 +44,7 @@ export function linearTicks(low: number, high: number): readonly number[] {
 }
 
 /** Powers of ten with as many steps between them as there is room for; linear steps under half a decade. */
-export function logTicks(low: number, high: number): readonly number[] {
+function logTicks(low: number, high: number): readonly number[] {
   const [a, b] = [Math.log10(low), Math.log10(high)];
   const decades = b - a;
   if (decades < 0.5) return linearTicks(low, high);

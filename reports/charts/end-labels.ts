@@ -11,7 +11,7 @@ export interface End {
 const APART = 14;
 
 /** Labels of lines that end close together are moved apart, and kept within the height of the plot. */
-export function spreadApart(ends: readonly End[], height: number): readonly (End & { readonly at: number })[] {
+function spreadApart(ends: readonly End[], height: number): readonly (End & { readonly at: number })[] {
   const sorted = [...ends].sort((a, b) => a.y - b.y || (a.label < b.label ? -1 : 1));
   const at = sorted.map((end) => Math.min(Math.max(end.y, 4), height - 4));
   for (let k = 1; k < at.length; k++) at[k] = Math.max(at[k]!, at[k - 1]! + APART);

@@ -11,7 +11,7 @@ export const palette = {
 } as const;
 
 /** Colour -> variable of the page's style. */
-export const variables: Readonly<Record<string, string>> = Object.fromEntries(
+const variables: Readonly<Record<string, string>> = Object.fromEntries(
   Object.entries(palette).map(([name, colour]) => [colour, `var(--${name})`]),
 );
 

@@ -2,7 +2,7 @@
  * Width of a text in px, by classes of letters of a common sans-serif face. The static pictures are drawn without a canvas, the live ones with one: both
  * use this measure, so that a picture does not shift when it comes alive. Accuracy: within about a tenth of what browsers' default faces take.
  */
-export function textWidth(text: string, size: number, bold = false): number {
+function textWidth(text: string, size: number, bold = false): number {
   let em = 0;
   for (const letter of text) em += widthOf(letter);
   return em * size * (bold ? 1.08 : 1);
