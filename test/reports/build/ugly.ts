@@ -3,7 +3,7 @@ import type { StudyResult } from '../../../pipeline/results/study-result.ts';
 import { madeStudy } from './study.ts';
 
 /** Text that breaks pages which do not escape, break lines or measure. */
-export const hostile = (plain: string): string =>
+const hostile = (plain: string): string =>
   `<script>document.title='${plain}'</script> "${plain}" & 'x' {{7*7}} \${1} \u202e${plain}\u202c =cmd|' /C calc'!A0 ${'Donaudampfschiff'.repeat(3)}`;
 
 /** The chosen fit with something changed. */
