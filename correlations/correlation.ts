@@ -34,7 +34,7 @@ export interface Limit {
 }
 
 /** A check from outside: printed worked example or table, an analytic limit, a stored page that prints the constants. Never a neighbour's agreement. */
-export interface Printed {
+interface Printed {
   readonly kind: 'worked example' | 'table' | 'analytic limit' | 'constants on a page';
   readonly at: Readonly<Record<string, number>>;
   readonly value: number;

@@ -47,7 +47,7 @@ class Stopped extends Error {
 }
 
 /** Recursive descent with a counted depth: sum > product > sign > power > atom. */
-export class Reader {
+class Reader {
   readonly #tokens: readonly Token[];
   readonly #kindOf: (name: string) => NameKind;
   readonly #names = new Map<string, number>();

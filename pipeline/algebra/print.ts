@@ -11,7 +11,7 @@ interface Piece {
 export type NumberText = (value: number) => string;
 
 /** Shortest text that reads back as the same number. */
-export const exactNumber: NumberText = (value) => String(value).replace('e+', 'e');
+const exactNumber: NumberText = (value) => String(value).replace('e+', 'e');
 
 /** `C * Re^a * Pr^(1/3)`; with `values`, numbers stand for the constants. Reads back as the same expression. */
 export function exprText(expr: Expr, values?: Readonly<Record<string, number>>, number: NumberText = exactNumber): string {

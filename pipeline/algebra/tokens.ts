@@ -18,7 +18,7 @@ const pieces =
   /\s+|(?<number>(?:\d+\.?\d*|\.\d+)(?:[eE][-+]?\d+)?)|(?<name>[\p{L}_][\p{L}\p{N}_]*)|(?<relation><=|>=|=|<|>|≤|≥)|(?<sign>[-+*/^(),−·])/uy;
 
 /** Longest text of a law in characters, and deepest nesting. */
-export const LONGEST = 2000;
+const LONGEST = 2000;
 export const DEEPEST = 100;
 
 export function tokensOf(text: string): readonly Token[] | AlgebraFault {

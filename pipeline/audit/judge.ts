@@ -104,7 +104,7 @@ function trendsOf(
 }
 
 /** Holm's step-down adjustment (Holm 1979, Scand. J. Statist. 6, 65-70). */
-export function holm(p: readonly number[]): readonly number[] {
+function holm(p: readonly number[]): readonly number[] {
   const order = p.map((_, i) => i).sort((a, b) => p[a]! - p[b]!);
   const adjusted = new Array<number>(p.length);
   let running = 0;

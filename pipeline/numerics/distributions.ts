@@ -1,7 +1,5 @@
 import chiCdf from '@stdlib/stats-base-dists-chisquare-cdf';
-import chiQuantile from '@stdlib/stats-base-dists-chisquare-quantile';
 import fishCdf from '@stdlib/stats-base-dists-f-cdf';
-import fishQuantile from '@stdlib/stats-base-dists-f-quantile';
 import gaussCdf from '@stdlib/stats-base-dists-normal-cdf';
 import gaussQuantile from '@stdlib/stats-base-dists-normal-quantile';
 import tCdf from '@stdlib/stats-base-dists-t-cdf';
@@ -16,6 +14,4 @@ export const studentCdf = (t: number, df: number): number => (df > MANY ? gaussC
 export const normalQuantile = (p: number): number => gaussQuantile(p, 0, 1);
 export const normalCdf = (z: number): number => gaussCdf(z, 0, 1);
 export const chiSquaredCdf = (x: number, df: number): number => chiCdf(x, df);
-export const chiSquaredQuantile = (p: number, df: number): number => chiQuantile(p, df);
 export const fCdf = (x: number, df1: number, df2: number): number => fishCdf(x, df1, df2);
-export const fQuantile = (p: number, df1: number, df2: number): number => fishQuantile(p, df1, df2);

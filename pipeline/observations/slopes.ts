@@ -10,7 +10,7 @@ export interface Slopes {
 }
 
 /** Step of a central difference: the cube root of the machine's precision, never beyond the uncertainty itself. */
-export const stepOf = (x: number, u: number): number => Math.min(u, 6e-6 * Math.max(Math.abs(x), u));
+const stepOf = (x: number, u: number): number => Math.min(u, 6e-6 * Math.max(Math.abs(x), u));
 
 /** Largest standard uncertainty that is stated of an input, SI. */
 export function statedUncertainty(input: Input, value: number, statistical: number): number {

@@ -21,7 +21,7 @@ const split = (key: Key): readonly [string, string] => {
 };
 
 /** The key of the same group on the other side of the analogy, or undefined where it has none. */
-export function counterpart(key: Key, to: 'heat' | 'mass'): Key | undefined {
+function counterpart(key: Key, to: 'heat' | 'mass'): Key | undefined {
   const [name, rest] = split(key);
   if (oneSided.has(name)) return undefined;
   const other = (to === 'mass' ? toMass : toHeat)[name];

@@ -13,7 +13,7 @@ import { splitHeader } from '../trials/header.ts';
 import type { Table } from '../trials/table.ts';
 import type { Faults } from './faults.ts';
 
-export type Stream = 'own' | 'other';
+type Stream = 'own' | 'other';
 
 /** Rules for the properties of the study's stream or streams. `tables`: the property tables the study names, by file. */
 export function planFluids(fluid: Study['fluid'], tables: ReadonlyMap<string, Table>, faults: Faults): readonly Rule[] {

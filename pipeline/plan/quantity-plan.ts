@@ -16,7 +16,7 @@ import { readingKey, referenceRules } from './references.ts';
 import { spreadsOf } from './spreads.ts';
 
 /** Said of a name or unit at its place; no fault. */
-export interface Remark {
+interface Remark {
   readonly code: string;
   readonly text: string;
   readonly place: Place;

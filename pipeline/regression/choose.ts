@@ -3,7 +3,7 @@ import { studentQuantile } from '../numerics/distributions.ts';
 import { type CrossValidation, foldLosses } from './cross-validate.ts';
 import type { Fit } from './fit.ts';
 
-export interface ComparedLaw {
+interface ComparedLaw {
   readonly law: string;
   readonly parameters: number;
   readonly aicc: number;

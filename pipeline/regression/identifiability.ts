@@ -25,7 +25,7 @@ export function collinearity(columns: readonly ArrayLike<number>[]): Collinearit
 }
 
 /** From this index on a design is told to be weak (Belsley, Kuh and Welsch 1980, section 3.2: 30 to 100 and above). */
-export const WEAK_INDEX = 30;
+const WEAK_INDEX = 30;
 
 /** Parameters that take part in the weakest direction: variance proportion above one half. */
 export function entangled({ indices, proportions }: Collinearity): readonly number[] {

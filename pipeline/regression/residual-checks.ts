@@ -67,7 +67,7 @@ export function serial(r: readonly number[]): { readonly lag1: number; readonly 
 }
 
 /** Quadratic trend of the residuals against a group, beyond a straight one: t test on the orthogonal quadratic contrast. */
-export function curvature(x: ArrayLike<number>, r: readonly number[]): { readonly p: number } | undefined {
+function curvature(x: ArrayLike<number>, r: readonly number[]): { readonly p: number } | undefined {
   const n = r.length;
   const xs = Array.from(x);
   const one = xs.map(() => 1);
@@ -86,7 +86,7 @@ export function curvature(x: ArrayLike<number>, r: readonly number[]): { readonl
 }
 
 /** Score test of scatter that changes with the fitted value (Breusch and Pagan 1979; studentised form of Koenker 1981). */
-export function unequalScatter(fitted: readonly number[], r: readonly number[]): { readonly p: number; readonly rises: boolean } {
+function unequalScatter(fitted: readonly number[], r: readonly number[]): { readonly p: number; readonly rises: boolean } {
   const squares = r.map((v) => v * v);
   const one = r.map(() => 1);
   const f = residualOf([...fitted], [one]);
@@ -96,7 +96,7 @@ export function unequalScatter(fitted: readonly number[], r: readonly number[]):
 }
 
 /** Skewness and kurtosis together (Jarque and Bera 1980). */
-export function jarqueBera(r: readonly number[]): { readonly p: number; readonly largest: number; readonly at: number } {
+function jarqueBera(r: readonly number[]): { readonly p: number; readonly largest: number; readonly at: number } {
   const n = r.length;
   const mean = r.reduce((sum, v) => sum + v, 0) / n;
   const moment = (k: number): number => r.reduce((sum, v) => sum + (v - mean) ** k, 0) / n;
@@ -107,7 +107,7 @@ export function jarqueBera(r: readonly number[]): { readonly p: number; readonly
 }
 
 /** F test of the scatter about the law against the scatter between replicates of one setting (pure error). */
-export function lackOfFit(
+function lackOfFit(
   residual: readonly number[],
   setting: readonly (string | undefined)[],
   parameters: number,

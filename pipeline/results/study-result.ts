@@ -57,7 +57,7 @@ export interface TrialRow {
 }
 
 /** One parameter's interval by one method: t, profile, bootstrap. */
-export interface IntervalRow {
+interface IntervalRow {
   readonly law: string;
   readonly parameter: string;
   readonly method: string;
@@ -140,4 +140,4 @@ export interface StudyResult {
   };
 }
 
-export type { Choice, Identifiability, InfluenceRow, LawCurve, TheoryTest };
+export type { Identifiability, LawCurve };

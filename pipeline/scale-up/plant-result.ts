@@ -1,7 +1,7 @@
 import type { Note } from '../base/message.ts';
 
 /** What one law (fitted, or published with its rig factor) says for one plant case. Coefficient in SI. */
-export interface CasePrediction {
+interface CasePrediction {
   readonly by: string;
   readonly kind: 'fitted law' | 'published with rig factor' | 'published as it stands';
   readonly coefficient: number;
@@ -15,7 +15,7 @@ export interface CasePrediction {
   readonly inRange: boolean;
 }
 
-export interface Extrapolation {
+interface Extrapolation {
   readonly of: string;
   readonly kind: 'group' | 'raw' | 'joint';
   readonly unit: string;
