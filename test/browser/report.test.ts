@@ -103,7 +103,7 @@ describe.skipIf(!existsSync(CHROMIUM) && process.env.CI === undefined)('reports 
     await inputs.nth(1).fill('5');
     await page.waitForTimeout(200);
     const said = /Nu = ([\d.]+), a new campaign between ([\d.]+) and ([\d.]+); the law alone ([\d.]+) to ([\d.]+)/.exec(
-      await page.locator('#plant').textContent(),
+      (await page.locator('#plant').textContent()) ?? '',
     );
     expect(said).not.toBeNull();
     [value, lower, upper, lawLower, lawUpper].forEach((number, k) => {
