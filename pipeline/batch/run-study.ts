@@ -76,12 +76,12 @@ function refuseWhatIsNotThere(study: Study): void {
       ? []
       : [{ code: 'series-not-read', text: says.seriesNotYet(), place: study.coefficient.place }]),
     ...(study.fit.monteCarlo ? [{ code: 'not-there-yet', text: says.settingNotYet('fit.monte_carlo'), place: top }] : []),
-    ...(study.output.assets === 'shared'
-      ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
-      : []),
     ...(['uncertainty', 'equal'].includes(study.fit.weights.is)
       ? []
       : [{ code: 'not-there-yet', text: says.settingNotYet('a column of weights'), place: study.fit.weights.place }]),
+    ...(study.output.assets === 'shared'
+      ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
+      : []),
   ];
   if (asked.length > 0) throw new InputError(asked);
 }
