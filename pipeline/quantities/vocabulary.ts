@@ -120,6 +120,13 @@ const list: readonly Quantity[] = [
   number('sphericity', 'ψ', 'sphericity'),
   // agitation
   quantity('rotation_speed', '1/s', 'n', 'rotational frequency, in revolutions', { revolutions: true, friendly: ['rpm'] }),
+  speed('tip_speed', 'u_tip', 'speed of the impeller tip'),
+  quantity('just_suspended_speed', '1/s', 'n_js', 'rotational frequency at which no solid rests on the bottom longer than 1 s to 2 s', {
+    revolutions: true,
+    friendly: ['rpm'],
+  }),
+  number('suspension_constant', 'S', 'constant of impeller and vessel in the just-suspended speed'),
+  number('solids_loading', 'X', 'mass of solids per mass of liquid'),
   quantity('power', 'W', 'P', 'shaft power, net, as gassed', { friendly: ['W', 'kW'] }),
   quantity('power_ungassed', 'W', 'P_0', 'shaft power without gas', { friendly: ['W', 'kW'] }),
   number('power_number', 'N_P', 'power number of the impeller'),

@@ -2,10 +2,12 @@ import { says } from '../../base/says/derived.ts';
 import type { Rule } from '../rule.ts';
 import { definition } from './definition.ts';
 import { gassedPower } from './gassed-power.ts';
+import { justSuspendedSpeed } from './just-suspended.ts';
 
 /** Power, power per mass and volume, and tip speed of an impeller. */
 export const agitationRules: readonly Rule[] = [
   definition('tip_speed', ['rotation_speed', 'impeller_diameter'], (n, d) => Math.PI * n! * d!, 'u_tip = pi N d'),
+  justSuspendedSpeed,
   definition(
     'power_ungassed',
     ['power_number', 'density', 'rotation_speed', 'impeller_diameter'],
