@@ -56,16 +56,23 @@ async function loadStudy(file: string): Promise<Loaded> {
     expects: columnsAsked(study),
   });
   const tables = new Map<string, Table>();
-  for (const entry of [study.fluid?.own, study.fluid?.other]) {
+  for (const entry of [study.fluid?.own, study.fluid?.other, study.plant?.fluid?.own, study.plant?.fluid?.other]) {
     const table = entry?.is.table;
-    if (table !== undefined) tables.set(table.is, readTable(inside(table), { file: table.is }));
+    if (table !== undefined && !tables.has(table.is)) tables.set(table.is, readTable(inside(table), { file: table.is }));
   }
+  const plant =
+    study.plant?.file === undefined
+      ? undefined
+      : readTable(inside(study.plant.file), {
+          file: study.plant.file.is,
+          ...(study.plant.sheet === undefined ? {} : { sheet: study.plant.sheet.is }),
+        });
   const { catalogue } = study.audit === undefined ? { catalogue: [] } : await import('../../correlations/catalogue.ts');
   const own =
     study.audit?.own === undefined
       ? []
       : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
-  return { plan: makePlan(study, { trials, tables, catalogue, own }), trials, files };
+  return { plan: makePlan(study, { trials, tables, catalogue, own, ...(plant === undefined ? {} : { plant }) }), trials, files };
 }
 
 /** Settings of the format that this version does not carry out are refused, all at once; none is passed over. */

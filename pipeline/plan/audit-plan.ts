@@ -9,7 +9,6 @@ import type { Key, Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
 import { keysOn } from './analogy.ts';
 import type { Faults } from './faults.ts';
-import type { GroupPlan } from './group-plan.ts';
 
 /** A correlation with its definitions on the trials' side of the analogy. */
 export interface Applicable {
@@ -51,9 +50,8 @@ export function applicable(
 }
 
 /** A study that has a group as a column of its own meets every definition of that group, on trust; each such key follows from the column. */
-export function trustRules(candidates: readonly Applicable[], { onTrust }: GroupPlan): readonly Rule[] {
-  const keys = new Set(candidates.flatMap((one) => Object.values(one.keys)));
-  return [...keys].flatMap((key) => {
+export function trustRules(keys: readonly Key[], onTrust: ReadonlySet<string>): readonly Rule[] {
+  return [...new Set(keys)].flatMap((key) => {
     const name = key.split('@')[0]!;
     if (!onTrust.has(name) || key === name) return [];
     return [
@@ -69,10 +67,9 @@ export function trustRules(candidates: readonly Applicable[], { onTrust }: Group
   });
 }
 
-/** Quantities that a user's correlation takes in a unit of its own: `velocity [ft/s]`. */
-export function unitRules(candidates: readonly Applicable[]): readonly Rule[] {
-  const keys = new Set(candidates.filter((one) => one.own).flatMap((one) => Object.values(one.keys)));
-  return [...keys].flatMap((key) => {
+/** Quantities that a law or a user's correlation takes in a unit of its own: `velocity [ft/s]`. */
+export function unitRules(keys: readonly Key[]): readonly Rule[] {
+  return [...new Set(keys)].flatMap((key) => {
     const [, name, text] = /^(.+) \[(.+)\]$/.exec(key) ?? [];
     const unit = name === undefined ? undefined : unitFor(quantityOf(name), text!);
     if (name === undefined || unit === undefined || isFault(unit)) return [];
@@ -81,6 +78,9 @@ export function unitRules(candidates: readonly Applicable[]): readonly Rule[] {
     ];
   });
 }
+
+/** Keys that correlations ask for. */
+export const keysAsked = (candidates: readonly Applicable[]): readonly Key[] => candidates.flatMap((one) => Object.values(one.keys));
 
 /** The definition behind a key in words; a quantity by what it is. */
 export const keyText = (key: Key): string => definitionText(key)?.text ?? quantityOf(key.split(' [')[0]!)?.says ?? key;

@@ -30,9 +30,9 @@ export interface GroupPlan {
   readonly formulas: Map<string, string>;
 }
 
-export function planGroups(study: Study, header: Header, dimensions: ReadonlyMap<Key, Dimension>, faults: Faults): GroupPlan {
+export function planGroups(groups: Study['groups'], header: Header, dimensions: ReadonlyMap<Key, Dimension>, faults: Faults): GroupPlan {
   const plan: GroupPlan = { keys: new Map(), inputs: [], columns: [], rules: [], onTrust: new Set(), formulas: new Map() };
-  for (const [name, { is, place }] of Object.entries(study.groups)) {
+  for (const [name, { is, place }] of Object.entries(groups)) {
     if (is.column !== undefined) columnGroup(name, is, header, plan, faults);
     else if (is.formula !== undefined) formulaGroup(name, is.formula.is, is.formula.place, dimensions, plan, faults);
     else basisGroup(name, is.basis?.is, is.at?.is, place, plan, faults);

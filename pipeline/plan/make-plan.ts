@@ -9,7 +9,7 @@ import type { Input, Key, Missing, Recipe, Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
 import { families } from '../study/study-schema.ts';
 import type { Table } from '../trials/table.ts';
-import { type Applicable, applicable, keyText, trustRules, unitRules } from './audit-plan.ts';
+import { type Applicable, applicable, keysAsked, keyText, trustRules, unitRules } from './audit-plan.ts';
 import { type CoefficientPlan, planCoefficient } from './coefficient-plan.ts';
 import { Faults } from './faults.ts';
 import { planFluids } from './fluid-plan.ts';
@@ -19,6 +19,8 @@ import { headerOf } from './header.ts';
 import { planLaws } from './law-plan.ts';
 import { namingsOf } from './namings.ts';
 import type { Candidate, Plan, PlannedLaw } from './plan.ts';
+import { type PlantBasis, plantBasis } from './plant-basis.ts';
+import { type PlantPlan, planPlant, plantExtras } from './plant-plan.ts';
 import { planQuantities } from './quantity-plan.ts';
 
 /** What a plan is made from beside the study file. */
@@ -28,17 +30,19 @@ export interface PlanInputs {
   readonly tables: ReadonlyMap<string, Table>;
   readonly catalogue: readonly Correlation[];
   readonly own: readonly Correlation[];
+  /** The plant's table, where the study names one. */
+  readonly plant?: Table;
 }
 
 /** Study + header -> Plan. Throws one InputError (exit 2) with every fault found so far. */
-export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanInputs): Plan {
+export function makePlan(study: Study, { trials, tables, catalogue, own, plant: plantTable }: PlanInputs): Plan {
   const faults = new Faults();
   if (!(families as readonly string[]).includes(study.equipment.is))
     faults.add('unknown-equipment', says.unknownEquipment(study.equipment.is, families), study.equipment.place);
   const header = headerOf(trials);
   const quantities = planQuantities(study.quantities, header, faults);
   const formulas = formulaRules(quantities.formulas, quantities.dimensions, faults);
-  const groups = planGroups(study, header, quantities.dimensions, faults);
+  const groups = planGroups(study.groups, header, quantities.dimensions, faults);
   const coefficient = planCoefficient(study, quantities, faults);
   const fluids = planFluids(study.fluid, tables, faults);
   const asked = applicable(study, catalogue, own, faults);
@@ -56,8 +60,15 @@ export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanI
   const { laws, rules } = planLaws({ study, groups: groups.keys, dimensions: quantities.dimensions, canHave }, faults);
   checkReferences(study, canHave, faults);
   faults.throwIfAny();
-  const book = ruleBook([...base, ...rules, ...trustRules(asked, groups), ...unitRules(asked)]);
+  const book = ruleBook([
+    ...base,
+    ...rules,
+    ...trustRules(keysAsked(asked), groups.onTrust),
+    ...unitRules(keysAsked(asked.filter((one) => one.own))),
+  ]);
   const settled = settle(study, book, inputs, laws, asked, coefficient, faults);
+  const basis = plantBasis(study, quantities, tables, settled.recipe);
+  const plant = faults.any ? undefined : plantOf(study, laws, settled, basis, plantTable, faults);
   faults.throwIfAny();
   return {
     study,
@@ -65,14 +76,46 @@ export function makePlan(study: Study, { trials, tables, catalogue, own }: PlanI
     book,
     laws,
     ...settled,
+    basis,
+    ...(plant === undefined ? {} : { plant }),
+    tried: resolve(book, inputs, [...new Set([...plantExtras, ...inputs.map(({ key }) => key)])]).recipe,
     namings: namingsOf(laws, groups, quantities.units),
     texts: quantities.texts,
     notes: [
       ...quantities.remarks.map((remark): Note => ({ section: 'method', level: 'note', ...remark })),
       ...assumptions(settled.recipe),
       ...givenNotes(book, inputs, settled.recipe),
+      ...(plant?.notes ?? []).map((note): Note => ({ section: 'plant', level: 'note', ...note })),
     ],
   };
+}
+
+/** The plant's cases by the definitions of the laws. Faults are told where the study names the plant. */
+function plantOf(
+  study: Study,
+  laws: readonly PlannedLaw[],
+  { candidates, coefficient }: Pick<Plan, 'candidates' | 'coefficient'>,
+  basis: PlantBasis,
+  table: Table | undefined,
+  faults: Faults,
+): PlantPlan | undefined {
+  if (study.plant === undefined || laws.length === 0) return undefined;
+  const response = laws[0]!.groups[laws[0]!.form.response]!;
+  const keys = new Map(laws.flatMap((law) => law.form.groups.map((name) => [law.groups[name]!, name] as const)));
+  if (coefficient !== null) keys.set(response, laws[0]!.form.response);
+  return planPlant(
+    {
+      basis,
+      keys,
+      response,
+      coefficient: coefficient?.key,
+      others: candidates.filter((one) => one.lacks.length === 0).flatMap((one) => Object.values(one.keys)),
+      settings: study.plant,
+      ...(table === undefined ? {} : { table }),
+      place: study.plant.file?.place ?? study.laws[0]!.form.place,
+    },
+    faults,
+  );
 }
 
 /** Whether a key is given or can be derived, remembered. */

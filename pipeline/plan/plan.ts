@@ -6,6 +6,8 @@ import type { Unit } from '../quantities/unit.ts';
 import type { RuleBook } from '../rules/resolve.ts';
 import type { Key, Recipe } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
+import type { PlantBasis } from './plant-basis.ts';
+import type { PlantPlan } from './plant-plan.ts';
 
 /** A column of the trial table that a recipe's input is read from, its unit settled. */
 export interface DeclaredColumn {
@@ -64,6 +66,12 @@ export interface Plan {
   readonly candidates: readonly Candidate[];
   readonly namings: ReadonlyMap<Key, Naming>;
   readonly coefficient: { readonly key: Key; readonly symbol: string; readonly unit: string } | null;
+  /** What a plant case takes over. */
+  readonly basis: PlantBasis;
+  /** Absent where the study names no plant. */
+  readonly plant?: PlantPlan;
+  /** Raw quantities of the trials that a plant case is held against: size, speed, power, time. */
+  readonly tried: Recipe;
   /** Text quantities such as impeller_type. */
   readonly texts: Readonly<Record<string, string>>;
   readonly notes: readonly Note[];

@@ -103,4 +103,6 @@ export const says = {
   seriesTrial: (): string => 'one log for several trials needs trial: the column of the log that names the trial',
   windowReversed: (): string => 'give the earlier end of the window first, such as [0 s, 120 s]',
   noLineFeed: (): string => 'the log has no line feeds; save it with one row a line',
+  caseTwice: (name: string, line: number): string =>
+    `the case ${quoted(name)} stands in line ${line} already; give each case a name of its own`,
 };
