@@ -1,3 +1,4 @@
+import { acceptedCorrelations } from './audit/accepted.ts';
 import { audit } from './audit/audit.ts';
 import type { AuditResult } from './audit/verdict.ts';
 import { InputError } from './base/input-error.ts';
@@ -19,6 +20,8 @@ import { cautionsFor } from './results/cautions.ts';
 import { lawCurves } from './results/curves.ts';
 import type { StudyResult } from './results/study-result.ts';
 import type { Key } from './rules/rule.ts';
+import { scaleUpFacts, standingLaws } from './scale-up/from-trials.ts';
+import { scaleUp } from './scale-up/scale-up.ts';
 import type { Trials } from './trials/read-trials.ts';
 
 /** What a run brings along beside the plan and the trials. */
@@ -59,7 +62,18 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
   // 4. Audit: every published correlation against the same observations.
   const audited = auditOf(plan, observed, chosen, choice, options);
 
-  // 5. Budget: which instrument carries the uncertainty of the law.
+  // 5. Scale-up: what the standing laws and correlations say for each plant case.
+  const plant =
+    plan.plant === undefined
+      ? null
+      : scaleUp({
+          plan: plan.plant,
+          ...scaleUpFacts(plan, read.value, observed.value),
+          ...standingLaws(contenders, choice, chosen),
+          correlations: audited === null ? [] : acceptedCorrelations(audited, plan.candidates, observations, options),
+        });
+
+  // 6. Budget: which instrument carries the uncertainty of the law.
   const budget = lawBudgets(
     chosen.fit,
     chosen.data,
@@ -67,10 +81,10 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     keysOf(chosen.law).map((key) => observations.keys.indexOf(key)),
   );
 
-  // 6. The chosen law as lines and bands.
+  // 7. The chosen law as lines and bands.
   const curves = lawCurves(chosen.fit, chosen.data, audited?.rows ?? []);
 
-  // 7. Everything as plain JSON, the only thing reports and writers see.
+  // 8. Everything as plain JSON, the only thing reports and writers see.
   const notes: readonly Note[] = [
     ...plan.notes,
     ...read.notes,
@@ -78,6 +92,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     ...contenders.flatMap(({ fit }) => fit.notes),
     ...evidence.notes,
     ...(audited?.notes ?? []),
+    ...(plant?.notes ?? []),
     ...notComputed(plan),
   ];
   return assemble({
@@ -88,7 +103,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     choice,
     evidence,
     audit: audited,
-    plant: null,
+    plant,
     nextTrials: null,
     budgets: budget,
     curves,
@@ -132,9 +147,6 @@ function auditOf(
 
 /** What the study asks for and this version does not compute is said where the reader would look for it. */
 const notComputed = ({ study }: Plan): readonly Note[] => [
-  ...(study.plant === undefined
-    ? []
-    : [{ section: 'plant', level: 'warning', code: 'not-computed', text: says.notComputed('plant') } as const]),
   ...(study.rig === undefined
     ? []
     : [{ section: 'next-trials', level: 'warning', code: 'not-computed', text: says.notComputed('rig') } as const]),

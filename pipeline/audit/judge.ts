@@ -36,20 +36,7 @@ export function judge(
   const groups = spanningGroups(comparison, observations, trials);
   const data = ratioData(comparison, observations, trials, groups);
   const joint = fitRatio(comparison, data, groups, options);
-  const factor =
-    groups.length === 0
-      ? joint
-      : fitRatio(
-          comparison,
-          {
-            ...data,
-            x: [],
-            sigma: data.sigma.map((s) => s.slice(0, 1)),
-            systematic: data.systematic.map((s) => s.slice(0, data.sources.length)),
-          },
-          [],
-          options,
-        );
+  const factor = groups.length === 0 ? joint : factorFit(comparison, observations, trials, options);
   const limit = Math.log(1 + tolerance);
   const trends = trendsOf(joint, comparison, observations, trials, groups);
   const reach = reachOf(joint, data.x, true);
@@ -77,6 +64,10 @@ export function judge(
     sigma,
   };
 }
+
+/** The rig factor alone under the study's own error model: ln q without any trend. */
+export const factorFit = (comparison: Comparison, observations: Observations, trials: readonly number[], options: FitOptions): Fit =>
+  fitRatio(comparison, ratioData(comparison, observations, trials, []), [], options);
 
 function trendsOf(
   fit: Fit,

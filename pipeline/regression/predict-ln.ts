@@ -47,8 +47,25 @@ export interface Prediction {
   limit(side: 'low' | 'high', confidence: number): number;
 }
 
+/** All of a fit that a prediction needs: what `laws.json` keeps. */
+export type Predictable = Pick<
+  Fit,
+  | 'name'
+  | 'form'
+  | 'values'
+  | 'groups'
+  | 'free'
+  | 'shifts'
+  | 'components'
+  | 'covarianceRandom'
+  | 'residualDegreesOfFreedom'
+  | 'confidence'
+  | 'scale'
+  | 'ranges'
+> & { readonly campaigns: Pick<Fit['campaigns'], 'kind'> };
+
 /** A law's form made ready: value, d h/d parameter, d h/d group, h = ln f of ln x or f of x. */
-export function predictor(fit: Fit): (condition: Condition) => Prediction {
+export function predictor(fit: Predictable): (condition: Condition) => Prediction {
   const relative = fit.scale === 'relative';
   const h = relative ? call('ln', fit.form.tree) : fit.form.tree;
   const byConstant = fit.form.constants.map((name) => derivative(h, name));
@@ -65,7 +82,7 @@ export function predictor(fit: Fit): (condition: Condition) => Prediction {
 
 /** T_s = w^T K_s + (dh/dx)^T dx/ds + d ln factor/ds, every source of the trials and of the condition. */
 function signedSources(
-  fit: Fit,
+  fit: Predictable,
   w: readonly number[],
   slopes: Readonly<Record<string, number>>,
   byFactor: number,
@@ -83,7 +100,7 @@ function signedSources(
   );
 }
 
-function assemble(fit: Fit, centre: number, w: readonly number[], sources: Record<SourceId, number>, factor: number): Prediction {
+function assemble(fit: Predictable, centre: number, w: readonly number[], sources: Record<SourceId, number>, factor: number): Prediction {
   const component = (name: string): number => (fit.components.values[fit.components.names.indexOf(name)] ?? 0) * factor ** 2;
   const law = bilinear(w, fit.covarianceRandom, w);
   const [campaign, scatter] = [component('campaign'), component('scatter')];

@@ -1,7 +1,7 @@
 import type { Note } from '../base/message.ts';
 
 /** What one law (fitted, or published with its rig factor) says for one plant case. Coefficient in SI. */
-interface CasePrediction {
+export interface CasePrediction {
   readonly by: string;
   readonly kind: 'fitted law' | 'published with rig factor' | 'published as it stands';
   readonly coefficient: number;
@@ -15,7 +15,7 @@ interface CasePrediction {
   readonly inRange: boolean;
 }
 
-interface Extrapolation {
+export interface Extrapolation {
   readonly of: string;
   readonly kind: 'group' | 'raw' | 'joint';
   readonly unit: string;
