@@ -20,8 +20,10 @@ import { cautionsFor } from './results/cautions.ts';
 import { lawCurves } from './results/curves.ts';
 import type { StudyResult } from './results/study-result.ts';
 import type { Key } from './rules/rule.ts';
-import { scaleUpFacts, standingLaws } from './scale-up/from-trials.ts';
+import { casesToNarrow, forPlant, middleInputs, scaleUpFacts } from './scale-up/from-trials.ts';
+import { nextTrials } from './scale-up/next/next-trials.ts';
 import { scaleUp } from './scale-up/scale-up.ts';
+import { standingLaws } from './scale-up/standing-laws.ts';
 import type { Trials } from './trials/read-trials.ts';
 
 /** What a run brings along beside the plan and the trials. */
@@ -30,7 +32,11 @@ export interface RunFacts {
   readonly node: string;
   readonly seed: number;
   readonly files: readonly { readonly file: string; readonly sha256: string }[];
+  /** Further trials to propose; 3 where left out. */
+  readonly proposals?: number;
 }
+
+const PROPOSALS = 3;
 
 /**
  * The whole program on one page: a plan and the trials read for it -> the result of the study. Pure; the disk stays outside.
@@ -63,17 +69,39 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
   const audited = auditOf(plan, observed, chosen, choice, options);
 
   // 5. Scale-up: what the standing laws and correlations say for each plant case.
+  const raw = scaleUpFacts(plan, read.value, observed.value);
+  const carried = forPlant(plan, raw, contenders, choice);
   const plant =
     plan.plant === undefined
       ? null
       : scaleUp({
           plan: plan.plant,
-          ...scaleUpFacts(plan, read.value, observed.value),
-          ...standingLaws(contenders, choice, chosen),
+          ...raw,
+          laws: standingLaws(
+            contenders.map(({ fit }) => fit),
+            carried.accepted,
+            choice.law,
+          ),
+          largestSpread: carried.largestSpreads[choice.law]!,
           correlations: audited === null ? [] : acceptedCorrelations(audited, plan.candidates, observations, options),
         });
 
-  // 6. Budget: which instrument carries the uncertainty of the law.
+  // 6. Next trials: what in the rig's box would narrow those predictions most.
+  const next =
+    plan.rig === undefined
+      ? null
+      : nextTrials({
+          rig: plan.rig,
+          fit: chosen.fit,
+          data: chosen.data,
+          middle: middleInputs(plan.rig.recipe, read.value, observed.value),
+          cases: casesToNarrow(plan.plant, chosen.fit),
+          count: facts.proposals ?? PROPOSALS,
+          seed: facts.seed,
+          confidence: options.confidence,
+        });
+
+  // 7. Budget: which instrument carries the uncertainty of the law.
   const budget = lawBudgets(
     chosen.fit,
     chosen.data,
@@ -81,10 +109,10 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     keysOf(chosen.law).map((key) => observations.keys.indexOf(key)),
   );
 
-  // 7. The chosen law as lines and bands.
+  // 8. The chosen law as lines and bands.
   const curves = lawCurves(chosen.fit, chosen.data, audited?.rows ?? []);
 
-  // 8. Everything as plain JSON, the only thing reports and writers see.
+  // 9. Everything as plain JSON, the only thing reports and writers see.
   const notes: readonly Note[] = [
     ...plan.notes,
     ...read.notes,
@@ -93,7 +121,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     ...evidence.notes,
     ...(audited?.notes ?? []),
     ...(plant?.notes ?? []),
-    ...notComputed(plan),
+    ...(next?.notes ?? []),
   ];
   return assemble({
     plan,
@@ -104,7 +132,8 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     evidence,
     audit: audited,
     plant,
-    nextTrials: null,
+    nextTrials: next,
+    forPlant: carried,
     budgets: budget,
     curves,
     notes,
@@ -144,13 +173,6 @@ function auditOf(
     weight,
   }).value;
 }
-
-/** What the study asks for and this version does not compute is said where the reader would look for it. */
-const notComputed = ({ study }: Plan): readonly Note[] => [
-  ...(study.rig === undefined
-    ? []
-    : [{ section: 'next-trials', level: 'warning', code: 'not-computed', text: says.notComputed('rig') } as const]),
-];
 
 /** Order and setting of the trials that are left, for the looks at residuals. */
 function orderAndSetting(

@@ -3,7 +3,7 @@ import type { Candidate } from '../plan/plan.ts';
 import type { Fit, FitOptions } from '../regression/fit.ts';
 import { factorFit } from './judge.ts';
 import { compare } from './ratio.ts';
-import type { AuditResult } from './verdict.ts';
+import type { AuditResult, AuditRow } from './verdict.ts';
 
 /** A published correlation that the trials leave standing, with its rig factor as a fit of its own. */
 export interface Accepted {
@@ -29,10 +29,16 @@ export function acceptedCorrelations(
     return [
       {
         candidate,
-        label: `${row.authors} ${row.year}`,
+        label: labelOf(row, rows),
         asPublished: row.verdict === 'fits as published',
         factor: factorFit(comparison, observations, trials, options),
       },
     ];
   });
+}
+
+/** Authors and year; the identifier too where one publication gives more than one line. */
+function labelOf({ authors, year, id }: AuditRow, rows: readonly AuditRow[]): string {
+  const same = rows.filter((other) => other.authors === authors && other.year === year);
+  return same.length > 1 ? `${authors} ${year} (${id})` : `${authors} ${year}`;
 }

@@ -113,10 +113,10 @@ const columnsAsked = (study: Study): readonly string[] =>
   ].flatMap((one) => (one === undefined ? [] : [one.is]));
 
 /** One study to its result, nothing written. */
-export async function computeStudy(file: string, seed = SEED): Promise<StudyResult> {
+export async function computeStudy(file: string, seed = SEED, proposals?: number): Promise<StudyResult> {
   const { plan, trials, files } = await loadStudy(file);
   const read = readTrials(trials, plan.study.trials, plan.columns);
-  return analyse(plan, read, { version, node: process.versions.node, seed, files });
+  return analyse(plan, read, { version, node: process.versions.node, seed, files, ...(proposals === undefined ? {} : { proposals }) });
 }
 
 /** The main job: one study file to its results on disk. */

@@ -1,5 +1,5 @@
 import { says } from '../base/says/cli.ts';
-import { wrongCommandLine } from './arguments.ts';
+import { flag, wholeOption } from './arguments.ts';
 import type { Command } from './command.ts';
 
 /** `pilotlaw next-trials STUDY` */
@@ -12,7 +12,11 @@ export const nextTrialsCommand: Command = {
     { name: 'seed', value: 'N', about: says.optionSeed },
     { name: 'json', about: says.optionJson },
   ],
-  run: async () => {
-    throw wrongCommandLine(says.notYet('next-trials'));
+  run: async (given, terminal) => {
+    const count = wholeOption(given, 'count', 1, 50) ?? 3;
+    const seed = wholeOption(given, 'seed', 0, 2 ** 32 - 1);
+    const request = { study: String(given.study), count, json: flag(given, 'json'), ...(seed === undefined ? {} : { seed }) };
+    const { proposeTrials } = await import('./propose-trials.ts');
+    return proposeTrials(request, terminal);
   },
 };

@@ -22,6 +22,7 @@ import type { Candidate, Plan, PlannedLaw } from './plan.ts';
 import { type PlantBasis, plantBasis } from './plant-basis.ts';
 import { type PlantPlan, planPlant, plantExtras } from './plant-plan.ts';
 import { planQuantities } from './quantity-plan.ts';
+import { planRig } from './rig-plan.ts';
 
 /** What a plan is made from beside the study file. */
 export interface PlanInputs {
@@ -69,6 +70,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   const settled = settle(study, book, inputs, laws, asked, coefficient, faults);
   const basis = plantBasis(study, quantities, tables, settled.recipe);
   const plant = faults.any ? undefined : plantOf(study, laws, settled, basis, plantTable, faults);
+  const rig = study.rig === undefined ? undefined : planRig(study.rig, laws, book, inputs, faults);
   faults.throwIfAny();
   return {
     study,
@@ -78,6 +80,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
     ...settled,
     basis,
     ...(plant === undefined ? {} : { plant }),
+    ...(rig === undefined ? {} : { rig }),
     tried: resolve(book, inputs, [...new Set([...plantExtras, ...inputs.map(({ key }) => key)])]).recipe,
     namings: namingsOf(laws, groups, quantities.units),
     texts: quantities.texts,

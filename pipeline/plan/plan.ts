@@ -8,6 +8,7 @@ import type { Key, Recipe } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
 import type { PlantBasis } from './plant-basis.ts';
 import type { PlantPlan } from './plant-plan.ts';
+import type { RigPlan } from './rig-plan.ts';
 
 /** A column of the trial table that a recipe's input is read from, its unit settled. */
 export interface DeclaredColumn {
@@ -70,6 +71,8 @@ export interface Plan {
   readonly basis: PlantBasis;
   /** Absent where the study names no plant. */
   readonly plant?: PlantPlan;
+  /** Absent where the study has no rig section. */
+  readonly rig?: RigPlan;
   /** Raw quantities of the trials that a plant case is held against: size, speed, power, time. */
   readonly tried: Recipe;
   /** Text quantities such as impeller_type. */

@@ -8,8 +8,8 @@ import { quantityOf } from '../quantities/vocabulary.ts';
 import type { Placed, Study } from '../study/study.ts';
 import type { Faults } from './faults.ts';
 
-export const finds = ['area', 'length', 'liquid_volume', 'particle_count', 'time'] as const;
-export type Find = (typeof finds)[number];
+const finds = ['area', 'length', 'liquid_volume', 'particle_count', 'time'] as const;
+type Find = (typeof finds)[number];
 
 /** What the plant unit must do, SI. `rate`: W, kg/s or mol/s; `amount`: J, kg or mol, for a time; `difference`: K, kg/m^3 or mol/m^3. */
 export interface PlantTarget {

@@ -8,6 +8,7 @@ import type { Naming, Plan } from '../plan/plan.ts';
 import type { Choice, Contender } from '../regression/choose.ts';
 import type { Evidence } from '../regression/evidence.ts';
 import type { FitOptions } from '../regression/fit.ts';
+import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
 import type { Trials } from '../trials/read-trials.ts';
@@ -27,6 +28,7 @@ export interface Stages {
   readonly audit: AuditResult | null;
   readonly plant: PlantResult | null;
   readonly nextTrials: NextTrialsResult | null;
+  readonly forPlant: ForPlant;
   readonly budgets: readonly Budget[];
   readonly curves: readonly LawCurve[];
   readonly notes: readonly Note[];
@@ -93,6 +95,7 @@ export function assemble(stages: Stages): StudyResult {
     audit: stages.audit,
     plant: stages.plant,
     nextTrials: stages.nextTrials,
+    forPlant: stages.forPlant,
     budgets: stages.budgets,
     curves: stages.curves,
     series: [],

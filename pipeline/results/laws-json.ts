@@ -4,7 +4,7 @@ import type { StudyResult } from './study-result.ts';
 /** `laws.json`: every fitted law at full precision and all that `predict` needs on its own. A number that does not exist is null. */
 export function lawsJson(result: StudyResult): string {
   const laws = result.fits.map((fit) => lawRecord(fit, result));
-  return `${JSON.stringify({ format: 1, study: result.study, confidence: result.options.confidence, scale: result.options.error, coefficient: result.coefficient, laws }, null, 2)}\n`;
+  return `${JSON.stringify({ format: 1, study: result.study, confidence: result.options.confidence, scale: result.options.error, coefficient: result.coefficient ?? { key: result.response.key, symbol: result.response.symbol, unit: result.response.unit }, laws, for_plant: result.forPlant }, null, 2)}\n`;
 }
 
 function lawRecord(fit: Fit, result: StudyResult) {
@@ -14,6 +14,7 @@ function lawRecord(fit: Fit, result: StudyResult) {
     form: fit.form,
     text: fit.text,
     chosen: fit.name === result.chosen,
+    accepted: result.forPlant.accepted.includes(fit.name),
     parameters: fit.parameters.map((parameter) => ({
       name: parameter.name,
       estimate: parameter.estimate,
@@ -29,6 +30,10 @@ function lawRecord(fit: Fit, result: StudyResult) {
     covariance_random: fit.covarianceRandom,
     systematic: fit.shifts,
     components: fit.components,
+    free: fit.free,
+    values: fit.values,
+    residual_degrees_of_freedom: fit.residualDegreesOfFreedom,
+    campaign_effect: fit.campaigns.kind,
     groups: Object.fromEntries(
       Object.entries(fit.groups).map(([name, key]) => [name, result.columns.find((column) => column.key === key)?.text ?? key]),
     ),

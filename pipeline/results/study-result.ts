@@ -4,6 +4,7 @@ import type { Budget } from '../budget/budget.ts';
 import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
+import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import type { LawCurve } from './curves.ts';
 
@@ -112,6 +113,8 @@ export interface StudyResult {
   readonly audit: AuditResult | null;
   readonly plant: PlantResult | null;
   readonly nextTrials: NextTrialsResult | null;
+  /** What `predict` needs beside the laws. */
+  readonly forPlant: ForPlant;
   readonly budgets: readonly Budget[];
   /** The chosen law against each group that varies. */
   readonly curves: readonly LawCurve[];

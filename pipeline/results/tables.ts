@@ -1,4 +1,5 @@
 import { type ColumnTable, table } from 'arquero';
+import type { PlantResult } from '../scale-up/plant-result.ts';
 import { guarded } from './guarded.ts';
 import type { StudyResult, TrialRow } from './study-result.ts';
 
@@ -71,9 +72,10 @@ export function auditTable(result: StudyResult): ColumnTable | undefined {
 }
 
 /** `plant.csv`: one row for each case and law; values of the case and its groups, coefficient in SI with law and prediction interval. */
-export function plantTable(result: StudyResult): ColumnTable | undefined {
-  const plant = result.plant;
-  if (plant === null) return undefined;
+export const plantTable = ({ plant }: StudyResult): ColumnTable | undefined => (plant === null ? undefined : casesTable(plant));
+
+/** The same of plant cases that were predicted without a study. */
+export function casesTable(plant: PlantResult): ColumnTable {
   const rows = plant.cases.flatMap((one) => one.predictions.map((prediction, k) => ({ one, prediction, first: k === 0 })));
   const keysOf = (pick: (row: (typeof rows)[number]) => Readonly<Record<string, number>>): readonly string[] => [
     ...new Set(rows.flatMap((row) => Object.keys(pick(row)))),

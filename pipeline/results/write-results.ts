@@ -10,7 +10,7 @@ import { workbook } from './workbook.ts';
 const PROVENANCE = 'provenance.json';
 
 /** One line end after the last row. */
-const csvOf = (table: ColumnTable): string => `${table.toCSV().trimEnd()}\n`;
+export const csvOf = (table: ColumnTable): string => `${table.toCSV().trimEnd()}\n`;
 
 /** Every result file but the report, by name. */
 export function resultFiles(result: StudyResult): ReadonlyMap<string, string | Uint8Array> {

@@ -1,16 +1,21 @@
 import type { Observed } from '../observations/observe.ts';
 import { trialInputs } from '../observations/trial-inputs.ts';
 import type { Plan } from '../plan/plan.ts';
+import type { PlantPlan } from '../plan/plant-plan.ts';
 import { dimensionText } from '../quantities/dimension.ts';
 import { quantityOf } from '../quantities/vocabulary.ts';
 import type { Choice, Contender } from '../regression/choose.ts';
 import type { FitData } from '../regression/fit.ts';
 import type { Predictable } from '../regression/predict-ln.ts';
 import { evaluate } from '../rules/evaluate.ts';
-import type { Key } from '../rules/rule.ts';
+import type { Key, Recipe } from '../rules/rule.ts';
 import type { Trials } from '../trials/read-trials.ts';
+import { lawSpeaker } from './case-predictions.ts';
+import { evaluateAt } from './condition.ts';
 import { anchorOf } from './criteria.ts';
 import { lawSpread, type Tried, triedOf } from './extrapolation.ts';
+import type { ForPlant } from './for-plant.ts';
+import type { CaseToNarrow } from './next/next-trials.ts';
 import type { ScaleUpSpec } from './scale-up.ts';
 
 /** What the trials tell of themselves: raw ranges, the rig's middle, what the coefficient is called. */
@@ -52,20 +57,51 @@ function coefficients(key: Key, { recipe }: Plan, { evaluated }: Observed): read
   return node < 0 ? [] : evaluated.map(({ nodes }) => nodes[node]!);
 }
 
-/** The chosen law first, then the other accepted ones in their order; and the largest spread of the chosen one among its trials. */
-export function standingLaws(
+/** What laws.json carries so that a later prediction needs no study. */
+export function forPlant(
+  plan: Plan,
+  facts: Pick<ScaleUpSpec, 'tried' | 'anchor'>,
   contenders: readonly (Contender & { readonly data: FitData })[],
   choice: Choice,
-  chosen: Contender & { readonly data: FitData },
-): { readonly laws: readonly Predictable[]; readonly largestSpread: number } {
-  const accepted = choice.compared.filter((one) => one.accepted && one.law !== choice.law).map(({ law }) => law);
-  const others = contenders.filter(({ fit }) => accepted.includes(fit.name)).map(({ fit }) => fit);
-  return { laws: [chosen.fit, ...others], largestSpread: largestSpreadOf(chosen.fit, chosen.data) };
+): ForPlant {
+  return {
+    basis: plan.basis,
+    tried: facts.tried,
+    anchor: facts.anchor,
+    largestSpreads: Object.fromEntries(contenders.map(({ fit, data }) => [fit.name, largestSpreadOf(fit, data)])),
+    accepted: choice.compared.filter((one) => one.accepted).map(({ law }) => law),
+  };
 }
 
-export function largestSpreadOf(fit: Predictable, { x, trials, scale }: FitData): number {
+function largestSpreadOf(fit: Predictable, { x, trials, scale }: FitData): number {
   const spread = lawSpread(fit);
   const at = (i: number): Record<string, number> =>
     Object.fromEntries(fit.form.groups.map((name, g) => [name, scale === 'relative' ? Math.exp(x[g]![i]!) : x[g]![i]!]));
   return trials.reduce((most, _, i) => Math.max(most, spread(at(i))), 0);
+}
+
+/** Each plant case as the chosen law predicts it, for the choice of further trials. */
+export function casesToNarrow(plant: PlantPlan | undefined, fit: Predictable): readonly CaseToNarrow[] {
+  if (plant === undefined) return [];
+  const speaker = lawSpeaker(fit, plant.perCoefficient);
+  return plant.cases.flatMap(({ name, inputs }) => {
+    const at = evaluateAt(plant.recipe, inputs, [...speaker.keys, ...(plant.perCoefficient === undefined ? [] : [plant.perCoefficient])]);
+    const prediction = speaker.predict(at);
+    const groups = Object.fromEntries(fit.form.groups.map((group) => [group, at.value(fit.groups[group]!)]));
+    return Number.isFinite(prediction.value) ? [{ name, groups, prediction }] : [];
+  });
+}
+
+/** Medians of the used trials for the inputs of a recipe; constants as they are. */
+export function middleInputs(recipe: Recipe, read: Trials, { observations }: Observed): readonly number[] {
+  const used = new Set(observations.trials);
+  const rows = trialInputs(recipe, read).filter(({ trial }) => used.has(trial));
+  return recipe.inputs.map((_, j) => {
+    const values = rows
+      .map(({ inputs }) => inputs[j]!)
+      .filter(Number.isFinite)
+      .sort((a, b) => a - b);
+    const half = Math.floor(values.length / 2);
+    return values.length % 2 === 1 ? values[half]! : (values[half - 1]! + values[half]!) / 2;
+  });
 }

@@ -15,5 +15,5 @@ test('used trials as a DataFrame: complete columns, the same mean as arquero’s
   expect(trials.columns).toContain('u_ln_Nu');
   expect(Math.abs((trials.column('Nu').mean() as number) / expected - 1)).toBeLessThan(1e-6);
   expect(trials.describe().columns).toContain('Nu');
-  expect(plant).toBeUndefined();
+  expect(plant!.shape[0]).toBe(result.plant!.cases.flatMap((one) => one.predictions).length);
 });

@@ -4,6 +4,4 @@ export const notFitted = (law: string, why: string, notes: readonly string[]): s
   `${law} could not be fitted (${why})${notes.length === 0 ? '' : `: ${notes.join(' ')}`}`;
 export const seriesNotYet = (): string =>
   'logged curves (coefficient.series) are not read by this version; give the coefficient, or the two readings that the route takes instead';
-export const notComputed = (key: string): string =>
-  `The study has a section "${key}", and nothing is computed from it by this version: its numbers are missing here, not zero.`;
 export const settingNotYet = (setting: string): string => `${setting} is not carried out by this version; leave it out`;

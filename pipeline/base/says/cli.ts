@@ -32,8 +32,11 @@ export const says = {
   optionAt: 'Evaluate there, such as "Re=6071, Pr=0.70"',
   optionCount: 'How many trials to propose',
   optionOutFile: 'File to write instead of standard output',
-  notYet: (command: string): string =>
-    `${command} is not part of this version yet: laws.json holds the law with its covariance and ranges for use elsewhere`,
+  optionConservative: 'Side on which the coefficient is dangerous: low (default) or high',
+  notASide: (read: string): string => `--conservative takes low or high, not "${read}"`,
+  tableWritten: (cases: number, file: string): string => `${cases} ${cases === 1 ? 'case' : 'cases'} predicted; ${file} is written`,
+  noRig: (): string =>
+    'the study has no rig section, so nothing may be proposed; say what a trial can set, such as rig: {rotation_speed: [100 rpm, 600 rpm]}',
   studyExists: (): string => 'this study file exists; --force overwrites it',
   begun: (file: string, questions: number): string =>
     questions === 0 ? `${file} is written` : `${file} is written; ${questions} ${questions === 1 ? 'question is' : 'questions are'} open:`,

@@ -27,3 +27,7 @@ export const targetLacks = (find: string, rate: string): string =>
 export const targetKinds = (): string => 'rate and driving difference of a target are both by mass or both by amount of substance';
 export const targetAmount = (key: string, text: string, units: readonly string[]): string =>
   `"${text}" is no ${key}: give a positive value in ${units.join(' or ')} or a multiple of it`;
+export const unknownRigSetting = (key: string, meant: string | undefined): string =>
+  `"${key}" is no quantity of this study that a trial could set${meant === undefined ? '' : `; did you mean "${meant}"?`}`;
+export const rigEmpty = (): string =>
+  'rig names nothing that a next trial may set; give a range such as rotation_speed: [100 rpm, 600 rpm]';

@@ -44,3 +44,9 @@ export const sheetGroups = (): string => 'Groups: change these';
 export const sheetFrom = (): string => 'tried from';
 export const sheetTo = (): string => 'tried to';
 export const sheetNoFormula = (): string => 'this law has no spreadsheet formula (it holds an implicit friction factor)';
+
+export const noLaws = (why: string): string => `this is no laws.json of pilotlaw: ${why}`;
+export const wrongLaws = (why: string): string =>
+  `this laws.json cannot be used for a prediction: ${why}; run the study again to write it anew`;
+export const noSuchLaw = (name: string, known: readonly string[]): string =>
+  `there is no law "${name}" in it; its laws are ${known.join(', ')}`;
