@@ -41,6 +41,8 @@ export interface Prediction {
   readonly sources: Readonly<Record<SourceId, number>>;
   /** Standard deviation of all of it. */
   readonly standardDeviation: number;
+  /** Intervals are symmetric in ln value. */
+  readonly relative: boolean;
   /** The variance between campaigns is not known from these trials, so it is not in the interval. */
   readonly withoutCampaigns: boolean;
   /** One-sided limit at a confidence, with all parts. */
@@ -133,6 +135,7 @@ function assemble(fit: Predictable, centre: number, w: readonly number[], source
     variance: { law, campaign, scatter },
     sources,
     standardDeviation: sd,
+    relative: fit.scale === 'relative',
     withoutCampaigns: fit.campaigns.kind !== 'random',
     limit: (side, confidence) =>
       natural(centre + (side === 'low' ? -1 : 1) * (sd > 0 ? studentQuantile(confidence, degreesOfFreedom) * sd : 0)),

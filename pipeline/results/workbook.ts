@@ -1,6 +1,6 @@
 import { utils, write } from '@e965/xlsx';
 import type { ColumnTable } from 'arquero';
-import { formulaSheet } from './formula-sheet.ts';
+import { lawSheet } from './law-sheet.ts';
 import type { StudyResult } from './study-result.ts';
 import { auditTable, plantTable, trialsTable } from './tables.ts';
 
@@ -14,7 +14,7 @@ export function workbook(result: StudyResult): Uint8Array {
     ['audit', auditTable(result)],
     ['plant', plantTable(result)],
   ];
-  utils.book_append_sheet(book, formulaSheet(result), 'law');
+  utils.book_append_sheet(book, lawSheet(result), 'law');
   for (const [name, table] of sheets) if (table !== undefined) utils.book_append_sheet(book, utils.aoa_to_sheet(cellsOf(table)), name);
   return new Uint8Array(write(book, { type: 'array', bookType: 'xlsx', compression: true }) as ArrayBuffer);
 }

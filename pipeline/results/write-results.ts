@@ -2,6 +2,7 @@ import { join } from 'node:path';
 import type { ColumnTable } from 'arquero';
 import { sha256 } from '../files/hash.ts';
 import { makeFolder, removeFile, replaceFile } from '../files/write.ts';
+import { lawPython } from './law-python.ts';
 import { lawsJson } from './laws-json.ts';
 import type { StudyResult } from './study-result.ts';
 import { auditTable, plantTable, trialsTable } from './tables.ts';
@@ -23,6 +24,9 @@ export function resultFiles(result: StudyResult): ReadonlyMap<string, string | U
   if (audited !== undefined) files.set('audit.csv', csvOf(audited));
   if (plant !== undefined) files.set('plant.csv', csvOf(plant));
   files.set('results.xlsx', workbook(result));
+  const fit = result.fits.find(({ name }) => name === result.chosen)!;
+  const python = lawPython(fit, result.study.title, fit.text);
+  if (python !== undefined) files.set('law.py', python);
   return files;
 }
 

@@ -50,3 +50,31 @@ export const wrongLaws = (why: string): string =>
   `this laws.json cannot be used for a prediction: ${why}; run the study again to write it anew`;
 export const noSuchLaw = (name: string, known: readonly string[]): string =>
   `there is no law "${name}" in it; its laws are ${known.join(', ')}`;
+
+export const pythonHead = (title: string, formula: string): string =>
+  `"""${title}: ${formula}
+
+A fitted law with its intervals; predict({...}) takes group values by name. Outside RANGES it extrapolates.
+These numbers are input to a review by a qualified engineer; local codes and licensed practice come first.
+"""`;
+
+export const sheetFactor = (): string => 'factor';
+export const sheetFactorRemark = (): string =>
+  'turns the response into what is wanted, such as conductivity over length; 1 leaves it as it is';
+export const sheetConfidence = (): string => 'confidence';
+export const sheetSources = (): string => 'Shift of ln result at the plant by one standard uncertainty';
+export const sheetSourcesRemark = (): string =>
+  'of sources that the plant shares with the rig (of the result itself for an absolute law); 0 where it does not';
+export const sheetTimesFactor = (): string => 'times factor';
+export const sheetLawLower = (): string => 'law, lower';
+export const sheetLawUpper = (): string => 'law, upper';
+export const sheetLower = (): string => 'new campaign, lower';
+export const sheetUpper = (): string => 'new campaign, upper';
+export const sheetWorking = (): string => 'Working';
+export const sheetPhi = (): string => 'covariance of the parameters';
+export const sheetSlope = (): string => 'its slope to the variance of';
+export const sheetShifts = (): string => 'shift by each source';
+export const sheetKnown = (): string => 'variance of the sources';
+export const sheetRest = (): string => 'variance of campaign and scatter';
+export const sheetFreedom = (): string => 'degrees of freedom';
+export const sheetHalf = (): string => 'half-width';
