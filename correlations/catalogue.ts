@@ -4,6 +4,7 @@ import { naturalConvection } from './natural-convection/index.ts';
 import { packedBed } from './packed-bed/index.ts';
 import { plate } from './plate/index.ts';
 import { sphere } from './sphere/index.ts';
+import { suspendedSolids } from './suspended-solids/index.ts';
 import { tube } from './tube/index.ts';
 import { vessel } from './vessel/index.ts';
 import { wettedWall } from './wetted-wall/index.ts';
@@ -17,5 +18,6 @@ export const catalogue: readonly Correlation[] = [
   ...naturalConvection,
   ...packedBed,
   ...vessel,
+  ...suspendedSolids,
   ...wettedWall,
 ];

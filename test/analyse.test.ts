@@ -51,6 +51,15 @@ describe('invented studies', () => {
     expect(leftOut).toBe(1);
   });
 
+  // drawn from Sh = 2 + 0.58 Re^0.52 Sc^(1/3): not from the exponent 3/4 of Calderbank and Moo-Young
+  test('pellets-dissolving is held against the correlations of suspended solids', async () => {
+    const { audit } = await study('pellets-dissolving');
+    const verdicts = new Map(audit!.rows.map((one) => [one.id, one.verdict]));
+    expect(verdicts.get('calderbank-moo-young-1961-turbulent')).toBe('wrong trend');
+    expect(verdicts.get('armenante-kirwan-1989')).not.toBe('wrong trend');
+    expect(verdicts.get('levins-glastonbury-1972-slip')).toBe('not comparable');
+  });
+
   test('the same inputs give the same bytes, and hostile text stays text', async () => {
     const result = await study('water-in-a-tube');
     const named = { ...result, study: { ...result.study, title: '<script>alert(1)</script>' } };
