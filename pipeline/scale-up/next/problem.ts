@@ -44,7 +44,7 @@ export function standingOf(fit: Fit, data: FitData): Standing {
       return shift.map((_, i) => shift.reduce((sum, value, j) => sum + information[i * p + j]! * value, 0));
     }),
     variance: own.reduce((sum, v) => sum + v, 0) / own.length,
-    shrink: shrinkOf(fit.campaigns.kind, tau2),
+    shrink: shrinkOf(fit.campaigns.kind, tau2 + errorOfTau2(fit)),
     fresh: { h: zeros(fit.free), s: 0, e: zeros(sources) },
     last: {
       h: x.map((column) => members.reduce((sum, i) => sum + column[i]! / own[i]!, 0)),
@@ -56,6 +56,15 @@ export function standingOf(fit: Fit, data: FitData): Standing {
     sources,
     scale,
   };
+}
+
+/**
+ * Standard error of tau^2. A further campaign is counted with tau^2 one standard error above its estimate: few campaigns often estimate nil, and a plan that
+ * believes it leans on a level that it cannot know.
+ */
+function errorOfTau2({ components }: Fit): number {
+  const at = components.names.indexOf('campaign');
+  return at < 0 ? 0 : Math.sqrt(components.covariance[at]![at]!);
 }
 
 const shrinkOf = (kind: Fit['campaigns']['kind'], tau2: number): ((s: number) => number) => {
