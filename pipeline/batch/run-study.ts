@@ -1,4 +1,4 @@
-import { dirname, join, resolve } from 'node:path';
+import { basename, dirname, join, resolve } from 'node:path';
 import { analyse, type RunFacts } from '../analyse.ts';
 import { InputError } from '../base/input-error.ts';
 import * as says from '../base/says/analyse.ts';
@@ -38,9 +38,10 @@ interface Loaded {
   readonly files: RunFacts['files'];
 }
 
-/** Reads the study file and everything it names; throws one InputError with all faults. */
-async function loadStudy(file: string): Promise<Loaded> {
-  const folder = dirname(resolve(file));
+/** Reads the study file and everything it names; throws one InputError with all faults. Nothing of the path typed goes into the plan. */
+async function loadStudy(path: string): Promise<Loaded> {
+  const folder = dirname(resolve(path));
+  const file = basename(path);
   const files: { file: string; sha256: string }[] = [];
   const bytesOf = (name: string, path: string, place?: Placed<string>['place'], most = MOST_TABLE): Buffer => {
     const bytes = readBytes(path, { most, name, ...(place === undefined ? {} : { place }) });
@@ -48,7 +49,7 @@ async function loadStudy(file: string): Promise<Loaded> {
     return bytes;
   };
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
-  const study = parseStudy(studyText(bytesOf('study.yaml', file, undefined, MOST_STUDY), file), file);
+  const study = parseStudy(studyText(bytesOf(file, path, undefined, MOST_STUDY), file), file);
   refuseWhatIsNotThere(study);
   const trials = readTable(inside(study.trials.file), {
     file: study.trials.file.is,
@@ -113,17 +114,20 @@ const columnsAsked = (study: Study): readonly string[] =>
   ].flatMap((one) => (one === undefined ? [] : [one.is]));
 
 /** One study to its result, nothing written. */
-export async function computeStudy(file: string, seed = SEED, proposals?: number): Promise<StudyResult> {
-  const { plan, trials, files } = await loadStudy(file);
-  const read = readTrials(trials, plan.study.trials, plan.columns);
-  return analyse(plan, read, { version, node: process.versions.node, seed, files, ...(proposals === undefined ? {} : { proposals }) });
-}
+export const computeStudy = async (file: string, seed = SEED, proposals?: number): Promise<StudyResult> =>
+  (await computed(file, seed, proposals)).result;
+
+const computed = (file: string, seed = SEED, proposals?: number): Promise<{ readonly plan: Plan; readonly result: StudyResult }> =>
+  withPlacesFrom(file, async () => {
+    const { plan, trials, files } = await loadStudy(file);
+    const read = readTrials(trials, plan.study.trials, plan.columns);
+    const facts = { version, node: process.versions.node, seed, files, ...(proposals === undefined ? {} : { proposals }) };
+    return { plan, result: analyse(plan, read, facts) };
+  });
 
 /** The main job: one study file to its results on disk. */
 export async function runStudy(file: string, { out, seed }: RunOptions = {}): Promise<StudySummary> {
-  const { plan, trials, files } = await loadStudy(file);
-  const read = readTrials(trials, plan.study.trials, plan.columns);
-  const result = analyse(plan, read, { version, node: process.versions.node, seed: seed ?? SEED, files });
+  const { plan, result } = await computed(file, seed);
   const { renderReport } = await import('../../reports/page.ts');
   const { html, charts } = await renderReport(result);
   const written = new Map(resultFiles(result));
@@ -135,7 +139,18 @@ export async function runStudy(file: string, { out, seed }: RunOptions = {}): Pr
 }
 
 /** What is given, what is derived from what, what is missing; computes nothing. */
-export async function checkStudy(file: string): Promise<string> {
-  const { plan } = await loadStudy(file);
-  return explain(plan);
+export const checkStudy = (file: string): Promise<string> => withPlacesFrom(file, async () => explain((await loadStudy(file)).plan, file));
+
+/** Inside a study files are named from its folder; a fault is told with the path that was typed, so that it can be found among several studies. */
+async function withPlacesFrom<T>(typed: string, work: () => Promise<T>): Promise<T> {
+  try {
+    return await work();
+  } catch (error) {
+    if (!(error instanceof InputError)) throw error;
+    const messages = error.messages.map((message) => ({
+      ...message,
+      place: message.place === undefined ? { file: typed } : { ...message.place, file: join(dirname(typed), message.place.file) },
+    }));
+    throw new InputError(messages, error.exit);
+  }
 }

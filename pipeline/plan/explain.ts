@@ -1,13 +1,13 @@
 import * as says from '../base/says/explain.ts';
 import type { Plan } from './plan.ts';
 
-/** What `check` prints: what is given, what is derived from what, which correlations are comparable, what they lack. */
-export function explain(plan: Plan): string {
+/** What `check` prints: what is given, what is derived from what, which correlations are comparable, what they lack. `file` is the study file as it was named. */
+export function explain(plan: Plan, file: string): string {
   const { recipe, laws, candidates, columns } = plan;
   const byKey = new Map(columns.map((column) => [column.key, column]));
   const given = recipe.inputs.filter((input) => !input.key.startsWith('factor: '));
   const lines = [
-    says.title(plan.study.title, plan.study.file),
+    says.title(plan.study.title, file),
     says.heading('given'),
     ...given.map((input) => {
       const column = byKey.get(input.key);
