@@ -51,7 +51,7 @@ const folder = join(import.meta.dirname, '../../datasets/nist-strd');
 /** Roszman1 prints b1 as 1.20196866396E-0; NIST's own value (memory) agrees with the certified residual deviation. */
 const MISPRINT = { file: 'Roszman1', parameter: 'b1', value: 0.20196866396 };
 
-export function readProblem(name: string): Problem {
+function readProblem(name: string): Problem {
   const lines = readFileSync(join(folder, `${name}.dat`), 'utf8').split(/\r?\n/u);
   const numbers = (line: string): readonly number[] => (line.match(/[-+]?(?:\d+\.?\d*|\.\d+)(?:[eE][-+]?\d+)?/gu) ?? []).map(Number);
   const parameters = lines.flatMap((line) => {
@@ -82,7 +82,7 @@ export function readProblem(name: string): Problem {
 const digits = (found: number, certified: number): number =>
   Math.max(0, Math.min(11, -Math.log10(Math.abs(found - certified) / Math.abs(certified))));
 
-export interface Answer {
+interface Answer {
   readonly problem: string;
   readonly start: 1 | 2;
   /** Worst over the parameters, signs counted; worst over their standard errors; residual standard deviation. */
