@@ -15,6 +15,7 @@ import { evidenceOf, type Witness } from './regression/evidence.ts';
 import type { FitOptions } from './regression/fit.ts';
 import { fitData } from './regression/fit-data.ts';
 import { fitLaw, type LawToFit } from './regression/fit-law.ts';
+import { intervalRows } from './regression/intervals.ts';
 import { assemble } from './results/assemble.ts';
 import { cautionsFor } from './results/cautions.ts';
 import { lawCurves } from './results/curves.ts';
@@ -64,6 +65,13 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
   const choice = chooseLaw(contenders);
   const chosen = contenders.find(({ fit }) => fit.name === choice.law)!;
   const evidence = evidenceOf(contenders, { chosen: choice.law, ...orderAndSetting(read.value, observations.trials), options });
+
+  const intervals = [
+    ...intervalRows(chosen.law, chosen.fit, chosen.data, options),
+    ...contenders
+      .filter((one) => one !== chosen)
+      .flatMap(({ law, fit, data }) => intervalRows(law, fit, data, { ...options, resamples: 0 })),
+  ];
 
   // 4. Audit: every published correlation against the same observations.
   const audited = auditOf(plan, observed, chosen, choice, options);
@@ -130,6 +138,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     contenders,
     choice,
     evidence,
+    intervals,
     audit: audited,
     plant,
     nextTrials: next,

@@ -8,6 +8,7 @@ import type { Naming, Plan } from '../plan/plan.ts';
 import type { Choice, Contender } from '../regression/choose.ts';
 import type { Evidence } from '../regression/evidence.ts';
 import type { FitOptions } from '../regression/fit.ts';
+import type { IntervalRow } from '../regression/intervals.ts';
 import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
@@ -25,6 +26,7 @@ export interface Stages {
   readonly contenders: readonly Contender[];
   readonly choice: Choice;
   readonly evidence: Evidence;
+  readonly intervals: readonly IntervalRow[];
   readonly audit: AuditResult | null;
   readonly plant: PlantResult | null;
   readonly nextTrials: NextTrialsResult | null;
@@ -89,7 +91,7 @@ export function assemble(stages: Stages): StudyResult {
     chosen: choice.law,
     choice,
     theory: evidence.theory,
-    intervals: intervalsOf(contenders),
+    intervals: stages.intervals,
     influence: evidence.influence,
     identifiability: evidence.identifiability,
     audit: stages.audit,
@@ -126,14 +128,6 @@ function statementsOf(options: FitOptions, contenders: readonly Contender[]): re
     says.intervalMethod(options.confidence),
   ];
 }
-
-/** Each free parameter's interval with the method that made it. */
-const intervalsOf = (contenders: readonly Contender[]): StudyResult['intervals'] =>
-  contenders.flatMap(({ fit }) =>
-    fit.parameters
-      .filter((parameter) => !parameter.fixed)
-      .map(({ name, lower, upper, intervalBy }) => ({ law: fit.name, parameter: name, method: intervalBy, lower, upper, note: '' })),
-  );
 
 /** The same sentence is told once. */
 function distinct(notes: readonly Note[]): readonly Note[] {

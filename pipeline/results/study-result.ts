@@ -4,6 +4,7 @@ import type { Budget } from '../budget/budget.ts';
 import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
+import type { IntervalRow } from '../regression/intervals.ts';
 import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import type { LawCurve } from './curves.ts';
@@ -55,16 +56,6 @@ export interface TrialRow {
   readonly raw: Readonly<Record<string, number>>;
   readonly trace: readonly TraceStep[];
   readonly notes: readonly string[];
-}
-
-/** One parameter's interval by one method: t, profile, bootstrap. */
-interface IntervalRow {
-  readonly law: string;
-  readonly parameter: string;
-  readonly method: string;
-  readonly lower: number;
-  readonly upper: number;
-  readonly note: string;
 }
 
 /** The whole result of one study: plain JSON, the only thing that reports and the writers see. */

@@ -92,7 +92,7 @@ export function madeStudy(makings: Makings = {}): StudyResult {
         says: 'exponent a of Re = 0.79 (0.77 to 0.81) is compatible with 0.8',
       },
     ],
-    intervals: ['t', 'profile', 'parametric bootstrap'].flatMap((method) =>
+    intervals: (['t', 'profile', 'parametric bootstrap'] as const).flatMap((method) =>
       fit.parameters.map((p) => ({ law: lawName, parameter: p.name, method, lower: p.lower, upper: p.upper, note: '' })),
     ),
     influence: campaigns.slice(0, 20).map((left) => ({ kind: 'campaign' as const, left, values: { C: 0.0237, a: 0.786, b: 0.415 } })),
