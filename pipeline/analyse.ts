@@ -6,9 +6,11 @@ import type { Note } from './base/message.ts';
 import * as says from './base/says/analyse.ts';
 import type { Staged } from './base/staged.ts';
 import { lawBudgets } from './budget/law-budget.ts';
+import { monteCarlo, monteCarloNotes } from './observations/monte-carlo.ts';
 import { type Observed, observe } from './observations/observe.ts';
 import { trialInputs } from './observations/trial-inputs.ts';
 import type { Plan } from './plan/plan.ts';
+import { weightKey } from './plan/weight-plan.ts';
 import { type Choice, type Contender, chooseLaw, isUsable } from './regression/choose.ts';
 import { crossValidate } from './regression/cross-validate.ts';
 import { evidenceOf, type Witness } from './regression/evidence.ts';
@@ -52,9 +54,11 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
   const { observations } = observed.value;
   enoughTrials(plan, observed, read);
 
+  const weights = options.weights === 'column' ? weightsOf(read.value, observations.trials) : undefined;
+
   // 2. Observations -> fits: one for each law, each with its stopping reason, intervals and diagnostics.
   const contenders = plan.laws.map((law): Witness => {
-    const data = fitData(observations, keysOf(law));
+    const data = fitData(observations, keysOf(law), weights);
     const fit = fitLaw(law, data, options, 'law only');
     const cross = crossValidate(law, fit, data, options);
     return { law, data, fit: { ...fit, statistics: { ...fit.statistics, cvRmsLn: cross.rms, cvKind: cross.kind } }, cross };
@@ -125,6 +129,7 @@ export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): Stud
     ...plan.notes,
     ...read.notes,
     ...observed.notes,
+    ...(study.fit.monteCarlo ? sampledCheck(plan, observed.value, options) : []),
     ...contenders.flatMap(({ fit }) => fit.notes),
     ...evidence.notes,
     ...(audited?.notes ?? []),
@@ -181,6 +186,22 @@ function auditOf(
     lawName: choice.law,
     weight,
   }).value;
+}
+
+/** Draws a trial for the check of first-order propagation. */
+const SAMPLES = 4000;
+
+/** The used trials' readings drawn from their distributions, against what the fits assume (on demand). */
+function sampledCheck(plan: Plan, { evaluated }: Observed, { scale, seed }: FitOptions): readonly Note[] {
+  const trials = evaluated.map(({ trial }) => trial);
+  return monteCarloNotes(monteCarlo(plan.recipe, trials, { keys: [...plan.required], scale, samples: SAMPLES, seed }), SAMPLES);
+}
+
+/** Prior weights of the trials that are left, from the column that the study names. */
+function weightsOf({ keys, trials }: Trials, names: readonly string[]): Float64Array {
+  const at = keys.indexOf(weightKey);
+  const byName = new Map(trials.map(({ trial, values }) => [trial, values[at]!]));
+  return Float64Array.from(names, (name) => byName.get(name)!);
 }
 
 /** Order and setting of the trials that are left, for the looks at residuals. */

@@ -78,15 +78,10 @@ async function loadStudy(path: string): Promise<Loaded> {
 
 /** Settings of the format that this version does not carry out are refused, all at once; none is passed over. */
 function refuseWhatIsNotThere(study: Study): void {
-  const top = { file: study.file, line: 1, column: 1 };
   const asked = [
     ...(study.coefficient?.series === undefined
       ? []
       : [{ code: 'series-not-read', text: says.seriesNotYet(), place: study.coefficient.place }]),
-    ...(study.fit.monteCarlo ? [{ code: 'not-there-yet', text: says.settingNotYet('fit.monte_carlo'), place: top }] : []),
-    ...(['uncertainty', 'equal'].includes(study.fit.weights.is)
-      ? []
-      : [{ code: 'not-there-yet', text: says.settingNotYet('a column of weights'), place: study.fit.weights.place }]),
     ...(study.output.assets === 'shared'
       ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
       : []),
@@ -109,6 +104,7 @@ const columnsAsked = (study: Study): readonly string[] =>
     study.trials.campaign,
     study.trials.setting,
     study.trials.order,
+    ['uncertainty', 'equal'].includes(study.fit.weights.is) ? undefined : study.fit.weights,
     ...Object.values(study.quantities).map(({ is }) => is.column),
     ...Object.values(study.groups).map(({ is }) => is.column),
   ].flatMap((one) => (one === undefined ? [] : [one.is]));

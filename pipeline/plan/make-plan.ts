@@ -23,6 +23,7 @@ import { type PlantBasis, plantBasis } from './plant-basis.ts';
 import { type PlantPlan, planPlant, plantExtras } from './plant-plan.ts';
 import { planQuantities } from './quantity-plan.ts';
 import { planRig } from './rig-plan.ts';
+import { planWeights } from './weight-plan.ts';
 
 /** What a plan is made from beside the study file. */
 export interface PlanInputs {
@@ -43,6 +44,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   const header = headerOf(trials);
   const quantities = planQuantities(study.quantities, header, faults);
   const formulas = formulaRules(quantities.formulas, quantities.dimensions, faults);
+  const weights = planWeights(study, header, faults);
   const groups = planGroups(study.groups, header, quantities.dimensions, faults);
   const coefficient = planCoefficient(study, quantities, faults);
   const fluids = planFluids(study.fluid, tables, faults);
@@ -74,7 +76,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   faults.throwIfAny();
   return {
     study,
-    columns: [...quantities.columns, ...groups.columns],
+    columns: [...quantities.columns, ...groups.columns, ...weights],
     book,
     laws,
     ...settled,

@@ -30,6 +30,15 @@ audit: none
 const groupStudy = (plant: string, table: string): Promise<Awaited<ReturnType<typeof studyOf>>> =>
   studyOf({ 'study.yaml': `${columns}plant: ${plant}\n`, 'trials.csv': trials, 'plant.csv': table });
 
+const failure = async (study: Promise<unknown>): Promise<InputError> => {
+  const error = await study.then(
+    () => undefined,
+    (reason: unknown) => reason,
+  );
+  expect(error).toBeInstanceOf(InputError);
+  return error as InputError;
+};
+
 describe('a plant case by a law that is least squares', () => {
   // R 4.2.2 predict.lm, script and output in fixtures/predict-lm.R and .txt.
   test('confidence and prediction intervals as R gives them, inside and outside the range', async () => {
@@ -87,14 +96,43 @@ ${extra}`;
 const runs = `run,N [rpm],k [um/s]
 ${[200, 260, 330, 420, 520, 640].map((n, i) => `R${i},${n},${(4 * n ** 0.6 * [1.02, 0.97, 1.01, 0.99, 1.03, 0.98][i]!).toFixed(4)}`).join('\n')}
 `;
-const failure = async (study: Promise<unknown>): Promise<InputError> => {
-  const error = await study.then(
-    () => undefined,
-    (reason: unknown) => reason,
-  );
-  expect(error).toBeInstanceOf(InputError);
-  return error as InputError;
-};
+describe('settings of the fit through a whole study', () => {
+  const weighted = trials
+    .split('\n')
+    .map((line, i) => (line === '' ? '' : i === 0 ? `${line},w` : `${line},${((i - 1) % 4) + 1}`))
+    .join('\n');
+  const study = (fit: string): Promise<Awaited<ReturnType<typeof studyOf>>> =>
+    studyOf({ 'study.yaml': `${columns}fit: ${fit}\n`, 'trials.csv': weighted });
+
+  // R 4.2.2 lm(weights = w): fixtures/predict-lm.R, last line of its output.
+  test('a column of weights', async () => {
+    const { fits } = await study('{weights: w}');
+    const [c, a, b] = fits[0]!.parameters;
+    expect(c!.estimate).toBeCloseTo(0.0362934134753, 10);
+    expect(a!.estimate).toBeCloseTo(0.775516735471, 9);
+    expect(b!.estimate).toBeCloseTo(0.380994434542, 9);
+    expect(a!.standardError).toBeCloseTo(0.00533938681552, 9);
+    expect(b!.standardError).toBeCloseTo(0.017767206704, 8);
+    expect(fits[0]!.statistics.residualSd).toBeCloseTo(0.0276311685705, 8);
+  });
+
+  test('weights from a column that is not there, or that are not positive, are refused', async () => {
+    const missing = await failure(study('{weights: wt}'));
+    expect(missing.messages[0]!.text).toContain('"wt"');
+    const zero = studyOf({ 'study.yaml': `${columns}fit: {weights: w}\n`, 'trials.csv': weighted.replace(/,1$/mu, ',0') });
+    expect((await failure(zero)).messages[0]!.code).toBe('weight-not-positive');
+  });
+
+  test('the Monte Carlo check on demand', async () => {
+    const asked = await studyOf({
+      'study.yaml': vessel('fit: {monte_carlo: true}\n').replace('{column: k}', '{column: k, random: 3 %}'),
+      'trials.csv': runs,
+    });
+    const note = asked.notes.find((one) => one.code === 'monte-carlo')!;
+    expect(note.level).toBe('note');
+    expect(note.text).toContain('agrees with first-order propagation');
+  });
+});
 
 describe('what the plant shares with the rig', () => {
   // Analytic: with Sc^(1/3) the law's constant moves by D^(-2/3) and Sh to k by D^(2/3).
