@@ -1,5 +1,7 @@
 import type { Correlation } from './correlation.ts';
 import { cylinder } from './cylinder/index.ts';
+import { fluidisedBed } from './fluidised-bed/index.ts';
+import { gasLiquid } from './gas-liquid/index.ts';
 import { naturalConvection } from './natural-convection/index.ts';
 import { packedBed } from './packed-bed/index.ts';
 import { plate } from './plate/index.ts';
@@ -17,7 +19,9 @@ export const catalogue: readonly Correlation[] = [
   ...sphere,
   ...naturalConvection,
   ...packedBed,
+  ...fluidisedBed,
   ...vessel,
   ...suspendedSolids,
+  ...gasLiquid,
   ...wettedWall,
 ];

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const akitaYoshida1973 = published({
+  id: 'akita-yoshida-1973',
+  authors: 'Akita and Yoshida',
+  year: 1973,
+  title: 'Bubble column, one nozzle',
+  family: 'gas-liquid',
+  transfer: 'mass',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'volumetric_coefficient = C * diffusivity / vessel_diameter^2 * Sc^a * Bo^b * Ga^m * gas_holdup^n',
+  values: { C: 0.6, a: 0.5, b: 0.62, m: 0.31, n: 1.1 },
+  groups: {
+    volumetric_coefficient: 'volumetric_coefficient',
+    diffusivity: 'diffusivity',
+    vessel_diameter: 'vessel_diameter',
+    Sc: 'Sc',
+    Bo: 'Bo@vessel',
+    Ga: 'Ga@vessel',
+    gas_holdup: 'gas_holdup',
+  },
+  limits: [],
+  accuracy: 'not stated',
+  source: 'K. Akita, F. Yoshida, Ind. Eng. Chem. Process Des. Dev. 12 (1973) 76-80, doi 10.1021/i260045a015',
+  where: 'equation for the volumetric coefficient',
+  constantsFrom: 'page read',
+  use: 'Oxygen in water, glycol, glycerol, methanol; column of 0.15 m, gas up to 0.33 m/s. It is not said on the page read whether per volume of clear or aerated liquid.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_holdup: 0.12 },
+      value: 0.030209087,
+      tolerance: 6e-8,
+      source: 'public bioprocess code, page of volumetric coefficients',
+      where: '(D/d^2) 0.6 Sc^0.5 Bo^0.62 Ga^0.31 e^1.1, evaluated at this point; the page drops the square of the viscosity in Ga',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const calderbankMooYoung1961SmallBubbles = published({
+  id: 'calderbank-moo-young-1961-small-bubbles',
+  authors: 'Calderbank and Moo-Young',
+  year: 1961,
+  title: 'Small bubbles that behave as rigid spheres',
+  family: 'gas-liquid',
+  transfer: 'mass',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Sh = A + C * (Ar * Sc)^a',
+  values: { A: 2, C: 0.31, a: 1 / 3 },
+  groups: { Sh: 'Sh@bubble', Ar: 'Ar@bubble', Sc: 'Sc', bubble_diameter: 'bubble_diameter' },
+  limits: ['bubble_diameter <= 0.0025'],
+  accuracy: 'not stated',
+  source: 'P. H. Calderbank, M. B. Moo-Young, Chem. Eng. Sci. 16 (1961) 39-54, doi 10.1016/0009-2509(61)87005-X',
+  where: 'eq. (1) in the form with the stagnant limit',
+  constantsFrom: 'page read',
+  use: 'Bubbles below about 2.5 mm, or with a surface stiffened by surfactants.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'worked example',
+      at: { Ar: 20.05417732, Sc: 215.0441108 },
+      value: 7.05241660994,
+      tolerance: 0.00681,
+      source: 'Geankoplis, Transport Processes and Separation Process Principles, 4th ed., Prentice Hall 2003',
+      where: 'Example 7.4-1, oxygen bubbles of 0.1 mm in water at 37 C: printed flux 5.18e-8 kmol/(m2 s) (memory), turned to Sh',
+    },
+    {
+      kind: 'constants on a page',
+      at: { Ar: 25000.0, Sc: 500 },
+      value: 73.944627,
+      tolerance: 0.00015,
+      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      where: 'Sh = 2.0 + 0.31 Ra^(1/3), Ra = Ar Sc, evaluated at this point',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const posaracTekic1987 = published({
+  id: 'posarac-tekic-1987',
+  authors: 'Posarac and Tekic',
+  year: 1987,
+  title: 'Bubble column, dilute alcohols',
+  family: 'gas-liquid',
+  transfer: 'mass',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'volumetric_coefficient = C * diffusivity / vessel_diameter^2 * Sc^a * Bo^b * Ga^m * gas_holdup^n',
+  values: { C: 0.961, a: 0.5, b: 0.62, m: 0.31, n: 1.1 },
+  groups: {
+    volumetric_coefficient: 'volumetric_coefficient',
+    diffusivity: 'diffusivity',
+    vessel_diameter: 'vessel_diameter',
+    Sc: 'Sc',
+    Bo: 'Bo@vessel',
+    Ga: 'Ga@vessel',
+    gas_holdup: 'gas_holdup',
+  },
+  limits: [],
+  accuracy: 'not stated',
+  source: 'D. Posarac, M. N. Tekic, AIChE J. 33 (1987) 497-499, doi 10.1002/aic.690330316',
+  where: 'equation for the volumetric coefficient',
+  constantsFrom: 'page read',
+  use: 'Air in water with a little methanol to butanol; column of 0.1 m, gas 0.008 to 0.08 m/s. It is not said on the page read whether per volume of clear or aerated liquid.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_holdup: 0.12 },
+      value: 0.048384888,
+      tolerance: 9.7e-8,
+      source: 'public bioprocess code, page of volumetric coefficients',
+      where: '(D/d^2) 0.961 Sc^0.5 Bo^0.62 Ga^0.31 e^1.1, evaluated at this point',
+    },
+  ],
+});

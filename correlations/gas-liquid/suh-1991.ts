@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const suh1991 = published({
+  id: 'suh-1991',
+  authors: 'Suh, Schumpe, Deckwer and Kulicke',
+  year: 1991,
+  title: 'Bubble column, sucrose solutions',
+  family: 'gas-liquid',
+  transfer: 'mass',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'volumetric_coefficient = C * diffusivity / vessel_diameter^2 * Sc^a * Bo^b * Ga^m * (gas_velocity / (9.80665 * vessel_diameter)^0.5)^n',
+  values: { C: 0.018, a: 0.5, b: 0.75, m: 0.39, n: 0.51 },
+  groups: {
+    volumetric_coefficient: 'volumetric_coefficient',
+    diffusivity: 'diffusivity',
+    vessel_diameter: 'vessel_diameter',
+    Sc: 'Sc',
+    Bo: 'Bo@vessel',
+    Ga: 'Ga@vessel',
+    gas_velocity: 'gas_velocity',
+  },
+  limits: ['0.005 <= gas_velocity <= 0.04'],
+  accuracy: 'not stated',
+  source: 'I.-S. Suh, A. Schumpe, W.-D. Deckwer, W.-M. Kulicke, Can. J. Chem. Eng. 69 (1991) 506-512, doi 10.1002/cjce.5450690215',
+  where: 'equation for the volumetric coefficient',
+  constantsFrom: 'page read',
+  use: 'Air in aqueous sucrose, column of 0.15 m. It is not said on the page read whether per volume of clear or aerated liquid.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_velocity: 0.03 },
+      value: 0.027813597,
+      tolerance: 5.6e-8,
+      source: 'public bioprocess code, page of volumetric coefficients',
+      where: '(D/d^2) 0.018 Sc^0.5 Bo^0.75 Ga^0.39 (u/(g d)^0.5)^0.51, evaluated at this point',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const gunn1978 = published({
+  id: 'gunn-1978',
+  authors: 'Gunn',
+  year: 1978,
+  title: 'Particles of a fixed bed',
+  family: 'packed-bed',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = (A - B * voidage + D * voidage^2) * (1 + E * Re^a * Pr^(1/3)) + (F - G * voidage + H * voidage^2) * Re^b * Pr^(1/3)',
+  values: { A: 7, B: 10, D: 5, E: 0.7, a: 0.2, F: 1.33, G: 2.4, H: 1.2, b: 0.7 },
+  groups: { Nu: 'Nu@particle', Re: 'Re@particle', Pr: 'Pr', voidage: 'voidage' },
+  limits: ['Re <= 1e5', '0.35 <= voidage <= 1'],
+  accuracy: 'not stated',
+  source: 'D. J. Gunn, Int. J. Heat Mass Transfer 21 (1978) 467-476, doi 10.1016/0017-9310(78)90080-7',
+  where: 'as quoted by later authors for fixed and fluidised beds',
+  constantsFrom: 'page read',
+  use: 'Gas or liquid through fixed beds; superficial velocity.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Re: 120, Pr: 0.7, voidage: 0.42 },
+      value: 23.166916,
+      tolerance: 4.6e-5,
+      source: 'public collection of heat transfer formulas with their sources, page on beds',
+      where: 'Gunn: (7 - 10 e + 5 e^2)(1 + 0.7 Re^0.2 Pr^(1/3)) + (1.33 - 2.4 e + 1.2 e^2) Re^0.7 Pr^(1/3), evaluated at this point',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Re: 0, Pr: 1, voidage: 1 },
+      value: 2,
+      tolerance: 1e-12,
+      source: 'conduction from a sphere into an infinite medium at rest',
+      where: '7 - 10 + 5 = 2 at voidage 1 and Re 0',
+    },
+  ],
+});
