@@ -27,6 +27,7 @@ import { casesToNarrow, forPlant, middleInputs, scaleUpFacts } from './scale-up/
 import { nextTrials } from './scale-up/next/next-trials.ts';
 import { scaleUp } from './scale-up/scale-up.ts';
 import { standingLaws } from './scale-up/standing-laws.ts';
+import type { TrialsWithCurves } from './trials/curve-readings.ts';
 import type { Trials } from './trials/read-trials.ts';
 
 /** What a run brings along beside the plan and the trials. */
@@ -45,7 +46,7 @@ const PROPOSALS = 3;
  * The whole program on one page: a plan and the trials read for it -> the result of the study. Pure; the disk stays outside.
  * Throws InputError (exit 3) where the trials cannot carry any of the laws.
  */
-export function analyse(plan: Plan, read: Staged<Trials>, facts: RunFacts): StudyResult {
+export function analyse(plan: Plan, read: Staged<Trials | TrialsWithCurves>, facts: RunFacts): StudyResult {
   const { study } = plan;
   const options = optionsOf(plan, facts.seed);
 

@@ -1,12 +1,13 @@
 import { basename, dirname, join, resolve } from 'node:path';
 import { analyse, type RunFacts } from '../analyse.ts';
 import { InputError } from '../base/input-error.ts';
+import type { Place } from '../base/place.ts';
 import * as says from '../base/says/analyse.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
-import { sha256 } from '../files/hash.ts';
+import { sha256OfFile, sha256 } from '../files/hash.ts';
 import { pathInside } from '../files/inside.ts';
-import { readBytes } from '../files/read.ts';
+import { readBytes, readPieces } from '../files/read.ts';
 import { explain } from '../plan/explain.ts';
 import { makePlan } from '../plan/make-plan.ts';
 import { ownCorrelations } from '../plan/own-correlations.ts';
@@ -16,9 +17,11 @@ import { resultFiles, writeResults } from '../results/write-results.ts';
 import { parseOwnCorrelations } from '../study/own-correlations.ts';
 import { parseStudy } from '../study/parse-study.ts';
 import type { Placed, Study } from '../study/study.ts';
+import type { LogSource } from '../trials/log-stream.ts';
 import { readTable } from '../trials/read-table.ts';
 import { readTrials } from '../trials/read-trials.ts';
 import type { Table } from '../trials/table.ts';
+import { curvesOf } from './study-curves.ts';
 import { type StudySummary, summaryOf } from './summary.ts';
 
 export interface RunOptions {
@@ -30,12 +33,15 @@ export interface RunOptions {
 const SEED = 1;
 const MOST_STUDY = 1 << 20;
 const MOST_TABLE = 1 << 28;
+const MOST_LOG = 2 ** 33;
 
 /** A study read from disk with all it names. */
 interface Loaded {
   readonly plan: Plan;
   readonly trials: Table;
   readonly files: RunFacts['files'];
+  /** Opens a log that the study or its table names; its hash joins the others. */
+  readonly open: (file: string, place: Place) => LogSource;
 }
 
 /** Reads the study file and everything it names; throws one InputError with all faults. Nothing of the path typed goes into the plan. */
@@ -49,6 +55,11 @@ async function loadStudy(path: string): Promise<Loaded> {
     return bytes;
   };
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
+  const open = (name: string, place: Place): LogSource => {
+    const path = pathInside(folder, name, place);
+    if (!files.some((one) => one.file === name)) files.push({ file: name, sha256: sha256OfFile(path, { most: MOST_LOG, name, place }) });
+    return { file: name, pieces: readPieces(path, { most: MOST_LOG, name, place }) };
+  };
   const study = parseStudy(studyText(bytesOf(file, path, undefined, MOST_STUDY), file), file);
   refuseWhatIsNotThere(study);
   const trials = readTable(inside(study.trials.file), {
@@ -73,15 +84,12 @@ async function loadStudy(path: string): Promise<Loaded> {
     study.audit?.own === undefined
       ? []
       : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
-  return { plan: makePlan(study, { trials, tables, catalogue, own, ...(plant === undefined ? {} : { plant }) }), trials, files };
+  return { plan: makePlan(study, { trials, tables, catalogue, own, ...(plant === undefined ? {} : { plant }) }), trials, files, open };
 }
 
 /** Settings of the format that this version does not carry out are refused, all at once; none is passed over. */
 function refuseWhatIsNotThere(study: Study): void {
   const asked = [
-    ...(study.coefficient?.series === undefined
-      ? []
-      : [{ code: 'series-not-read', text: says.seriesNotYet(), place: study.coefficient.place }]),
     ...(study.output.assets === 'shared'
       ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
       : []),
@@ -115,8 +123,8 @@ export const computeStudy = async (file: string, seed = SEED, proposals?: number
 
 const computed = (file: string, seed = SEED, proposals?: number): Promise<{ readonly plan: Plan; readonly result: StudyResult }> =>
   withPlacesFrom(file, async () => {
-    const { plan, trials, files } = await loadStudy(file);
-    const read = readTrials(trials, plan.study.trials, plan.columns);
+    const { plan, trials, files, open } = await loadStudy(file);
+    const read = await curvesOf(plan, trials, readTrials(trials, plan.study.trials, plan.columns), open);
     const facts = { version, node: process.versions.node, seed, files, ...(proposals === undefined ? {} : { proposals }) };
     return { plan, result: analyse(plan, read, facts) };
   });

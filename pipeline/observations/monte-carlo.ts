@@ -72,7 +72,7 @@ function sampledTrial(
 /** Random part of the mean of the readings, and every systematic source. */
 function spreadOf(input: Input, trial: TrialInputs, x: number): number {
   const stated = input.random === undefined || input.set === true ? 0 : sizeOf(input.random, x) / Math.sqrt(trial.readings);
-  return Math.hypot(stated, trial.statistical[input.key] ?? 0, ...(input.systematic ?? []).map((one) => sizeOf(one.spread, x)));
+  return Math.hypot(Math.max(stated, trial.statistical[input.key] ?? 0), ...(input.systematic ?? []).map((one) => sizeOf(one.spread, x)));
 }
 
 function summary(values: Float64Array, at: number): Pick<MonteCarloRow, 'sampled' | 'shift' | 'lost'> {

@@ -155,11 +155,11 @@ function sensitivities(
   return { random, systematic };
 }
 
-/** Random standard uncertainty of a trial's mean reading. A set point's spread belongs to the scatter. */
+/** Random standard uncertainty of a trial's mean reading: the larger of what is stated and what the readings themselves show. A set point's spread belongs to the scatter. */
 function randomOf(input: Input, x: number, trial: TrialInputs): number {
   if (input.set === true) return 0;
   const stated = input.random === undefined ? 0 : sizeOf(input.random, x) / Math.sqrt(trial.readings);
-  return Math.hypot(stated, trial.statistical[input.key] ?? 0);
+  return Math.max(stated, trial.statistical[input.key] ?? 0);
 }
 
 function refusalOf(

@@ -3,6 +3,7 @@ import * as says from '../base/says/plan.ts';
 import { quantityOf } from '../quantities/vocabulary.ts';
 import type { Route, RouteContext } from '../reduction/route.ts';
 import { routes } from '../reduction/routes.ts';
+import type { SeriesReduction } from '../reduction/series/series.ts';
 import { sizeOf } from '../rules/evaluate.ts';
 import type { Rule } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
@@ -15,6 +16,8 @@ export interface CoefficientPlan {
   readonly settings: Readonly<Record<string, string>>;
   readonly context: RouteContext;
   readonly rules: readonly Rule[];
+  /** How a logged curve becomes readings, where the study has curves. */
+  readonly curve?: SeriesReduction;
   readonly place: Place;
 }
 
@@ -40,7 +43,19 @@ export function planCoefficient(study: Study, quantities: QuantityPlan, faults: 
     faults.add('route-transfer', says.routeOfOtherTransfer(name, route.transfer), place);
   const settings = readSettings(route, study, faults);
   const context = contextOf(study, quantities);
-  return { route, settings, context, rules: route.rules(settings, context), place };
+  const curve = coefficient.series === undefined ? undefined : route.series?.(settings);
+  if (coefficient.series !== undefined && curve === undefined)
+    faults.add(
+      'route-without-curve',
+      says.routeWithoutCurve(
+        name,
+        Object.values(routes)
+          .filter((one) => one.series !== undefined)
+          .map((one) => one.name),
+      ),
+      coefficient.series.value.place,
+    );
+  return { route, settings, context, rules: route.rules(settings, context), ...(curve === undefined ? {} : { curve }), place };
 }
 
 function readSettings(route: Route, study: Study, faults: Faults): Readonly<Record<string, string>> {

@@ -49,7 +49,9 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   const coefficient = planCoefficient(study, quantities, faults);
   const fluids = planFluids(study.fluid, tables, faults);
   const asked = applicable(study, catalogue, own, faults);
-  const inputs = [...quantities.inputs, ...groups.inputs];
+  const curve = coefficient?.curve;
+  const fromCurve = (curve?.gives ?? []).map((key): Input => ({ key, label: `logged curve: ${key}` }));
+  const inputs = [...quantities.inputs, ...groups.inputs, ...fromCurve];
   const base = [
     ...quantities.rules,
     ...formulas,
@@ -80,6 +82,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
     book,
     laws,
     ...settled,
+    ...(curve === undefined ? {} : { curve }),
     basis,
     ...(plant === undefined ? {} : { plant }),
     ...(rig === undefined ? {} : { rig }),

@@ -3,6 +3,7 @@ import type { Form } from '../algebra/form.ts';
 import type { Note } from '../base/message.ts';
 import type { Place } from '../base/place.ts';
 import type { Unit } from '../quantities/unit.ts';
+import type { SeriesReduction } from '../reduction/series/series.ts';
 import type { RuleBook } from '../rules/resolve.ts';
 import type { Key, Recipe } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
@@ -67,6 +68,8 @@ export interface Plan {
   readonly candidates: readonly Candidate[];
   readonly namings: ReadonlyMap<Key, Naming>;
   readonly coefficient: { readonly key: Key; readonly symbol: string; readonly unit: string } | null;
+  /** How a trial's logged curve becomes its readings, where the study has curves. */
+  readonly curve?: SeriesReduction;
   /** What a plant case takes over. */
   readonly basis: PlantBasis;
   /** Absent where the study names no plant. */

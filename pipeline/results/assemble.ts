@@ -11,9 +11,11 @@ import type { FitOptions } from '../regression/fit.ts';
 import type { IntervalRow } from '../regression/intervals.ts';
 import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
+import type { TrialsWithCurves } from '../trials/curve-readings.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
 import type { Trials } from '../trials/read-trials.ts';
 import type { LawCurve } from './curves.ts';
+import { drawnCurves } from './drawn-curves.ts';
 import { methodOf } from './method.ts';
 import type { StudyResult } from './study-result.ts';
 import { trialRows } from './trial-rows.ts';
@@ -21,7 +23,7 @@ import { trialRows } from './trial-rows.ts';
 /** All that the stages made. */
 export interface Stages {
   readonly plan: Plan;
-  readonly read: Staged<Trials>;
+  readonly read: Staged<Trials | TrialsWithCurves>;
   readonly observed: Staged<Observed>;
   readonly contenders: readonly Contender[];
   readonly choice: Choice;
@@ -51,7 +53,7 @@ export function assemble(stages: Stages): StudyResult {
   const { observations, evaluated } = observed.value;
   const law = plan.laws.find((one) => one.name === choice.law)!;
   const columns = columnsOf(plan);
-  const rows = foldLedger(read.value.ledger, observed.refused);
+  const rows = foldLedger(read.value.ledger, [...read.refused, ...observed.refused]);
   const statements = statementsOf(options, contenders);
   return {
     format: 1,
@@ -100,7 +102,7 @@ export function assemble(stages: Stages): StudyResult {
     forPlant: stages.forPlant,
     budgets: stages.budgets,
     curves: stages.curves,
-    series: [],
+    series: 'curves' in read.value ? drawnCurves(read.value.curves, plan) : [],
     notes: distinct(stages.notes),
     method: methodOf(
       plan,
