@@ -5,7 +5,7 @@ import type { Place } from '../base/place.ts';
 import * as says from '../base/says/analyse.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
-import { sha256OfFile, sha256 } from '../files/hash.ts';
+import { sha256, sha256OfFile } from '../files/hash.ts';
 import { pathInside } from '../files/inside.ts';
 import { readBytes, readPieces } from '../files/read.ts';
 import { explain } from '../plan/explain.ts';
