@@ -2,9 +2,12 @@ import type { Correlation } from './correlation.ts';
 import { cylinder } from './cylinder/index.ts';
 import { fluidisedBed } from './fluidised-bed/index.ts';
 import { gasLiquid } from './gas-liquid/index.ts';
+import { layer } from './layer/index.ts';
 import { naturalConvection } from './natural-convection/index.ts';
 import { packedBed } from './packed-bed/index.ts';
+import { packedColumn } from './packed-column/index.ts';
 import { plate } from './plate/index.ts';
+import { rotating } from './rotating/index.ts';
 import { sphere } from './sphere/index.ts';
 import { suspendedSolids } from './suspended-solids/index.ts';
 import { tube } from './tube/index.ts';
@@ -24,4 +27,7 @@ export const catalogue: readonly Correlation[] = [
   ...suspendedSolids,
   ...gasLiquid,
   ...wettedWall,
+  ...layer,
+  ...packedColumn,
+  ...rotating,
 ];

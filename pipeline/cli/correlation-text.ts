@@ -2,6 +2,7 @@ import type { Correlation } from '../../correlations/correlation.ts';
 import { formText } from '../algebra/print.ts';
 import { says } from '../base/says/cli.ts';
 import { definitionText } from '../groups/definition.ts';
+import { quantityOf } from '../quantities/vocabulary.ts';
 
 /** One line an entry, in columns: identifier, family, what it gives, title. */
 export function listText(entries: readonly Correlation[]): string {
@@ -12,7 +13,7 @@ export function listText(entries: readonly Correlation[]): string {
 
 /** One entry in full: formula, definitions, ranges, source. */
 export function wholeText(entry: Correlation): string {
-  const definitions = Object.entries(entry.groups).map(([name, key]) => definitionText(key)?.text ?? `${name} = ${key}`);
+  const definitions = Object.entries(entry.groups).map(([name, key]) => definitionText(key)?.text ?? quantityText(name, key));
   const limits = entry.limits.length === 0 ? [says.noLimits] : entry.limits.map((limit) => limit.says);
   return [
     `${entry.id}: ${entry.title}`,
@@ -37,6 +38,12 @@ export function wholeText(entry: Correlation): string {
       ),
     ),
   ].join('\n');
+}
+
+/** A quantity that stands in a form by itself: what it is, and its SI unit. */
+function quantityText(name: string, key: string): string {
+  const quantity = quantityOf(key);
+  return quantity === undefined ? `${name} = ${key}` : says.quantityAs(name, quantity.says, quantity.unit);
 }
 
 const block = (head: string, lines: readonly string[]): readonly string[] =>

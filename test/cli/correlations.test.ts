@@ -56,6 +56,12 @@ test('one in full: formula, definitions, range, source', async () => {
     expect(out).toContain(part);
 });
 
+test('quantities that stand in a form by themselves are told with their SI unit', async () => {
+  const { out } = await pilotlaw('correlations', 'vant-riet-1979-coalescing');
+  for (const part of ['gas_velocity: superficial gas velocity, m/s', 'power_per_volume: power per volume of liquid, W/m^3'])
+    expect(out).toContain(part);
+});
+
 describe('--at', () => {
   // Incropera and others, Fundamentals of Heat and Mass Transfer, 6th ed. 2007, Example 7.4: Nu = 40.6 at Re = 6071, Pr = 0.70.
   test('the value of a printed example, and that it is in range', async () => {

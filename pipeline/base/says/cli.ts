@@ -95,6 +95,7 @@ export const says = {
   analogyAllowed: 'the heat-mass analogy may be applied',
   analogyNot: 'not for the heat-mass analogy',
   fromMemory: ' (constants from memory)',
+  quantityAs: (name: string, what: string, unit: string): string => `${name}: ${what}${unit === '1' ? '' : `, ${unit}`}`,
   checkedAt: (kind: string, at: string, gives: string, value: number, source: string, where: string): string =>
     `${kind}: ${gives} = ${value} at ${at} (${source}, ${where})`,
   standing: (inside: boolean | null): string =>

@@ -1,0 +1,41 @@
+import { published } from '../published.ts';
+
+export const onda1968LiquidPlastic = published({
+  id: 'onda-1968-liquid-plastic',
+  authors: 'Onda, Takeuchi and Okumoto',
+  year: 1968,
+  title: 'Liquid side of random packing of plastic',
+  family: 'packed-column',
+  transfer: 'mass',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Sh = C * (Re / (1 - exp(-B * (S / surface_tension)^p * Re^q * Fr^r * We^t)))^a * Sc^b * (specific_area * particle_diameter)^m',
+  values: { C: 0.0051, B: 1.45, S: 0.033, p: 0.75, q: 0.1, r: -0.05, t: 0.2, a: 2 / 3, b: 0.5, m: 0.4 },
+  groups: {
+    Sh: 'Sh@film',
+    Re: 'Re@packing',
+    Sc: 'Sc',
+    Fr: 'Fr@packing',
+    We: 'We@packing',
+    surface_tension: 'surface_tension',
+    specific_area: 'specific_area',
+    particle_diameter: 'particle_diameter',
+  },
+  limits: [],
+  accuracy: 'within 20 % (authors)',
+  source: 'K. Onda, H. Takeuchi, Y. Okumoto, J. Chem. Eng. Japan 1 (1968) 56-62, doi 10.1252/jcej.1.56',
+  where: 'eqs. (1) and (2), critical surface tension 0.033 N/m',
+  constantsFrom: 'page read',
+  use: 'Per wetted area, which is inside the bracket; particle_diameter is the nominal size of the packing, velocity that of the liquid.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Re: 80, Sc: 600, Fr: 0.005, We: 0.01, surface_tension: 0.072, specific_area: 190, particle_diameter: 0.025 },
+      value: 7.0783787,
+      tolerance: 1.4e-5,
+      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      where: 'eqs. (1) and (2) with their printed constants, critical tension 0.033 N/m of a public packing code, evaluated at this point',
+    },
+  ],
+});

@@ -1,0 +1,33 @@
+import { published } from '../published.ts';
+
+export const penney2004RibbonLaminar = published({
+  id: 'penney-2004-ribbon-laminar',
+  authors: 'Penney and Atiemo-Obeng',
+  year: 2004,
+  title: 'Jacketed wall, helical ribbon, Re below 13',
+  family: 'vessel',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = C * Re^a * Pr^b * viscosity_ratio^c',
+  values: { C: 0.94, a: 1 / 3, b: 1 / 3, c: 0.14 },
+  groups: { Nu: 'Nu@vessel', Re: 'Re@impeller', Pr: 'Pr', viscosity_ratio: 'viscosity_ratio' },
+  limits: ['Re <= 13'],
+  accuracy: 'not stated',
+  source:
+    'W. R. Penney, V. A. Atiemo-Obeng, Heat Transfer, ch. 14 of Handbook of Industrial Mixing, Wiley 2004, doi 10.1002/0471451452.ch14',
+  where: 'helical ribbon',
+  constantsFrom: 'page read',
+  use: 'Close-clearance ribbon.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Re: 5, Pr: 50000, viscosity_ratio: 1.5 },
+      value: 62.674946,
+      tolerance: 0.00013,
+      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      where: 'constant 0.94, exponents 1 / 3 and 1 / 3, 0.14, evaluated at this point',
+    },
+  ],
+});

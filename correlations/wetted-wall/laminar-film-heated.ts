@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const laminarFilmHeated = published({
+  id: 'laminar-film-heated',
+  authors: 'Nusselt',
+  year: 1923,
+  title: 'Laminar film heated by the wall, developed',
+  family: 'wetted-wall',
+  transfer: 'heat',
+  average: 'fully developed',
+  reads: 'lower bound',
+  form: 'Nu = C * Re^a',
+  values: { C: 1.8851752 / Math.cbrt(3 / 4), a: -1 / 3 },
+  groups: { Nu: 'Nu@film', Re: 'Re@film' },
+  limits: ['Re <= 1600'],
+  accuracy: 'exact without waves',
+  source: 'W. Nusselt, Z. VDI 67 (1923) 206-210; eigenvalue as for a slit of twice the thickness, R. K. Shah, A. L. London 1978',
+  where: 'Nu = 1.885 on the thickness; upper limit of laminar films from memory',
+  constantsFrom: 'memory',
+  use: 'Film heated or cooled from the wall without evaporating, constant wall temperature.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'analytic limit',
+      at: { Re: 1.3333333333333333 },
+      value: 1.8851752,
+      tolerance: 1e-6,
+      source: 'scipy, script fixtures/limits.py beside the test of the catalogue',
+      where: 'Nu on the thickness; Re 4/3 makes the thickness equal to the viscous length',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Re: 1.3333333333333333 },
+      value: 1.885175,
+      tolerance: 2e-5,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'slit, constant wall temperature 7.5407 on four times the film (memory)',
+    },
+  ],
+});

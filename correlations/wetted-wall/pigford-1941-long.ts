@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const pigford1941Long = published({
+  id: 'pigford-1941-long',
+  authors: 'Pigford',
+  year: 1941,
+  title: 'Gas absorbed by a smooth laminar film, long contact',
+  family: 'wetted-wall',
+  transfer: 'mass',
+  average: 'fully developed',
+  reads: 'lower bound',
+  form: 'Sh = C * Re^a',
+  values: { C: 3.4144462 / Math.cbrt(3 / 4), a: -1 / 3 },
+  groups: { Sh: 'Sh@film', Re: 'Re@film' },
+  limits: ['Re <= 30'],
+  accuracy: 'exact without waves',
+  source: 'R. L. Pigford, thesis, Univ. of Illinois 1941; see T. K. Sherwood, R. L. Pigford, C. R. Wilke, Mass Transfer, McGraw-Hill 1975',
+  where: 'Sh = 3.41 on the thickness; limit of the smooth film is common practice',
+  constantsFrom: 'memory',
+  use: 'Liquid side of a wetted wall so long that the solute has reached the wall; waves raise it.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'analytic limit',
+      at: { Re: 1.3333333333333333 },
+      value: 3.4144462,
+      tolerance: 1e-6,
+      source: 'scipy, script fixtures/limits.py beside the test of the catalogue',
+      where: 'Sh on the thickness; Re 4/3 makes the thickness equal to the viscous length',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Re: 1.3333333333333333 },
+      value: 3.41,
+      tolerance: 0.005,
+      source: 'T. K. Sherwood, R. L. Pigford, C. R. Wilke, Mass Transfer, McGraw-Hill 1975',
+      where: 'printed as 3.41 (memory)',
+    },
+  ],
+});
