@@ -18,6 +18,7 @@ import { headerOf } from './header.ts';
 import type { DeclaredColumn } from './plan.ts';
 import type { PlantBasis } from './plant-basis.ts';
 import { planQuantities } from './quantity-plan.ts';
+import { spreadsOf } from './spreads.ts';
 
 /** What the plant's table and `plant.quantities` state. */
 export interface PlantQuantities {
@@ -25,12 +26,19 @@ export interface PlantQuantities {
   readonly columns: readonly DeclaredColumn[];
   readonly rows: readonly CaseRow[];
   /** Constants of all cases that are ranges, SI. */
-  readonly ranges: ReadonlyMap<Key, { readonly from: number; readonly to: number }>;
+  readonly ranges: ReadonlyMap<Key, Range>;
   readonly formulas: readonly Formula[];
   readonly rules: readonly Rule[];
   readonly dimensions: ReadonlyMap<Key, Dimension>;
   readonly texts: Readonly<Record<string, string>>;
   readonly remarks: readonly { readonly code: string; readonly text: string }[];
+}
+
+/** A constant of all cases that is a range, SI, with its uncertainty. */
+interface Range {
+  readonly from: number;
+  readonly to: number;
+  readonly input: Input;
 }
 
 const RANGE = /^(.+?)\s+to\s+(.+)$/u;
@@ -50,10 +58,7 @@ export function plantQuantities(
   const read = table === undefined ? { rows: [], faults: [] } : readCases(table, planned.columns, caseColumn);
   for (const { code, text, place } of read.faults) faults.add(code, text, place!);
   return {
-    inputs: [
-      ...planned.inputs.map((input) => ofThePlant(input, basis)),
-      ...[...ranges.keys()].map((key) => ({ key, label: `plant ${key}` })),
-    ],
+    inputs: [...planned.inputs, ...[...ranges.values()].map(({ input }) => input)].map((input) => ofThePlant(input, basis)),
     columns: planned.columns,
     rows: read.rows,
     ranges,
@@ -82,25 +87,33 @@ const ofThePlant = (input: Input, { sources }: PlantBasis): Input => ({
 type Entries = Readonly<Record<string, Placed<QuantityEntry>>>;
 
 /** `rotation_speed: 400 to 600 rpm` among the constants. */
-function rangesOf(entries: Entries, faults: Faults): { readonly ranges: Map<Key, { from: number; to: number }>; readonly plain: Entries } {
-  const ranges = new Map<Key, { from: number; to: number }>();
+function rangesOf(entries: Entries, faults: Faults): { readonly ranges: Map<Key, Range>; readonly plain: Entries } {
+  const ranges = new Map<Key, Range>();
   const plain: Record<string, Placed<QuantityEntry>> = {};
   for (const [key, entry] of Object.entries(entries)) {
     const ends = RANGE.exec(entry.is.value?.is ?? '');
     if (ends === null) plain[key] = entry;
     else {
-      const unit = entry.is.unit?.is ?? / (\S.*)$/u.exec(ends[2]!.trim())?.[1];
-      const [from, to] = [ends[1]!, ends[2]!].map((text) => {
-        const bare = unit !== undefined && text.trim().endsWith(unit) ? text.trim().slice(0, -unit.length).trim() : text;
-        const amount = parseAmount(bare, quantityOf(key), unit);
-        if (!isFault(amount)) return amount.si;
-        faults.add(amount.code, `${key}: ${amount.text}`, entry.is.value!.place);
-        return Number.NaN;
-      });
-      ranges.set(key, { from: Math.min(from!, to!), to: Math.max(from!, to!) });
+      const range = rangeOf(key, entry, [ends[1]!, ends[2]!], faults);
+      if (range !== undefined) ranges.set(key, range);
     }
   }
   return { ranges, plain };
+}
+
+/** Both ends in the unit that stands behind the second one. */
+function rangeOf(key: Key, { is, place }: Placed<QuantityEntry>, ends: readonly [string, string], faults: Faults): Range | undefined {
+  const quantity = quantityOf(key);
+  const unit = is.unit?.is ?? / (\S.*)$/u.exec(ends[1].trim())?.[1];
+  const amounts = ends.map((text) => {
+    const bare = unit !== undefined && text.trim().endsWith(unit) ? text.trim().slice(0, -unit.length).trim() : text;
+    return parseAmount(bare, quantity, unit);
+  });
+  const [low, high] = amounts;
+  for (const one of amounts) if (isFault(one)) faults.add(one.code, `${key}: ${one.text}`, is.value?.place ?? place);
+  if (isFault(low!) || isFault(high!)) return undefined;
+  const spreads = spreadsOf(key, is, quantity, low!.unit, 'systematic', faults);
+  return { from: Math.min(low!.si, high!.si), to: Math.max(low!.si, high!.si), input: { key, label: key, ...spreads } };
 }
 
 const CASE_NAMES = ['case', 'name', 'plant case', 'plant', 'unit'];

@@ -59,20 +59,24 @@ export function extrapolationOf(
   const groups = fit.form.groups.map((name): Extrapolation => {
     const value = at.value(fit.groups[name]!);
     const [from, to] = fit.ranges[name]!;
-    return { of: name, kind: 'group', unit: '1', value, from, to, beyond: beyond(value, from, to) };
+    return { of: name, kind: 'group', unit: unitOfKey(fit.groups[name]!), value, from, to, beyond: beyond(value, from, to) };
   });
   const spread = lawSpread(fit)(Object.fromEntries(fit.form.groups.map((name) => [name, at.value(fit.groups[name]!)])));
   const joint: Extrapolation[] =
     largestSpread > 0
       ? [{ of: 'law', kind: 'joint', unit: '1', value: spread, from: 0, to: largestSpread, beyond: Math.max(1, spread / largestSpread) }]
       : [];
+  const inLaw = new Set(Object.values(fit.groups));
   const raw = tried.flatMap(({ key, unit, from, to }): readonly Extrapolation[] => {
     const value = at.value(key);
-    if (!Number.isFinite(value) || !Number.isFinite(from) || !(given.includes(key) || notable.has(key))) return [];
+    if (inLaw.has(key) || !Number.isFinite(value) || !Number.isFinite(from) || !(given.includes(key) || notable.has(key))) return [];
     return [{ of: key, kind: 'raw', unit, value, from, to, beyond: beyond(value, from, to, quantityOf(key)?.kind === 'temperature') }];
   });
   return [...groups, ...joint, ...raw];
 }
+
+/** A quantity in a law stands in SI, or in the unit that the key names: `velocity [ft/s]`. */
+const unitOfKey = (key: Key): string => / \[(.+)\]$/u.exec(key)?.[1] ?? quantityOf(key)?.unit ?? '1';
 
 /** Raw quantities that tell of scale even where the plant derives them. */
 const notable: ReadonlySet<Key> = new Set(['power_per_volume', 'tip_speed', 'velocity', 'gas_velocity', 'rotation_speed']);

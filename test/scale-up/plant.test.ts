@@ -39,40 +39,6 @@ const failure = async (study: Promise<unknown>): Promise<InputError> => {
   return error as InputError;
 };
 
-describe('a plant case by a law that is least squares', () => {
-  // R 4.2.2 predict.lm, script and output in fixtures/predict-lm.R and .txt.
-  test('confidence and prediction intervals as R gives them, inside and outside the range', async () => {
-    const { plant } = await groupStudy('plant.csv', 'case,Re,Pr\nP1,20000,5\nP2,120000,12\n');
-    const [p1, p2] = plant!.cases.map((one) => one.predictions[0]!);
-    expect(p1!.coefficient).toBeCloseTo(145.409421069, 8);
-    const ends = (one: typeof p1): readonly number[] => [one!.lawLower, one!.lawUpper, one!.lower, one!.upper];
-    const against = (one: typeof p1, r: readonly number[]): readonly number[] => ends(one).map((value, k) => value / r[k]! - 1);
-    for (const off of against(p1, [142.021229762, 148.878444342, 137.122492975, 154.197165447])) expect(Math.abs(off)).toBeLessThan(2e-9);
-    for (const off of against(p2, [763.323654989, 867.144383706, 748.491529956, 884.327736365])) expect(Math.abs(off)).toBeLessThan(2e-9);
-    expect(plant!.cases[0]!.design.coefficient).toBeCloseTo(138.731294874, 5);
-    expect([p1!.inRange, p2!.inRange]).toEqual([true, false]);
-    expect(plant!.cases[1]!.verdict).toContain('Re lies 2.93 x above the largest tried');
-    expect(plant!.cases[1]!.extrapolation.find((one) => one.kind === 'joint')!.beyond).toBeGreaterThan(1);
-  });
-
-  test('a range becomes its middle and both ends, and the worst end is named', async () => {
-    const { plant } = await groupStudy('{file: plant.csv, conservative: low}', 'case,Re,Pr\nP1,4000 to 16000,5\n');
-    expect(plant!.cases.map((one) => one.name)).toEqual(['P1, middle of Re', 'P1, low Re', 'P1, high Re']);
-    expect(plant!.cases.map((one) => one.groups.Re)).toEqual([8000, 4000, 16000]);
-    expect(plant!.notes.find((note) => note.code === 'worst-of-range')!.text).toContain('"P1, low Re"');
-  });
-
-  test('high is conservative where the coefficient may be larger than thought', async () => {
-    const [low, high] = await Promise.all(
-      ['low', 'high'].map((side) => groupStudy(`{file: plant.csv, conservative: ${side}}`, 'case,Re,Pr\nP1,20000,5\n')),
-    );
-    const [down, up] = [low!, high!].map((one) => one.plant!.cases[0]!.design.coefficient);
-    // Symmetric about the value on the logarithmic scale: R gives the lower one.
-    expect(Math.sqrt(down! * up!)).toBeCloseTo(145.409421069, 6);
-    expect(up!).toBeGreaterThan(down!);
-  });
-});
-
 const vessel = (extra: string): string => `pilotlaw: 1
 title: shared diffusivity (invented)
 transfer: mass
@@ -96,6 +62,57 @@ ${extra}`;
 const runs = `run,N [rpm],k [um/s]
 ${[200, 260, 330, 420, 520, 640].map((n, i) => `R${i},${n},${(4 * n ** 0.6 * [1.02, 0.97, 1.01, 0.99, 1.03, 0.98][i]!).toFixed(4)}`).join('\n')}
 `;
+describe('a plant case by a law that is least squares', () => {
+  // R 4.2.2 predict.lm, script and output in fixtures/predict-lm.R and .txt.
+  test('confidence and prediction intervals as R gives them, inside and outside the range', async () => {
+    const { plant } = await groupStudy('plant.csv', 'case,Re,Pr\nP1,20000,5\nP2,120000,12\n');
+    const [p1, p2] = plant!.cases.map((one) => one.predictions[0]!);
+    expect(p1!.coefficient).toBeCloseTo(145.409421069, 8);
+    const ends = (one: typeof p1): readonly number[] => [one!.lawLower, one!.lawUpper, one!.lower, one!.upper];
+    const against = (one: typeof p1, r: readonly number[]): readonly number[] => ends(one).map((value, k) => value / r[k]! - 1);
+    for (const off of against(p1, [142.021229762, 148.878444342, 137.122492975, 154.197165447])) expect(Math.abs(off)).toBeLessThan(2e-9);
+    for (const off of against(p2, [763.323654989, 867.144383706, 748.491529956, 884.327736365])) expect(Math.abs(off)).toBeLessThan(2e-9);
+    expect(plant!.cases[0]!.design.coefficient).toBeCloseTo(138.731294874, 5);
+    expect([p1!.inRange, p2!.inRange]).toEqual([true, false]);
+    expect(plant!.cases[1]!.verdict).toContain('Re lies 2.93 x above the largest tried');
+    expect(plant!.cases[1]!.extrapolation.find((one) => one.kind === 'joint')!.beyond).toBeGreaterThan(1);
+  });
+
+  test('a range becomes its middle and both ends, and the worst end is named', async () => {
+    const { plant } = await groupStudy('{file: plant.csv, conservative: low}', 'case,Re,Pr\nP1,4000 to 16000,5\n');
+    expect(plant!.cases.map((one) => one.name)).toEqual(['P1, middle of Re', 'P1, low Re', 'P1, high Re']);
+    expect(plant!.cases.map((one) => one.groups.Re)).toEqual([8000, 4000, 16000]);
+    expect(plant!.notes.find((note) => note.code === 'worst-of-range')!.text).toContain('"P1, low Re"');
+  });
+
+  test('a range under plant.quantities keeps its uncertainty, and a quantity in the law is held against the trials once', async () => {
+    const of = (speed: string) =>
+      studyOf({
+        'study.yaml': vessel(
+          `plant: {quantities: {rotation_speed: ${speed}, particle_diameter: 3 mm, impeller_diameter: 0.5 m}}\n`,
+        ).replace('Sh = C * Re^a * Sc^(1/3)', 'mass_transfer_coefficient = C * rotation_speed^a'),
+        'trials.csv': runs,
+      });
+    const plain = (await of('{value: 60 to 90 rpm}')).plant!;
+    const stated = (await of('{value: 60 to 90 rpm, systematic: 10 %}')).plant!;
+    expect(plain.cases.map((one) => 60 * one.values.rotation_speed!)).toEqual([expect.closeTo(Math.sqrt(5400)), 60, 90]);
+    expect(stated.cases[0]!.predictions[0]!.upper).toBeGreaterThan(plain.cases[0]!.predictions[0]!.upper * 1.01);
+    expect(plain.cases[0]!.extrapolation.filter((one) => one.of === 'rotation_speed')).toEqual([
+      expect.objectContaining({ kind: 'group', unit: '1/s' }),
+    ]);
+  });
+
+  test('high is conservative where the coefficient may be larger than thought', async () => {
+    const [low, high] = await Promise.all(
+      ['low', 'high'].map((side) => groupStudy(`{file: plant.csv, conservative: ${side}}`, 'case,Re,Pr\nP1,20000,5\n')),
+    );
+    const [down, up] = [low!, high!].map((one) => one.plant!.cases[0]!.design.coefficient);
+    // Symmetric about the value on the logarithmic scale: R gives the lower one.
+    expect(Math.sqrt(down! * up!)).toBeCloseTo(145.409421069, 6);
+    expect(up!).toBeGreaterThan(down!);
+  });
+});
+
 describe('settings of the fit through a whole study', () => {
   const weighted = trials
     .split('\n')
