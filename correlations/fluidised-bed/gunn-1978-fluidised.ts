@@ -25,7 +25,7 @@ export const gunn1978Fluidised = published({
       at: { Re: 120, Pr: 0.7, voidage: 0.42 },
       value: 23.166916,
       tolerance: 4.6e-5,
-      source: 'public collection of heat transfer formulas with their sources, page on beds',
+      source: 'open collection of Nusselt formulas with their sources, special geometries',
       where: 'Gunn: (7 - 10 e + 5 e^2)(1 + 0.7 Re^0.2 Pr^(1/3)) + (1.33 - 2.4 e + 1.2 e^2) Re^0.7 Pr^(1/3), evaluated at this point',
     },
     {

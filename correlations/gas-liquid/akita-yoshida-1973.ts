@@ -33,7 +33,7 @@ export const akitaYoshida1973 = published({
       at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_holdup: 0.12 },
       value: 0.030209087,
       tolerance: 6e-8,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: '(D/d^2) 0.6 Sc^0.5 Bo^0.62 Ga^0.31 e^1.1, evaluated at this point; the page drops the square of the viscosity in Ga',
     },
   ],

@@ -25,7 +25,7 @@ export const calderbankMooYoung1961LargeBubbles = published({
       at: { Ar: 250000.0, Sc: 500 },
       value: 591.62651,
       tolerance: 0.0012,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: 'k Sc^(1/2) = 0.42 (drho mu g/rho^2)^(1/3), turned to Sh = 0.42 Ar^(1/3) Sc^(1/2)',
     },
   ],

@@ -33,7 +33,7 @@ export const calderbankMooYoung1961SmallBubbles = published({
       at: { Ar: 25000.0, Sc: 500 },
       value: 73.944627,
       tolerance: 0.00015,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: 'Sh = 2.0 + 0.31 Ra^(1/3), Ra = Ar Sc, evaluated at this point',
     },
   ],

@@ -30,7 +30,7 @@ export const dewesSchumpe1997 = published({
       at: { gas_velocity: 0.05, viscosity: 0.005, density_other: 1.2 },
       value: 0.030273517,
       tolerance: 6.1e-8,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: 'u^0.90 mu^-0.55 rho_g^0.46 with mu in mPa s, evaluated at this point',
     },
   ],

@@ -26,7 +26,7 @@ export const figueiredoCalderbank1979 = published({
       at: { power_per_volume: 2000, gas_velocity: 0.02 },
       value: 0.10874651,
       tolerance: 2.2e-7,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: '0.026 (P/V)^0.6 u^0.8, evaluated at this point',
     },
   ],

@@ -5,6 +5,7 @@ import { dewesSchumpe1997 } from './dewes-schumpe-1997.ts';
 import { figueiredoCalderbank1979 } from './figueiredo-calderbank-1979.ts';
 import { higbie1935Bubble } from './higbie-1935-bubble.ts';
 import { labik2017 } from './labik-2017.ts';
+import { lamontScott1970 } from './lamont-scott-1970.ts';
 import { linek2004 } from './linek-2004.ts';
 import { posaracTekic1987 } from './posarac-tekic-1987.ts';
 import { suh1991 } from './suh-1991.ts';
@@ -19,6 +20,7 @@ export const gasLiquid = [
   figueiredoCalderbank1979,
   higbie1935Bubble,
   labik2017,
+  lamontScott1970,
   linek2004,
   posaracTekic1987,
   suh1991,

@@ -32,7 +32,7 @@ export const labik2017 = published({
       at: { rotation_speed: 8, impeller_diameter: 0.1, gas_velocity: 0.004, power_number: 5 },
       value: 0.04760461,
       tolerance: 9.5e-8,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: '0.295 (N d)^2.083 u^0.461 P0^0.737, evaluated at this point',
     },
   ],

@@ -33,7 +33,7 @@ export const posaracTekic1987 = published({
       at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_holdup: 0.12 },
       value: 0.048384888,
       tolerance: 9.7e-8,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: '(D/d^2) 0.961 Sc^0.5 Bo^0.62 Ga^0.31 e^1.1, evaluated at this point',
     },
   ],

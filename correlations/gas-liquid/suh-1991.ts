@@ -33,7 +33,7 @@ export const suh1991 = published({
       at: { diffusivity: 2e-9, vessel_diameter: 0.15, Sc: 500, Bo: 3000, Ga: 33000000000.0, gas_velocity: 0.03 },
       value: 0.027813597,
       tolerance: 5.6e-8,
-      source: 'public bioprocess code, page of volumetric coefficients',
+      source: 'Y. Cortes-Pena and others 2023, open code design_tools/aeration.py',
       where: '(D/d^2) 0.018 Sc^0.5 Bo^0.75 Ga^0.39 (u/(g d)^0.5)^0.51, evaluated at this point',
     },
   ],

@@ -25,7 +25,7 @@ export const vantRiet1979NonCoalescing = published({
       at: { power_per_volume: 2000, gas_velocity: 0.02 },
       value: 0.18704969,
       tolerance: 3.7e-7,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: 'K 2.0e-3, exponents 0.7 and 0.2, 500 to 10,000 W/m3, evaluated at this point',
     },
   ],

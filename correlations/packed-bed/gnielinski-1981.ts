@@ -25,7 +25,7 @@ export const gnielinski1981 = published({
       at: { Re: 2000.0, Pr: 0.7, voidage: 0.4 },
       value: 61.378232025,
       tolerance: 5e-8,
-      source: 'C. Bell, public chemical engineering code (2016), text of the page on packed beds',
+      source: 'C. Bell 2016, open code conv_packed_bed.py',
       where: 'value printed for d 0.8 mm, voidage 0.4, 1 m/s, 1000 kg/m3, 1 mPa s, Pr 0.7: 61.37823202546954 (outside the confirmed range)',
     },
   ],

@@ -25,7 +25,7 @@ export const guptaThodos1963 = published({
       at: { Re: 500, voidage: 0.4 },
       value: 0.14451052,
       tolerance: 2.9e-7,
-      source: 'public code for packed catalyst beds, page of Nusselt numbers',
+      source: 'open code of catalyst pellets, turb_Nu_text',
       where: 'Nu = 2.06 Re^(1 - 0.575) Pr^(1/3)/e, turned to j = Nu/(Re Pr^(1/3))',
     },
   ],

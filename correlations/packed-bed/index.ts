@@ -7,6 +7,7 @@ import { kta1983 } from './kta-1983.ts';
 import { leva1948Wall } from './leva-1948-wall.ts';
 import { peters1988Wall } from './peters-1988-wall.ts';
 import { sherwoodPigfordWilke1975 } from './sherwood-pigford-wilke-1975.ts';
+import { specchia1980Wall } from './specchia-1980-wall.ts';
 import { wakaoFunazkri1978 } from './wakao-funazkri-1978.ts';
 import { wakaoKaguei1982 } from './wakao-kaguei-1982.ts';
 import { wilsonGeankoplis1966High } from './wilson-geankoplis-1966-high.ts';
@@ -22,6 +23,7 @@ export const packedBed = [
   leva1948Wall,
   peters1988Wall,
   sherwoodPigfordWilke1975,
+  specchia1980Wall,
   wakaoFunazkri1978,
   wakaoKaguei1982,
   wilsonGeankoplis1966High,

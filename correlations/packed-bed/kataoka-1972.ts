@@ -25,7 +25,7 @@ export const kataoka1972 = published({
       at: { Re: 5, Sc: 900, voidage: 0.4 },
       value: 34.962809,
       tolerance: 7e-5,
-      source: 'public adsorber code of the US EPA, list of bed correlations compiled after Xu et al. 2013',
+      source: 'US EPA, open adsorber code, kf_calc after the list of Xu et al. 2013',
       where: '1.85 ((1 - e)/e)^(1/3) Re^(1/3) Sc^(1/3), evaluated at this point',
     },
   ],

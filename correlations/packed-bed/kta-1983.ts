@@ -26,7 +26,7 @@ export const kta1983 = published({
       at: { Re: 2000.0, Pr: 0.7, voidage: 0.4 },
       value: 102.0851648,
       tolerance: 5e-8,
-      source: 'C. Bell, public chemical engineering code (2016), text of the page on packed beds',
+      source: 'C. Bell 2016, open code conv_packed_bed.py',
       where: 'value printed for Re 2000, Pr 0.7, voidage 0.4: 102.08516480718129',
     },
   ],

@@ -25,7 +25,7 @@ export const leva1948Wall = published({
       at: { Re: 800, particle_diameter: 0.006, vessel_diameter: 0.1 },
       value: 232.55491,
       tolerance: 0.00047,
-      source: 'public code of a reforming tube, wall coefficients',
+      source: 'open code of a reforming tube, leva_grummer_alpha after Latham 2011',
       where: '0.813 exp(-6 d_p/d_i) Re^0.9, evaluated at this point',
     },
   ],

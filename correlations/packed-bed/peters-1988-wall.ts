@@ -25,7 +25,7 @@ export const peters1988Wall = published({
       at: { Re: 20 },
       value: 2.0256635,
       tolerance: 4.1e-6,
-      source: 'public code of a methanation tube, bed-to-wall coefficient',
+      source: 'open code of a methanation tube, bed-to-wall coefficient after Bareschino 2023',
       where: 'Nu = 0.19 Re^0.79 for Re 0.1 to 40, evaluated at this point',
     },
   ],

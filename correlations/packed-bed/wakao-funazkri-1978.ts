@@ -25,7 +25,7 @@ export const wakaoFunazkri1978 = published({
       at: { Re: 50, Sc: 1000 },
       value: 117.02035,
       tolerance: 0.00023,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: 'Sh = 2 + 1.1 Sc^(1/3) Re^0.6, liquids 3 <= Re <= 1e4, evaluated at this point',
     },
   ],

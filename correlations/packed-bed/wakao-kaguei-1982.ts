@@ -25,7 +25,7 @@ export const wakaoKaguei1982 = published({
       at: { Re: 2000.0, Pr: 0.7 },
       value: 95.40641328,
       tolerance: 5e-8,
-      source: 'C. Bell, public chemical engineering code (2016), text of the page on packed beds',
+      source: 'C. Bell 2016, open code conv_packed_bed.py',
       where: 'value printed for Re 2000, Pr 0.7: 95.40641328041248',
     },
   ],

@@ -25,7 +25,7 @@ export const wilsonGeankoplis1966High = published({
       at: { Re: 200, voidage: 0.4 },
       value: 0.12093743,
       tolerance: 2.4e-7,
-      source: 'public code of a chromatography bed, text of the film coefficient',
+      source: 'open code of a chromatography bed, convective_mt_coeff',
       where: 'Sh = 0.25/e Re^0.69 Sc^0.33 for 55 < Re < 1050, turned to j at Sc 1',
     },
   ],

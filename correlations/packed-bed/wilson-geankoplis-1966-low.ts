@@ -25,7 +25,7 @@ export const wilsonGeankoplis1966Low = published({
       at: { Re: 10, voidage: 0.4 },
       value: 0.58708345,
       tolerance: 1.2e-6,
-      source: 'public adsorber code of the US EPA, list of bed correlations compiled after Xu et al. 2013',
+      source: 'US EPA, open adsorber code, kf_calc after the list of Xu et al. 2013',
       where: '1.09/e (Re Sc)^(1/3), turned to j = Sh/(Re Sc^(1/3))',
     },
   ],

@@ -25,7 +25,7 @@ export const billetSchultes1999Pall50 = published({
       at: { Re: 40, Sc: 600, Fr: 0.002, voidage: 0.951 },
       value: 493.28732,
       tolerance: 0.00099,
-      source: 'public absorber code, constants of Billet and Schultes table 2a',
+      source: 'open code of an absorber, packing.py with table 2a of the paper',
       where: 'k = C_L 12^(1/6) (u/h D/d_h)^(1/2), h = (12 mu u a^2/(g rho))^(1/3), d_h = 4 e/a, evaluated at this point',
     },
   ],

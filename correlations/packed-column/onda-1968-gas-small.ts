@@ -25,7 +25,7 @@ export const onda1968GasSmall = published({
       at: { Re: 300, Sc: 0.7, specific_area: 480, particle_diameter: 0.01 },
       value: 4.1773264,
       tolerance: 8.4e-6,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: '2 Re^0.7 Sc^(1/3) (a d)^-2, evaluated at this point',
     },
   ],

@@ -25,7 +25,7 @@ export const onda1968Gas = published({
       at: { Re: 300, Sc: 0.7, specific_area: 190, particle_diameter: 0.025 },
       value: 11.154892,
       tolerance: 2.2e-5,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: '5.23 Re^0.7 Sc^(1/3) (a d)^-2, evaluated at this point',
     },
   ],

@@ -50,8 +50,8 @@ export const onda1968LiquidCeramic = published({
       at: { Re: 80, Sc: 600, Fr: 0.005, We: 0.01, surface_tension: 0.072, specific_area: 190, particle_diameter: 0.025 },
       value: 5.8070372,
       tolerance: 1.2e-5,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
-      where: 'eqs. (1) and (2) with their printed constants, critical tension 0.061 N/m of a public packing code, evaluated at this point',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
+      where: 'eqs. (1) and (2) with their printed constants, critical tension 0.061 N/m of an open packing code, evaluated at this point',
     },
   ],
 });

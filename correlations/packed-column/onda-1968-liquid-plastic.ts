@@ -34,8 +34,8 @@ export const onda1968LiquidPlastic = published({
       at: { Re: 80, Sc: 600, Fr: 0.005, We: 0.01, surface_tension: 0.072, specific_area: 190, particle_diameter: 0.025 },
       value: 7.0783787,
       tolerance: 1.4e-5,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
-      where: 'eqs. (1) and (2) with their printed constants, critical tension 0.033 N/m of a public packing code, evaluated at this point',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
+      where: 'eqs. (1) and (2) with their printed constants, critical tension 0.033 N/m of an open packing code, evaluated at this point',
     },
   ],
 });

@@ -25,7 +25,7 @@ export const shulman1955Gas = published({
       at: { Re: 400, voidage: 0.7 },
       value: 0.089616909,
       tolerance: 1.8e-7,
-      source: 'transcription of the printed constants of the paper in a public gallery of reaction engineering',
+      source: 'open pymrm gallery, transcription of the constants printed in the paper',
       where: 'j = 1.195 (G d/(mu (1 - e)))^-0.36, 100 to 10,000, evaluated at this point',
     },
   ],

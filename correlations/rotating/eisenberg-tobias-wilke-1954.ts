@@ -25,7 +25,7 @@ export const eisenbergTobiasWilke1954 = published({
       at: { Re: 20000.0, Sc: 2500 },
       value: 1313.9055,
       tolerance: 0.0026,
-      source: 'public study of electrochemical transport, with the words of the paper',
+      source: 'open study of electrochemical transport, correlations.jl and schmidt_extrapolation.py',
       where: 'Sh = 0.0791 Re^0.70 Sc^0.356, evaluated at this point',
     },
   ],

@@ -25,7 +25,7 @@ export const jang2022 = published({
       at: { Re: 5000.0, Sc: 800 },
       value: 281.86566,
       tolerance: 0.00056,
-      source: 'public study of electrochemical transport, with the words of the paper',
+      source: 'open study of electrochemical transport, correlations.jl and schmidt_extrapolation.py',
       where: 'Sh = 0.204 Re^0.59 Sc^0.33, Re 500 to 12,000, Sc > 100, evaluated at this point',
     },
   ],

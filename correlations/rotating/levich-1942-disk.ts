@@ -34,7 +34,7 @@ export const levich1942Disk = published({
       at: { Re: 10000.0, Sc: 1000.0 },
       value: 621.11801,
       tolerance: 1.9,
-      source: 'public study of electrochemical transport, with the words of the paper',
+      source: 'open study of electrochemical transport, correlations.jl and schmidt_extrapolation.py',
       where: 'thickness of the layer 1.61 D^(1/3) nu^(1/6) w^(-1/2), turned to Sh',
     },
   ],

@@ -25,7 +25,7 @@ export const armenanteKirwan1989 = published({
       at: { Re: 0.8, Sc: 600 },
       value: 5.9053553,
       tolerance: 1.2e-5,
-      source: 'calculation of the growth rate of particles, public code of J. Kolar 2021 (BSD licence)',
+      source: 'J. Kolar 2021, open code calc_G.m',
       where: 'branch by Kolmogorov theory: constants 0.52, 0.52 and 1/3, evaluated at this point',
     },
   ],

@@ -25,7 +25,7 @@ export const levinsGlastonbury1972Slip = published({
       at: { Re: 80, Sc: 900 },
       value: 54.192707,
       tolerance: 0.00011,
-      source: 'calculation of the growth rate of particles, public code of J. Kolar 2021 (BSD licence)',
+      source: 'J. Kolar 2021, open code calc_G.m',
       where: 'branches by slip velocity: Sh = 2 + 0.44 Re^0.5 Sc^0.38, evaluated at this point',
     },
   ],

@@ -31,7 +31,7 @@ export const levinsGlastonbury1972 = published({
       at: { Re: 150, impeller_diameter: 0.12, vessel_diameter: 0.42, Sc: 800 },
       value: 95.742519,
       tolerance: 0.00019,
-      source: 'calculation of the growth rate of particles, public code of J. Kolar 2021 (BSD licence)',
+      source: 'J. Kolar 2021, open code calc_G.m',
       where: 'branch for Levins and Glastonbury 1972: Shp = 2 + 0.47 (Re D^0.28)^0.62 Sc^0.36, evaluated at this point',
     },
   ],

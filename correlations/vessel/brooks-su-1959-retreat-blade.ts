@@ -25,7 +25,7 @@ export const brooksSu1959RetreatBlade = published({
       at: { Re: 50000.0, Pr: 20, viscosity_ratio: 1.2 },
       value: 1247.1614,
       tolerance: 0.0025,
-      source: 'public code for jacketed vessels with its references',
+      source: 'open code of stirred vessels with its list of references, 2026',
       where: 'constant 0.33, exponents 2 / 3 and 1 / 3, 0.14, evaluated at this point',
     },
   ],

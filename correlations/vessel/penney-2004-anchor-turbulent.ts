@@ -26,7 +26,7 @@ export const penney2004AnchorTurbulent = published({
       at: { Re: 2000, Pr: 500, viscosity_ratio: 1.5 },
       value: 426.72303,
       tolerance: 0.00085,
-      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      source: 'H. Vale 2024, open code transport/heat.py, Nu_tank after chapter 14.4 of the handbook',
       where: 'constant 0.32, exponents 2 / 3 and 1 / 3, 0.14, evaluated at this point',
     },
   ],

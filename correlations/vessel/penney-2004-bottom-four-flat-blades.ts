@@ -26,7 +26,7 @@ export const penney2004BottomFourFlatBlades = published({
       at: { Re: 50000.0, Pr: 20, viscosity_ratio: 1.2 },
       value: 1511.7107,
       tolerance: 0.003,
-      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      source: 'H. Vale 2024, open code transport/heat.py, Nu_tank after chapter 14.4 of the handbook',
       where: 'constant 0.4, exponents 2 / 3 and 1 / 3, 0.14, evaluated at this point',
     },
   ],

@@ -34,7 +34,7 @@ export const penney2004CoilDiskTurbine = published({
       at: { Re: 50000.0, Pr: 20, viscosity_ratio: 1.2, impeller_diameter: 0.5, vessel_diameter: 1.2, outer_diameter: 0.03 },
       value: 91.656016,
       tolerance: 0.00018,
-      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      source: 'H. Vale 2024, open code transport/heat.py, Nu_tank after chapter 14.4 of the handbook',
       where: '0.03 Re^(2/3) Pr^(1/3), times (d/D/(1/3))^0.1 (d_o/D/0.04)^0.5, evaluated at this point',
     },
   ],

@@ -26,7 +26,7 @@ export const penney2004RibbonLaminar = published({
       at: { Re: 5, Pr: 50000, viscosity_ratio: 1.5 },
       value: 62.674946,
       tolerance: 0.00013,
-      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      source: 'H. Vale 2024, open code transport/heat.py, Nu_tank after chapter 14.4 of the handbook',
       where: 'constant 0.94, exponents 1 / 3 and 1 / 3, 0.14, evaluated at this point',
     },
   ],

@@ -26,7 +26,7 @@ export const penney2004RibbonTransition = published({
       at: { Re: 100, Pr: 5000, viscosity_ratio: 1.5 },
       value: 110.4009,
       tolerance: 0.00022,
-      source: 'public polymer engineering code (2024), table of stirred tanks after chapter 14.4 of the handbook',
+      source: 'H. Vale 2024, open code transport/heat.py, Nu_tank after chapter 14.4 of the handbook',
       where: 'constant 0.61, exponents 0.5 and 1 / 3, 0.14, evaluated at this point',
     },
   ],

@@ -25,7 +25,7 @@ export const chunSeban1971Laminar = published({
       at: { Re: 256.9593148 },
       value: 0.242499347769,
       tolerance: 0.000435,
-      source: 'public check of a falling-film calculator by hand with NIST properties',
+      source: 'open code of a falling-film evaporator, check by hand with NIST properties',
       where: 'water at 60 C, 0.03 kg/(m s): 0.822 x 22,998 x 257.0^(-0.22) = 5577 W/(m2 K), power rounded to 3.390',
     },
   ],

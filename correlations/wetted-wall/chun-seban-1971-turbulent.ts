@@ -25,7 +25,7 @@ export const chunSeban1971Turbulent = published({
       at: { Re: 6000, Pr: 1.75 },
       value: 0.17742664,
       tolerance: 3.5e-7,
-      source: 'public process code, falling-film evaporator after Chun and Seban',
+      source: 'open process code, falling_film_h after Chun and Seban',
       where: 'Nu = 3.8e-3 Re^0.4 Pr^0.65, transition at 5840 Pr^-1.06, evaluated at this point',
     },
   ],
