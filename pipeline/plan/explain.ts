@@ -11,6 +11,7 @@ export function explain(plan: Plan, file: string): string {
     says.heading('given'),
     ...given.map((input) => {
       const column = byKey.get(input.key);
+      if (plan.curve?.gives.includes(input.key)) return says.fromCurve(input.key, plan.study.coefficient!.series!.value.is);
       return says.given(
         input.key,
         column?.column,

@@ -50,6 +50,9 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   const fluids = planFluids(study.fluid, tables, faults);
   const asked = applicable(study, catalogue, own, faults);
   const curve = coefficient?.curve;
+  for (const { key } of quantities.inputs)
+    if (curve?.gives.includes(key))
+      faults.add('curve-and-column', says.curveAndColumn(key), study.quantities[key]?.place ?? study.trials.file.place);
   const fromCurve = (curve?.gives ?? []).map((key): Input => ({ key, label: `logged curve: ${key}` }));
   const inputs = [...quantities.inputs, ...groups.inputs, ...fromCurve];
   const base = [
@@ -191,6 +194,9 @@ function sentenceOf(
     if (coefficient.route.gives(coefficient.settings, coefficient.context) !== result)
       return says.coefficientIsOverall(coefficient.route.gives(coefficient.settings, coefficient.context), name);
   }
+  const curve = coefficient?.route.series?.(coefficient.settings).gives ?? [];
+  if (roots.length > 0 && roots.every((root) => curve.includes(root)))
+    return [says.cannotHave(name, roots), says.giveTheCurve(coefficient!.route.name)].join('; ');
   return [says.cannotHave(name, roots), ...lack.ways.slice(0, 3).map((way) => says.wayTo(lack.key, way.rule.formula, way.lacks))].join(
     '; ',
   );

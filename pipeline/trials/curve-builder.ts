@@ -1,5 +1,6 @@
 import type { Message } from '../base/message.ts';
 import { says } from '../base/says/trials.ts';
+import type { Unit } from '../quantities/unit.ts';
 import type { Curve } from '../reduction/series/series.ts';
 import { Growing } from './growing.ts';
 
@@ -11,6 +12,8 @@ export interface LoggedCurve extends Curve {
   readonly line: number;
   /** Samples read before the window was cut. */
   readonly samples: number;
+  /** Unit that its values were logged in. */
+  readonly unit: Unit;
 }
 
 /** Collects the samples of one trial as they come. */
@@ -37,7 +40,7 @@ export class CurveBuilder {
   }
 
   /** The curve within [from, to], s; `fromStart` lets time begin at its first sample. A reason where it is none. */
-  curve(window: readonly [number, number] | undefined, fromStart: boolean): LoggedCurve | Message {
+  curve(window: readonly [number, number] | undefined, fromStart: boolean, unit: Unit): LoggedCurve | Message {
     const place = { file: this.file, line: this.backwards ?? this.first, trial: this.trial };
     if (this.backwards !== undefined) return { code: 'time-backwards', text: says.timeBackwards(this.trial, this.backwards), place };
     const zero = fromStart ? this.times.at(0) : 0;
@@ -53,6 +56,7 @@ export class CurveBuilder {
       file: this.file,
       line: this.first,
       samples: time.length,
+      unit,
       time: time.slice(from, to),
       value: this.values.toArray().slice(from, to),
     };

@@ -1,4 +1,5 @@
 import type { Note, Refusal } from '../base/message.ts';
+import { says } from '../base/says/trials.ts';
 import type { Staged } from '../base/staged.ts';
 import type { CurveResult, SeriesReduction } from '../reduction/series/series.ts';
 import type { Trial } from './average.ts';
@@ -11,7 +12,7 @@ export interface TrialsWithCurves extends Trials {
 }
 
 /**
- * Each trial's curve to readings of the trial with their statistical uncertainty. `constants` are quantities that hold for all trials, SI.
+ * Each trial's curve to readings of the trial with their statistical uncertainty. `given` are the trial's other values, SI.
  * A trial whose curve does not come down to a reading is refused with the reduction's reason; one without a curve is left out here, because
  * reading the curves has refused it.
  */
@@ -19,7 +20,7 @@ export function withCurves(
   trials: Trials,
   curves: ReadonlyMap<string, LoggedCurve>,
   reduction: SeriesReduction,
-  constants: Readonly<Record<string, number>>,
+  given: (trial: Trial) => (key: string) => number | undefined,
 ): Staged<TrialsWithCurves> {
   const notes: Note[] = [];
   const refused: Refusal[] = [];
@@ -27,7 +28,7 @@ export function withCurves(
   for (const trial of trials.trials) {
     const curve = curves.get(trial.trial);
     if (curve === undefined) continue;
-    const result = reduction.reduce(curve, (key) => given(trials.keys, trial, constants, key));
+    const result = reduction.reduce(curve, given(trial));
     const place = { file: curve.file, line: curve.line, trial: trial.trial };
     if ('refused' in result) {
       refused.push({ trial: trial.trial, ...result.refused, place });
@@ -43,15 +44,20 @@ export function withCurves(
       ledger: trials.ledger,
       curves: kept.map(({ trial, curve, fitted }) => ({ trial: trial.trial, curve, fitted })),
     },
-    notes,
+    notes: kept.length === 0 ? notes : [curvesRead(kept.map(({ curve }) => curve)), ...notes],
     refused,
   };
 }
 
-function given(keys: readonly string[], { values }: Trial, constants: Readonly<Record<string, number>>, key: string): number | undefined {
-  const value = values[keys.indexOf(key)] ?? (Object.hasOwn(constants, key) ? constants[key] : undefined);
-  return value === undefined || Number.isNaN(value) ? undefined : value;
-}
+const curvesRead = (curves: readonly LoggedCurve[]): Note => ({
+  section: 'trials',
+  level: 'note',
+  code: 'curves-read',
+  text: says.curvesRead(
+    curves.length,
+    curves.reduce((sum, { time }) => sum + time.length, 0),
+  ),
+});
 
 type Readings = Extract<CurveResult, { readings: unknown }>['readings'];
 

@@ -55,7 +55,10 @@ export async function readSeries(source: LogSource, spec: SeriesSpec): Promise<S
   });
   if (totals.ragged.count > 0)
     for (let k = 0; k < totals.ragged.count; k++) skipped.add('log-ragged', totals.ragged.firstLine!, says.logRagged());
-  const settled = [...builders].map(([trial, builder]) => ({ trial, curve: builder.curve(spec.window, cells?.time.unit === undefined) }));
+  const settled = [...builders].map(([trial, builder]) => ({
+    trial,
+    curve: builder.curve(spec.window, cells!.time.unit === undefined, cells!.value.unit!),
+  }));
   return {
     value: {
       curves: new Map(settled.flatMap(({ trial, curve }) => ('code' in curve ? [] : [[trial, curve] as const]))),

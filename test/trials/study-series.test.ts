@@ -73,11 +73,19 @@ describe("a study's logged curves", () => {
               notes: given('none') === undefined ? [{ code: 'said', text: 'said' }] : [],
             },
     };
-    const { value, refused, notes } = withCurves(read.value, curves, drop, { mass: 2 });
+    const { value, refused, notes } = withCurves(
+      read.value,
+      curves,
+      drop,
+      ({ values }) =>
+        (key) =>
+          ({ own: values[0]!, mass: 2 })[key],
+    );
     expect(value.keys).toEqual(['own', 'drop']);
     expect(value.trials.map(({ trial, values, statistical }) => [trial, ...values, statistical])).toEqual([['A', 1, 70, { drop: 0.5 }]]);
     expect(refused).toEqual([{ trial: 'B', code: 'why', text: 'because', place: { file: 'b.csv', line: 2, trial: 'B' } }]);
-    expect(notes[0]).toMatchObject({ code: 'said', about: 'A' });
+    expect(notes.map(({ code: which }) => which)).toEqual(['curves-read', 'said']);
+    expect(notes[1]).toMatchObject({ about: 'A' });
     expect(value.curves.map(({ trial }) => trial)).toEqual(['A']);
   });
 });

@@ -13,6 +13,8 @@ export const given = (
       : `column "${column}"${unit === undefined || unit === '1' ? '' : ` in ${unit}`}`;
   return `  ${key}: ${from}; ${uncertainties === 0 ? 'no uncertainty stated, counts as exact' : `${uncertainties} uncertaint${uncertainties === 1 ? 'y' : 'ies'} stated`}`;
 };
+export const fromCurve = (key: string, column: string): string =>
+  `  ${key}: from the logged curve of ${column}, with the uncertainty the curve shows`;
 export const text = (key: string, value: string): string => `  ${key}: ${value}`;
 export const derived = (key: string, formula: string, from: readonly string[], source: string): string =>
   `  ${key} from ${from.length === 0 ? 'nothing measured' : from.join(', ')}: ${formula} (${source})`;

@@ -76,5 +76,8 @@ export const noSuchCondition = (name: string, meant: string | undefined): string
 export const correlationLacks = (name: string, definition: string, roots: readonly string[]): string =>
   `${name} (${definition})${roots.length === 0 ? '' : `, for which ${roots.join(' and ')} ${roots.length === 1 ? 'is' : 'are'} missing`}`;
 export const unreadableSetting = (key: string, read: string, wanted: string): string => `"${read}" cannot be read as ${key}: ${wanted}`;
+export const curveAndColumn = (key: string): string => `${key} comes from the logged curve and is given here too; leave one of them out`;
+export const giveTheCurve = (route: string): string =>
+  `${route} reads it from a logged curve: say where it stands under coefficient.series`;
 export const routeWithoutCurve = (route: string, able: readonly string[]): string =>
   `the route ${route} takes no logged curve; routes that do are ${able.join(', ')}`;

@@ -98,6 +98,8 @@ export const says = {
   noCurve: (trial: string): string => `trial ${quoted(trial)} has no logged curve`,
   severalCurves: (trial: string, names: readonly string[]): string =>
     `trial ${quoted(trial)} names ${names.length} files for its curve (${some(names, 4)}); one trial has one curve`,
+  curvesRead: (curves: number, samples: number): string =>
+    `${count(curves)} logged curve${curves === 1 ? '' : 's'} with ${count(samples)} samples in their windows came down to readings of their trials; the uncertainty of each is that of the least-squares fit, autocorrelation of its residuals counted (Geyer 1992)`,
   curveWithoutTrial: (names: readonly string[]): string =>
     `the log holds curves that no trial of the table names, and they were not used: ${some(names, 6)}`,
   seriesTrial: (): string => 'one log for several trials needs trial: the column of the log that names the trial',

@@ -47,6 +47,7 @@ const model = (tau: number): SeparableModel => ({
 /** Rises or falls after a step of the gas, read by a probe with a lag: kLa, how it moves with the probe's time, and the saturation it heads for. */
 export const gassing: SeriesReduction = {
   value: 'bulk_concentration',
+  anyUnit: true,
   gives: ['curve_rate', 'curve_rate_per_lag', 'curve_lag', 'curve_saturation'],
   needs: [],
   optional: ['probe_time'],

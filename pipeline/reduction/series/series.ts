@@ -26,6 +26,8 @@ export type CurveResult =
 export interface SeriesReduction {
   /** The quantity that the curve holds, for its unit: `temperature`, `bulk_concentration`. */
   readonly value: Key;
+  /** The curve may hold anything that is linear in that quantity, in any unit. */
+  readonly anyUnit?: true;
   /** Keys it gives, as readings of the trial. */
   readonly gives: readonly Key[];
   /** Values of the trial that it looks at, SI; those in `optional` may be missing. */
