@@ -36,15 +36,17 @@ export function scaleUp(spec: ScaleUpSpec): PlantResult {
   const keys = [...new Set([...speakers.flatMap((one) => one.keys), ...(plan.perCoefficient === undefined ? [] : [plan.perCoefficient])])];
   const worked = plan.cases.map((planned) => workedCase(planned, evaluateAt(plan.recipe, planned.inputs, keys), speakers, spec));
   const cases = worked.map((one) => one.result);
-  const criteria = plan.cases.flatMap((planned) => {
+  // A case that is a range is one vessel: its criteria are told once.
+  const vessels = plan.cases.filter((one, k) => plan.cases.findIndex(({ of }) => of === one.of) === k);
+  const criteria = vessels.flatMap((planned) => {
     const rows = speakers[0] === undefined ? [] : criteriaOf(plan, planned, spec.anchor, speakers[0], isVolumetric(spec));
-    return rows.length === 0 ? [] : [{ of: says.criteriaOf(planned.name, spec.anchor.speed, spec.anchor.impeller), rows }];
+    return rows.length === 0 ? [] : [{ of: says.criteriaOf(planned.of, spec.anchor.speed, spec.anchor.impeller), rows }];
   });
   const notes = [...worked.flatMap((one) => one.notes), ...left, ...standing(spec, cases), ...rangeNotes(plan, cases)];
   return {
     coefficient: spec.coefficient,
     cases,
-    criteria: criteria.slice(0, 6),
+    criteria,
     notes,
     says: says.plantHeadline(cases, spec.coefficient, laws[0]!.confidence),
   };
@@ -212,6 +214,7 @@ function standing({ laws, texts, plan }: ScaleUpSpec, cases: readonly PlantCase[
       ? []
       : [note('no-campaign-variance', says.noCampaignVariance(first.campaigns.kind), undefined, 'warning')]),
     ...(cases.some((one) => one.wider === 'spread between laws') ? [note('spread-wider', says.spreadWider(), undefined, 'warning')] : []),
+    ...(cases.some(({ overall }) => overall !== undefined) ? [note('resistances-as-stated', says.resistancesAsStated())] : []),
     ...texted,
   ];
 }

@@ -100,3 +100,5 @@ export const compareByEye = (key: string, rig: string, plant: string | undefined
   `${key}: the rig had "${rig}", the plant ${plant === undefined || plant === '' ? 'states none' : `has "${plant}"`}; the law holds for the rig's.`;
 export const worstOfRange = (name: string, worst: string, value: number, conservative: 'low' | 'high'): string =>
   `Over the range of case ${name} the design value is ${conservative === 'low' ? 'smallest' : 'largest'} at "${worst}": ${short(value)}.`;
+export const resistancesAsStated = (): string =>
+  'Wall, fouling and other side enter the overall coefficient as stated, without an uncertainty of their own: its interval is the coefficient’s alone.';
