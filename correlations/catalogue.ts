@@ -1,3 +1,4 @@
+import { bedWall } from './bed-wall/index.ts';
 import type { Correlation } from './correlation.ts';
 import { cylinder } from './cylinder/index.ts';
 import { fluidisedBed } from './fluidised-bed/index.ts';
@@ -23,6 +24,7 @@ export const catalogue: readonly Correlation[] = [
   ...naturalConvection,
   ...packedBed,
   ...fluidisedBed,
+  ...bedWall,
   ...vessel,
   ...suspendedSolids,
   ...gasLiquid,

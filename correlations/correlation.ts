@@ -11,6 +11,7 @@ export type Family =
   | 'natural-convection'
   | 'packed-bed'
   | 'fluidised-bed'
+  | 'bed-wall'
   | 'vessel'
   | 'suspended-solids'
   | 'gas-liquid'

@@ -4,10 +4,7 @@ import { gunn1978 } from './gunn-1978.ts';
 import { guptaThodos1963 } from './gupta-thodos-1963.ts';
 import { kataoka1972 } from './kataoka-1972.ts';
 import { kta1983 } from './kta-1983.ts';
-import { leva1948Wall } from './leva-1948-wall.ts';
-import { peters1988Wall } from './peters-1988-wall.ts';
 import { sherwoodPigfordWilke1975 } from './sherwood-pigford-wilke-1975.ts';
-import { specchia1980Wall } from './specchia-1980-wall.ts';
 import { wakaoFunazkri1978 } from './wakao-funazkri-1978.ts';
 import { wakaoKaguei1982 } from './wakao-kaguei-1982.ts';
 import { wilsonGeankoplis1966High } from './wilson-geankoplis-1966-high.ts';
@@ -20,10 +17,7 @@ export const packedBed = [
   guptaThodos1963,
   kataoka1972,
   kta1983,
-  leva1948Wall,
-  peters1988Wall,
   sherwoodPigfordWilke1975,
-  specchia1980Wall,
   wakaoFunazkri1978,
   wakaoKaguei1982,
   wilsonGeankoplis1966High,

@@ -14,6 +14,7 @@ const usual: Readonly<Record<string, readonly string[]>> = {
   'natural-convection': ['plate', 'cylinder', 'particle', 'gap', 'pipe'],
   'packed-bed': ['particle', 'particle-interstitial'],
   'fluidised-bed': ['particle', 'particle-interstitial'],
+  'bed-wall': ['particle', 'vessel'],
   vessel: ['vessel', 'impeller', 'pipe', 'cylinder'],
   'suspended-solids': ['particle', 'impeller', 'energy-dissipation', 'vessel'],
   'gas-liquid': ['bubble', 'impeller', 'vessel'],

@@ -15,6 +15,7 @@ export const families = [
   'natural-convection',
   'packed-bed',
   'fluidised-bed',
+  'bed-wall',
   'vessel',
   'suspended-solids',
   'gas-liquid',

@@ -231,6 +231,8 @@ describe('a length is taken without asking only where one could be meant', () =>
     expect(possibleBases('Sh', 'suspended-solids', having('particle_diameter', 'impeller_diameter'))).toEqual(['particle', 'impeller']));
   test('a packed bed: two bases, one length', () =>
     expect(possibleBases('Sh', 'packed-bed', having('particle_diameter', 'voidage'))).toEqual(['particle']));
+  test('the wall of a bed: two bases', () =>
+    expect(possibleBases('Nu', 'bed-wall', having('particle_diameter', 'vessel_diameter'))).toEqual(['particle', 'vessel']));
   test('a disk of which only the diameter is known', () =>
     expect(possibleBases('Sh', 'rotating', having('diameter'))).toEqual(['disk', 'rotating-cylinder']));
   test('nothing given', () => expect(possibleBases('Nu', 'tube', having())).toEqual([]));

@@ -8,7 +8,7 @@ export const says = {
   title: (file: string): string => `Trials of ${file}`,
   whichTransfer: (): string => 'is it heat or mass that is transferred?',
   whichEquipment: (): string =>
-    'which family of published correlations fits the equipment? tube annulus coil plate cylinder tube-bank sphere natural-convection packed-bed fluidised-bed vessel suspended-solids gas-liquid wetted-wall packed-column rotating membrane plate-exchanger impinging-jet layer other',
+    'which family of published correlations fits the equipment? tube annulus coil plate cylinder tube-bank sphere natural-convection packed-bed fluidised-bed bed-wall vessel suspended-solids gas-liquid wetted-wall packed-column rotating membrane plate-exchanger impinging-jet layer other',
   areReadings: (): string => 'some trial names stand in more than one row: are these rows readings of one trial, to be averaged?',
   areMarks: (marks: readonly string[]): string =>
     `do ${list(marks.map((mark) => JSON.stringify(mark)))} mark missing values? Rows that need them are refused`,

@@ -7,7 +7,7 @@ const circle = (d: number): number => (Math.PI / 4) * d * d;
 /** Equipment whose stream runs through a round bore of the quantity `diameter`. */
 const bores = new Set(['tube', 'coil', 'wetted-wall', 'membrane', 'impinging-jet', 'other']);
 /** Equipment whose stream fills the cross section of a column or vessel. */
-const columns = new Set(['packed-bed', 'fluidised-bed', 'packed-column', 'gas-liquid', 'other']);
+const columns = new Set(['packed-bed', 'fluidised-bed', 'bed-wall', 'packed-column', 'gas-liquid', 'other']);
 const tubes = new Set(['tube', 'wetted-wall', 'membrane']);
 
 /** Geometry that means the same in all equipment. */
@@ -86,6 +86,7 @@ const length: Key = 'length';
 function areas(equipment: string): readonly Rule[] {
   const mantle = (d: Key): Rule => definition('area', [d, length], (d, l) => Math.PI * d! * l!, `A = pi ${d} L`, says.mantle(d));
   if (tubes.has(equipment)) return [mantle('diameter')];
+  if (equipment === 'bed-wall') return [mantle('vessel_diameter')];
   if (equipment === 'annulus') return [mantle('outer_diameter')];
   if (equipment === 'cylinder' || equipment === 'rotating')
     return [mantle('outer_diameter'), ...(equipment === 'cylinder' ? [mantle('diameter')] : [])];

@@ -79,6 +79,8 @@ describe('geometry by what the letters stand for', () => {
     expect(had('area', { diameter: 0.01 }, 'sphere')).toBeCloseTo(Math.PI * 1e-4, 14);
     expect(had('area', { particle_diameter: 0.01, particle_count: 7 }, 'suspended-solids')).toBeCloseTo(7 * Math.PI * 1e-4, 14);
     expect(had('area', { outer_diameter: 0.01, length: 0.2 }, 'cylinder')).toBeCloseTo(Math.PI * 2e-3, 14);
+    expect(had('area', { vessel_diameter: 0.05, length: 0.2 }, 'bed-wall')).toBeCloseTo(Math.PI * 1e-2, 14);
+    expect(had('area', { vessel_diameter: 0.05, length: 0.2 }, 'packed-bed')).toBeNaN();
     expect(had('area', { diameter: 0.01, length: 0.2 }, 'other')).toBeNaN();
   });
   test('interface of bubbles per clear liquid', () => {

@@ -1,11 +1,11 @@
 import { published } from '../published.ts';
 
-export const specchia1980Wall = published({
-  id: 'specchia-1980-wall',
+export const specchia1980 = published({
+  id: 'specchia-1980',
   authors: 'Specchia, Baldi and Sicardi',
   year: 1980,
   title: 'Wall film of a packed tube, with the bed at rest',
-  family: 'packed-bed',
+  family: 'bed-wall',
   transfer: 'heat',
   average: 'mean',
   reads: 'mean line',
@@ -24,7 +24,7 @@ export const specchia1980Wall = published({
   accuracy: 'not stated',
   source:
     'V. Specchia, G. Baldi, S. Sicardi, Chem. Eng. Commun. 4 (1980) 361-380, doi 10.1080/00986448008935916; as in Bareschino et al. 2023, eq. S.10',
-  where: 'part of the bed at rest and part of the flow',
+  where: 'part of the bed at rest and part of the flow; another page prints 2 voidage + 0.0835 Re^0.91 alone, Re 10 to 1200',
   constantsFrom: 'page read',
   use: 'Film at the wall beside an effective conductivity of the bed, gas.',
   analogy: false,

@@ -1,11 +1,11 @@
 import { published } from '../published.ts';
 
-export const zabrodsky1976Wall = published({
-  id: 'zabrodsky-1976-wall',
+export const zabrodsky1976 = published({
+  id: 'zabrodsky-1976',
   authors: 'Zabrodsky, Antonishin and Parnas',
   year: 1976,
-  title: 'Surface in a bubbling bed, at the best gas velocity',
-  family: 'fluidised-bed',
+  title: 'Surface in a bubbling fluidised bed, at the best gas velocity',
+  family: 'bed-wall',
   transfer: 'heat',
   average: 'mean',
   reads: 'upper bound',

@@ -5,7 +5,7 @@ export const molerus1995Fine = published({
   authors: 'Molerus, Burschka and Dietz',
   year: 1995,
   title: 'Surface in a bubbling bed of fine particles, at the best gas velocity',
-  family: 'fluidised-bed',
+  family: 'bed-wall',
   transfer: 'heat',
   average: 'mean',
   reads: 'upper bound',

@@ -5,7 +5,7 @@ export const gelperinEinstein1971Wide = published({
   authors: 'Gelperin and Einstein',
   year: 1971,
   title: 'Horizontal tubes far apart in a bubbling bed, at the best gas velocity',
-  family: 'fluidised-bed',
+  family: 'bed-wall',
   transfer: 'heat',
   average: 'mean',
   reads: 'upper bound',
