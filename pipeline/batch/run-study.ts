@@ -6,7 +6,7 @@ import * as says from '../base/says/analyse.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
 import { sha256, sha256OfFile } from '../files/hash.ts';
-import { pathInside } from '../files/inside.ts';
+import { newPathInside, pathInside } from '../files/inside.ts';
 import { readBytes, readPieces } from '../files/read.ts';
 import { explain } from '../plan/explain.ts';
 import { makePlan } from '../plan/make-plan.ts';
@@ -21,6 +21,7 @@ import type { LogSource } from '../trials/log-stream.ts';
 import { readTable } from '../trials/read-table.ts';
 import { readTrials } from '../trials/read-trials.ts';
 import type { Table } from '../trials/table.ts';
+import { SEED } from './seed.ts';
 import { curvesOf } from './study-curves.ts';
 import { type StudySummary, summaryOf } from './summary.ts';
 
@@ -30,7 +31,6 @@ export interface RunOptions {
   readonly seed?: number;
 }
 
-const SEED = 1;
 const MOST_STUDY = 1 << 20;
 const MOST_TABLE = 1 << 28;
 const MOST_LOG = 2 ** 33;
@@ -137,9 +137,11 @@ export async function runStudy(file: string, { out, seed }: RunOptions = {}): Pr
   const written = new Map(resultFiles(result));
   written.set('report.html', html);
   for (const [name, spec] of Object.entries(charts)) written.set(`charts/${name}.vl.json`, `${JSON.stringify(spec, null, 2)}\n`);
-  const folder = out ?? join(dirname(resolve(file)), plan.study.output.folder.is);
-  writeResults(folder, written, result);
-  return summaryOf(result, folder);
+  const { is, place } = plan.study.output.folder;
+  const folder = out ?? newPathInside(dirname(resolve(file)), is, place);
+  const summary = summaryOf(result);
+  writeResults(folder, written, result, summary);
+  return { study: file, folder, ...summary };
 }
 
 /** What is given, what is derived from what, what is missing; computes nothing. */

@@ -16,15 +16,14 @@ export interface StudySummary {
   readonly verdict: string | null;
 }
 
-export function summaryOf(result: StudyResult, folder: string): StudySummary {
+/** All of it that does not depend on where the study lies. */
+export function summaryOf(result: StudyResult): Omit<StudySummary, 'study' | 'folder'> {
   const fit = result.fits.find((one) => one.name === result.chosen)!;
   const best = result.audit?.rows[0];
   const { read, used, leftOut, refused } = result.ledger;
   const short = (value: number): string => String(Number(value.toPrecision(4)));
   return {
-    study: result.study.file,
     title: result.study.title,
-    folder,
     law: fit.name,
     text: `${fit.form.response} = ${exprText(fit.form.tree, fit.values, short)}`,
     trials: { read, used, left_out: leftOut, refused },

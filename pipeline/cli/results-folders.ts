@@ -1,5 +1,6 @@
 import { basename, dirname, isAbsolute, join, relative, resolve } from 'node:path';
 import { InputError } from '../base/input-error.ts';
+import type { Message } from '../base/message.ts';
 import { says } from '../base/says/cli.ts';
 
 /**
@@ -18,6 +19,20 @@ export function resultsFolders(studies: readonly string[], out: string | undefin
     owner.set(folder, study);
   }
   return new Map([...owner].map(([folder, study]) => [study, folder]));
+}
+
+/** Throws (exit 2) where two studies name one folder for their results. */
+export function refuseShared(tasks: readonly { readonly study: string; readonly folder?: string }[]): void {
+  const owner = new Map<string, string>();
+  const faults: Message[] = [];
+  for (const { study, folder } of tasks) {
+    if (folder === undefined) continue;
+    const other = owner.get(folder);
+    if (other !== undefined)
+      faults.push({ code: 'shared-results-folder', text: says.sharedNamedFolder(fromHere(folder), other), place: { file: study } });
+    owner.set(folder, study);
+  }
+  if (faults.length > 0) throw new InputError(faults);
 }
 
 /** A path as the user would write it: from the folder he is in, where it lies below. */

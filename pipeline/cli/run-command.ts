@@ -1,3 +1,4 @@
+import { availableParallelism } from 'node:os';
 import { says } from '../base/says/cli.ts';
 import { flag, textOption, wholeOption } from './arguments.ts';
 import type { Command } from './command.ts';
@@ -22,7 +23,7 @@ export const runCommand: Command = {
     const request = {
       studies: given.study as readonly string[],
       out: textOption(given, 'out'),
-      jobs: wholeOption(given, 'jobs', 1, MOST_JOBS),
+      jobs: wholeOption(given, 'jobs', 1, MOST_JOBS) ?? availableParallelism(),
       seed: wholeOption(given, 'seed', 0, MOST_SEED),
       fresh: flag(given, 'fresh'),
       quiet: flag(given, 'quiet'),

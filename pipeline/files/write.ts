@@ -24,7 +24,8 @@ export function replaceFile(path: string, content: string | Uint8Array): void {
   }
 }
 
-function writeSynced(path: string, bytes: Uint8Array): void {
+/** A new file whose bytes have reached the disk. Throws what the system throws. */
+export function writeSynced(path: string, bytes: Uint8Array): void {
   const file = openSync(path, 'wx', 0o666);
   try {
     let written = 0;
@@ -36,7 +37,7 @@ function writeSynced(path: string, bytes: Uint8Array): void {
 }
 
 /** The rename itself reaches the disk; some file systems cannot sync a folder, and lose nothing by it. */
-function syncFolder(folder: string): void {
+export function syncFolder(folder: string): void {
   let file: number | undefined;
   try {
     file = openSync(folder, 'r');

@@ -1,14 +1,12 @@
-import { join } from 'node:path';
 import type { ColumnTable } from 'arquero';
 import { sha256 } from '../files/hash.ts';
-import { makeFolder, removeFile, replaceFile } from '../files/write.ts';
+import { replaceResults } from '../files/replace-results.ts';
 import { lawPython } from './law-python.ts';
 import { lawsJson } from './laws-json.ts';
+import { PROVENANCE, type Provenance } from './provenance.ts';
 import type { StudyResult } from './study-result.ts';
 import { auditTable, plantTable, trialsTable } from './tables.ts';
 import { workbook } from './workbook.ts';
-
-const PROVENANCE = 'provenance.json';
 
 /** One line end after the last row. */
 export const csvOf = (table: ColumnTable): string => `${table.toCSV().trimEnd()}\n`;
@@ -31,18 +29,12 @@ export function resultFiles(result: StudyResult): ReadonlyMap<string, string | U
 }
 
 /**
- * Writes results into a folder, each file in one step. `provenance.json` is removed first and written last with the hash of every file, so that a mixture
- * of two runs cannot pass for a result. Files of the user's own in the folder are left alone.
+ * Replaces the results in a folder. `provenance.json` holds the hash of every file and stands only beside exactly those, so that a mixture of two runs cannot
+ * pass for a result; `summary` goes into it, for a later run that finds nothing changed. Files of the user's own in the folder are left alone.
  */
-export function writeResults(folder: string, files: ReadonlyMap<string, string | Uint8Array>, result: StudyResult): void {
-  makeFolder(folder);
-  removeFile(join(folder, PROVENANCE));
-  for (const name of files.keys()) if (name.includes('/')) makeFolder(join(folder, name, '..'));
-  for (const [name, content] of files) replaceFile(join(folder, name), content);
+export function writeResults(folder: string, files: ReadonlyMap<string, string | Uint8Array>, result: StudyResult, summary: object): void {
   const { version, node, seed, files: inputs } = result.provenance;
   const results = [...files].map(([file, content]) => ({ file, sha256: sha256(content) })).sort((a, b) => (a.file < b.file ? -1 : 1));
-  replaceFile(
-    join(folder, PROVENANCE),
-    `${JSON.stringify({ format: 1, version, node, seed, options: result.options, inputs, results }, null, 2)}\n`,
-  );
+  const provenance: Provenance = { format: 1, version, node, seed, options: result.options, inputs, results, summary };
+  replaceResults(folder, new Map([...files, [PROVENANCE, `${JSON.stringify(provenance, null, 2)}\n`]]), PROVENANCE);
 }

@@ -2,6 +2,7 @@ import { cpSync, existsSync, mkdirSync, mkdtempSync, readdirSync, readFileSync, 
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
+import * as batchSays from '../../pipeline/base/says/batch.ts';
 import { says } from '../../pipeline/base/says/cli.ts';
 import { pilotlaw } from './captured.ts';
 
@@ -60,7 +61,55 @@ describe('run', () => {
     expect(exit).toBe(4);
     expect(out).toContain(join(at('several'), 'stack-loss'));
     expect(err).toContain(says.failedStudies(1, 2));
-    expect(readdirSync(at('several'))).toEqual(['stack-loss']);
+    expect(readdirSync(at('several')).sort()).toEqual(['index.html', 'stack-loss']);
+    const page = readFileSync(join(at('several'), 'index.html'), 'utf8');
+    expect(page).toContain('<a href="stack-loss/report.html">');
+    expect(page).toMatch(/1 have results, 1 failed[\s\S]*broken\/study\.yaml[\s\S]*haet/);
+  });
+
+  test('a page of the user’s own in the place of the overview is left alone', async () => {
+    mkdirSync(at('own'));
+    writeFileSync(join(at('own'), 'index.html'), 'mine');
+    const { exit, err } = await pilotlaw('run', at('stack-loss'), at('broken'), '--out', at('own'));
+    expect([exit, readFileSync(join(at('own'), 'index.html'), 'utf8')]).toEqual([4, 'mine']);
+    expect(err).toContain(batchSays.indexNotOurs());
+  });
+
+  test('an unchanged study is not computed again; a changed input, seed or result, or --fresh, computes it', async () => {
+    const run = async (...more: readonly string[]): Promise<string> => {
+      const { exit, out, err } = await pilotlaw('run', at('stack-loss'), '--out', at('cache'), ...more);
+      expect([exit, err]).toEqual([0, '']);
+      return out.includes('unchanged') ? 'unchanged' : 'computed';
+    };
+    expect(await run()).toBe('computed');
+    const json = async (): Promise<unknown> => JSON.parse((await pilotlaw('run', at('stack-loss'), '--out', at('cache'), '--json')).out);
+    expect(await run()).toBe('unchanged');
+    const cached = await json();
+    expect(await run('--fresh')).toBe('computed');
+    expect((await pilotlaw('run', at('stack-loss'), '--out', at('cache'), '--json', '--fresh')).out).toBe(`${JSON.stringify(cached)}\n`);
+    expect(await run('--seed', '2')).toBe('computed');
+    expect(await run('--seed', '2')).toBe('unchanged');
+    expect(await run()).toBe('computed');
+    const law = readFileSync(join(at('cache'), 'laws.json'));
+    writeFileSync(join(at('cache'), 'laws.json'), '{}');
+    expect(await run()).toBe('computed');
+    expect(readFileSync(join(at('cache'), 'laws.json'))).toEqual(law);
+    rmSync(join(at('cache'), 'report.html'));
+    expect(await run()).toBe('computed');
+    const trials = readdirSync(at('stack-loss')).find((name) => name.endsWith('.csv'))!;
+    const bytes = readFileSync(join(at('stack-loss'), trials));
+    writeFileSync(join(at('stack-loss'), trials), `${bytes.toString('utf8').trimEnd()}\n\n`);
+    expect(await run()).toBe(bytes.toString('utf8').endsWith('\n\n') ? 'unchanged' : 'computed');
+    writeFileSync(join(at('stack-loss'), trials), bytes);
+  }, 120_000);
+
+  test('two study files that name one folder for their results are refused before anything is computed', async () => {
+    cpSync(join(datasets, 'stack-loss'), at('twins'), { recursive: true });
+    cpSync(join(at('twins'), 'study.yaml'), join(at('twins'), 'second.yaml'));
+    const { exit, out, err } = await pilotlaw('run', join(at('twins'), 'study.yaml'), join(at('twins'), 'second.yaml'));
+    expect([exit, out]).toEqual([2, '']);
+    expect(err).toMatch(/study\.yaml: its results would go into ".*twins\/results", as those of .*second\.yaml/);
+    expect(existsSync(join(at('twins'), 'results'))).toBe(false);
   });
 
   test('what is no study is told', async () => {

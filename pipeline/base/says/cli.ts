@@ -21,7 +21,7 @@ export const says = {
   nextTrials: 'Propose the trials that would narrow the plant prediction most',
 
   optionOut: 'Folder for the results (several studies: one folder each inside it)',
-  optionJobs: 'Studies and resamples that run at the same time',
+  optionJobs: 'Studies that run at the same time (default: one per core)',
   optionSeed: 'Seed of the random numbers',
   optionFresh: 'Compute anew even if nothing has changed',
   optionQuiet: 'No messages but faults',
@@ -71,6 +71,13 @@ export const says = {
     `${law}  (${trials.used} of ${trials.read} rows used, ${warnings === 0 ? 'no warnings' : `${warnings} warning${warnings === 1 ? '' : 's'}`}); results in ${folder}, open ${folder}/report.html`,
   sharedFolder: (folder: string, other: string): string =>
     `its results would go into "${folder}", as those of ${other}; run them apart, or let their folders have different names`,
+  sharedNamedFolder: (folder: string, other: string): string =>
+    `its results would go into "${folder}", as those of ${other}; give one of them another output.folder, or run them apart with --out`,
+  unchanged: (law: string, folder: string): string =>
+    `${law}  (unchanged, nothing computed); results in ${folder}, open ${folder}/report.html`,
+  progress: (done: number, of: number, failed: number, left: string | undefined): string =>
+    `${done} of ${of} studies${failed === 0 ? '' : `, ${failed} failed`}${left === undefined ? '' : `, about ${left} left`}`,
+  indexWritten: (file: string): string => `All of them at a glance: ${file}`,
   failedStudies: (failed: number, of: number): string => `${failed} of ${of} studies failed; the results of the others are written`,
 
   noCorrelation: (id: string, known: readonly string[]): string =>

@@ -30,6 +30,10 @@ export const says = {
   notWritten: (path: string, cause: string): string => `"${path}" cannot be written: ${remedy(cause)}`,
   notRemoved: (path: string, cause: string): string => `"${path}" cannot be removed: ${remedy(cause)}`,
   folderNotMade: (path: string, cause: string): string => `the folder "${path}" cannot be made: ${remedy(cause)}`,
+  inUse: (folder: string, pid: number | undefined, lock: string): string =>
+    `another run${pid === undefined ? '' : ` (process ${pid})`} is writing into "${folder}"; wait until it has ended, or give this one another folder with --out (if no such process is left, remove "${lock}")`,
+  notOurs: (name: string): string =>
+    `"${name}" stands where a result goes and is no result of pilotlaw; it is left as it is, and no result is written: move it away, or choose another folder with --out or output.folder`,
   noStudy: (given: string, name: string): string => `no study here: "${given}" is no file and no folder that holds a ${name}`,
   nothingGiven: (name: string): string => `no study given; give study files or folders that hold a ${name}`,
   tooManyFiles: (folder: string, most: number): string => `more than ${most} files lie below "${folder}"; name the folders of the studies`,
