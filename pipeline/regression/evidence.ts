@@ -6,6 +6,8 @@ import { subset } from './fit-data.ts';
 import { fitLaw, type LawToFit } from './fit-law.ts';
 import { collinearity, entangled } from './identifiability.ts';
 import { residualNotes } from './residual-checks.ts';
+import { type RobustRefit, robustRefits } from './robust.ts';
+import { robustNotes } from './robust-notes.ts';
 import { whitenedDesign } from './whitened-design.ts';
 
 export interface TheoryTest {
@@ -35,6 +37,8 @@ export interface Identifiability {
 export interface Evidence {
   readonly theory: readonly TheoryTest[];
   readonly influence: readonly InfluenceRow[];
+  /** Of the chosen law. */
+  readonly robust: readonly RobustRefit[];
   readonly identifiability: readonly Identifiability[];
   readonly notes: readonly Note[];
 }
@@ -54,16 +58,22 @@ export interface EvidenceSettings {
 
 export function evidenceOf(witnesses: readonly Witness[], { chosen, order, setting, options }: EvidenceSettings): Evidence {
   const best = witnesses.find(({ fit }) => fit.name === chosen)!;
+  const robust = robustRefits(best.law, best.fit, best.data, options);
   return {
     theory: witnesses.flatMap(({ fit }) => theoryTests(fit)),
-    influence: influenceOf(best, options),
+    influence: [...robust.flatMap(robustRow), ...influenceOf(best, options)],
+    robust,
     identifiability: witnesses.map(({ fit, data }) => identifiabilityOf(fit, data)),
     notes: [
       ...witnesses.flatMap(({ fit, data }) => residualNotes(fit, data, order, setting)),
       ...witnesses.flatMap(({ fit, data }) => rangeNotes(fit, data)),
+      ...robustNotes(best.fit, robust, best.data.trials),
     ],
   };
 }
+
+const robustRow = ({ method, values, stop }: RobustRefit): readonly InfluenceRow[] =>
+  stop === 'converged' ? [{ kind: 'robust refit', left: method, values }] : [];
 
 /** Exponents and offsets that theory or long practice gives: 1/3 (boundary layer at Pr or Sc), 1/2 (laminar layer, penetration), 0.8 (turbulent tube), 2/3 (stirred vessel), 2 (stagnant sphere). */
 const theories: readonly {

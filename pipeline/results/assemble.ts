@@ -95,6 +95,7 @@ export function assemble(stages: Stages): StudyResult {
     theory: evidence.theory,
     intervals: stages.intervals,
     influence: evidence.influence,
+    robust: evidence.robust,
     identifiability: evidence.identifiability,
     audit: stages.audit,
     plant: stages.plant,

@@ -55,6 +55,9 @@ function lawRecord(fit: Fit, result: StudyResult) {
     },
     ranges: fit.ranges,
     stop: fit.stop,
+    robust_refits: result.robust
+      .filter((one) => one.law === fit.name)
+      .map(({ method, values, scale, weights, stop }) => ({ method, values, scale, weights, stop })),
     warnings: [...fit.notes, ...result.notes.filter((note) => note.about === fit.name)].map(({ code, text }) => ({ code, text })),
   };
 }

@@ -5,6 +5,7 @@ import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
 import type { IntervalRow } from '../regression/intervals.ts';
+import type { RobustRefit } from '../regression/robust.ts';
 import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
 import type { LawCurve } from './curves.ts';
@@ -100,6 +101,8 @@ export interface StudyResult {
   readonly theory: readonly TheoryTest[];
   readonly intervals: readonly IntervalRow[];
   readonly influence: readonly InfluenceRow[];
+  /** The chosen law with less weight on trials far from it. */
+  readonly robust: readonly RobustRefit[];
   readonly identifiability: readonly Identifiability[];
   readonly audit: AuditResult | null;
   readonly plant: PlantResult | null;

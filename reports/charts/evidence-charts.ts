@@ -2,6 +2,7 @@ import type { Budget } from '../../pipeline/budget/budget.ts';
 import type { Fit } from '../../pipeline/regression/fit.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { percent } from '../numbers.ts';
+import * as says from '../says/figures.ts';
 import { along, axisFrom, axisOver } from './axis.ts';
 import { type IntervalMark, intervalRows } from './interval-rows.ts';
 import { cut } from './labels.ts';
@@ -55,7 +56,7 @@ export function methodsChart(result: StudyResult, fit: Fit): Spec | undefined {
   return intervalRows({ axis: axisOver([-2, 2, ...near], 'standard errors from the estimate', false), marks, lines: [0], names: 190 });
 }
 
-/** How far each parameter moves when a campaign or an influential trial is left out, in its standard errors; the letters are the parameters. */
+/** How far each parameter moves in robust refits and when a campaign or an influential trial is left out, in its standard errors; the letters are the parameters. */
 export function influenceChart(result: StudyResult, fit: Fit): Spec | undefined {
   const rows = result.influence.slice(0, MOST_ROWS);
   const dots = rows.flatMap((one, row) =>
@@ -91,7 +92,7 @@ export function influenceChart(result: StudyResult, fit: Fit): Spec | undefined 
         },
       },
       rowNames(
-        rows.map((one) => cut(`without ${one.kind} ${one.left}`.trim(), 28)),
+        rows.map((one) => cut(says.refitOf(one.kind, one.left), 28)),
         200,
       ),
     ],

@@ -52,9 +52,12 @@ export const leverageCaption = (): string =>
   'Leverage against residual: a trial far to the right and far from zero moves the law most. Named: the three largest by Cook’s distance.';
 export const leverageAlternative = (names: readonly string[]): string =>
   `Leverage and residual of each trial; most influential: ${names.join(', ') || 'none'}.`;
+export const refitOf = (kind: string, left: string): string =>
+  kind === 'robust refit' ? `robust refit (${left})` : `without ${kind} ${left}`.trim();
 export const influenceCaption = (): string =>
-  'What leaving out one campaign or one influential trial does to each parameter (the letters), in standard errors of that parameter. Beyond 1, the law leans on what was left out.';
-export const influenceAlternative = (): string => 'Moves of the parameters when a campaign or trial is left out; the table has the values.';
+  'What less weight on trials far from the law (robust refits), or leaving out one campaign or one influential trial, does to each parameter (the letters), in standard errors of that parameter. Beyond 1, the law leans on what lost its weight.';
+export const influenceAlternative = (): string =>
+  'Moves of the parameters in robust refits and when a campaign or trial is left out; the table has the values.';
 export const budgetCaption = (): string => 'Which source carries the uncertainty of each parameter of the chosen law.';
 export const plantBudgetCaption = (): string => 'Which source carries the uncertainty of each plant case, by the chosen law.';
 export const budgetAlternative = (largest: readonly string[]): string => `Shares of the variance. Largest: ${largest.join('; ')}.`;

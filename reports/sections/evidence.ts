@@ -5,6 +5,7 @@ import { type Pictures, picturesOf } from '../figure.ts';
 import { html, type Markup } from '../html.ts';
 import { chosenFit } from '../law-text.ts';
 import { percent, percentOfLn, plainNumber, roundedLike } from '../numbers.ts';
+import { refitOf } from '../says/figures.ts';
 import * as says from '../says/sections.ts';
 import { columns, table } from '../table.ts';
 import { notesOf, section } from './section.ts';
@@ -40,9 +41,9 @@ function influence(result: StudyResult, fit: Fit): Markup | false {
     return Number.isFinite(value) ? roundedLike(value, one.estimate, one.lower, one.upper) : plainNumber(value);
   };
   return table(
-    'The law without a campaign or an influential trial',
-    columns('without', ...names.map((name) => `#${name}`)),
-    result.influence.map((row) => [`${row.kind} ${row.left}`, ...names.map((name) => shown(name, row.values[name] ?? Number.NaN))]),
+    says.refits(),
+    columns('refit', ...names.map((name) => `#${name}`)),
+    result.influence.map((row) => [refitOf(row.kind, row.left), ...names.map((name) => shown(name, row.values[name] ?? Number.NaN))]),
   );
 }
 

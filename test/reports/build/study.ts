@@ -95,6 +95,7 @@ export function madeStudy(makings: Makings = {}): StudyResult {
     intervals: (['t', 'profile', 'parametric bootstrap'] as const).flatMap((method) =>
       fit.parameters.map((p) => ({ law: lawName, parameter: p.name, method, lower: p.lower, upper: p.upper, note: '' })),
     ),
+    robust: [],
     influence: campaigns.slice(0, 20).map((left) => ({ kind: 'campaign' as const, left, values: { C: 0.0237, a: 0.786, b: 0.415 } })),
     identifiability: [
       {
