@@ -1,6 +1,7 @@
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { computeStudy } from '../pipeline/batch/run-study.ts';
+import { lawsJson } from '../pipeline/results/laws-json.ts';
 import type { StudyResult } from '../pipeline/results/study-result.ts';
 import { renderReport } from '../reports/page.ts';
 
@@ -25,6 +26,10 @@ describe('studies measured by others', () => {
     const found = ['b0', 'b1', 'b2', 'b3'].map((name) => parameter(result, 'straight', name));
     expect(found.map((one) => Number(one.estimate.toFixed(7)))).toEqual([-39.9196744, 0.7156402, 1.2952861, -0.1521225]);
     expect(found[0]!.standardError).toBeCloseTo(11.8959968506, 6);
+    for (const { warnings } of JSON.parse(lawsJson(result)).laws) {
+      const texts = warnings.map((one: { text: string }) => one.text);
+      expect(texts).toEqual([...new Set(texts)]);
+    }
   });
 
   // NIST StRD DanWood: certified b1 7.6886226176E-01 (1.8281973860E-02), b2 3.8604055871E+00 (5.1726610913E-02).

@@ -58,6 +58,12 @@ function lawRecord(fit: Fit, result: StudyResult) {
     robust_refits: result.robust
       .filter((one) => one.law === fit.name)
       .map(({ method, values, scale, weights, stop }) => ({ method, values, scale, weights, stop })),
-    warnings: [...fit.notes, ...result.notes.filter((note) => note.about === fit.name)].map(({ code, text }) => ({ code, text })),
+    warnings: warningsOf(fit, result.notes),
   };
+}
+
+/** The fit's own notes and those about it, each text once. */
+function warningsOf(fit: Fit, notes: StudyResult['notes']): readonly { readonly code: string; readonly text: string }[] {
+  const texts = new Map([...fit.notes, ...notes.filter((note) => note.about === fit.name)].map(({ code, text }) => [text, code]));
+  return [...texts].map(([text, code]) => ({ code, text }));
 }
