@@ -9,16 +9,19 @@ import { lawBudgets } from './budget/law-budget.ts';
 import { monteCarlo, monteCarloNotes } from './observations/monte-carlo.ts';
 import { type Observed, observe } from './observations/observe.ts';
 import { trialInputs } from './observations/trial-inputs.ts';
-import type { Plan } from './plan/plan.ts';
+import { type OwnSide, withCampaigns } from './plan/other-side-plan.ts';
+import type { Plan, PlannedLaw } from './plan/plan.ts';
 import { weightKey } from './plan/weight-plan.ts';
 import { type Choice, type Contender, chooseLaw, isUsable } from './regression/choose.ts';
 import { crossValidate } from './regression/cross-validate.ts';
 import { evidenceOf, type Witness } from './regression/evidence.ts';
-import type { FitOptions } from './regression/fit.ts';
+import type { FitData, FitOptions } from './regression/fit.ts';
 import { fitData } from './regression/fit-data.ts';
 import { fitLaw, type LawToFit } from './regression/fit-law.ts';
 import { intervalRows } from './regression/intervals.ts';
+import { resistanceStart } from './regression/resistance-start.ts';
 import { assemble } from './results/assemble.ts';
+import { type BothSides, bothSides, bothSidesNotes } from './results/both-sides.ts';
 import { cautionsFor } from './results/cautions.ts';
 import { lawCurves } from './results/curves.ts';
 import type { StudyResult } from './results/study-result.ts';
@@ -46,13 +49,14 @@ const PROPOSALS = 3;
  * The whole program on one page: a plan and the trials read for it -> the result of the study. Pure; the disk stays outside.
  * Throws InputError (exit 3) where the trials cannot carry any of the laws.
  */
-export function analyse(plan: Plan, read: Staged<Trials | TrialsWithCurves>, facts: RunFacts): StudyResult {
-  const { study } = plan;
-  const options = optionsOf(plan, facts.seed);
+export function analyse(planned: Plan, read: Staged<Trials | TrialsWithCurves>, facts: RunFacts): StudyResult {
+  const { study } = planned;
+  const options = optionsOf(planned, facts.seed);
 
   // 1. Trials -> observations: ln of every wanted key per trial, with random covariance and systematic slopes.
-  const observed = observe(trialInputs(plan.recipe, read.value), { recipe: plan.recipe, scale: study.fit.error, required: plan.required });
+  const observed = observedBy(planned, read.value);
   const { observations } = observed.value;
+  const plan = withCampaigns(planned, observations.campaigns.length);
   enoughTrials(plan, observed, read);
 
   const weights = options.weights === 'column' ? weightsOf(read.value, observations.trials) : undefined;
@@ -60,9 +64,7 @@ export function analyse(plan: Plan, read: Staged<Trials | TrialsWithCurves>, fac
   // 2. Observations -> fits: one for each law, each with its stopping reason, intervals and diagnostics.
   const contenders = plan.laws.map((law): Witness => {
     const data = fitData(observations, keysOf(law), weights);
-    const fit = fitLaw(law, data, options, 'law only');
-    const cross = crossValidate(law, fit, data, options);
-    return { law, data, fit: { ...fit, statistics: { ...fit.statistics, cvRmsLn: cross.rms, cvKind: cross.kind } }, cross };
+    return law.own === undefined ? witness(law, data, options) : oneStep(law, law.own, data, options);
   });
   someUsable(plan, contenders);
 
@@ -125,13 +127,16 @@ export function analyse(plan: Plan, read: Staged<Trials | TrialsWithCurves>, fac
   // 8. The chosen law as lines and bands.
   const curves = lawCurves(chosen.fit, chosen.data, audited?.rows ?? []);
 
+  const sides = sidesOf(plan, observed.value, chosen);
+
   // 9. Everything as plain JSON, the only thing reports and writers see.
   const notes: readonly Note[] = [
     ...plan.notes,
     ...read.notes,
     ...observed.notes,
     ...(study.fit.monteCarlo ? sampledCheck(plan, observed.value, options) : []),
-    ...contenders.flatMap(({ fit }) => fit.notes),
+    ...contenders.flatMap(({ fit }) => fit.notes.filter(({ code }) => plan.otherSide === undefined || code !== 'one-campaign')),
+    ...(sides === undefined ? [] : bothSidesNotes(sides)),
     ...evidence.notes,
     ...(audited?.notes ?? []),
     ...(plant?.notes ?? []),
@@ -151,11 +156,42 @@ export function analyse(plan: Plan, read: Staged<Trials | TrialsWithCurves>, fac
     forPlant: carried,
     budgets: budget,
     curves,
+    sides: sides ?? null,
     notes,
     cautions: cautionsFor(plan),
     options,
     facts,
   });
+}
+
+/** Trials observed; campaigns of which nothing can be used have no number. */
+function observedBy({ recipe, required, study, otherSide }: Plan, read: Trials): Staged<Observed> {
+  const spec = { recipe, scale: study.fit.error, required };
+  const first = observe(trialInputs(recipe, read), spec);
+  return otherSide === undefined ? first : observe(trialInputs(recipe, read, first.value.observations.campaigns), spec);
+}
+
+/** A law fitted, and what it makes of trials it has not seen. */
+function witness(law: LawToFit, data: FitData, options: FitOptions): Witness {
+  const fit = fitLaw(law, data, options, 'law only');
+  const cross = crossValidate(law, fit, data, options);
+  return { law, data, fit: { ...fit, statistics: { ...fit.statistics, cvRmsLn: cross.rms, cvKind: cross.kind } }, cross };
+}
+
+/** A law of one side and a resistance for each campaign, fitted to overall coefficients together: nothing else differs between campaigns. */
+function oneStep(law: PlannedLaw, { form, groups, names, resistances }: OwnSide, data: FitData, options: FitOptions): Witness {
+  const start = resistanceStart(law, { form, groups, scale: names.scale, resistances }, data, options);
+  return witness({ ...law, start }, { ...data, campaign: data.campaign.map(() => 0), campaigns: ['all'] }, options);
+}
+
+/** Both sides of the chosen law, where it was fitted through overall coefficients. */
+function sidesOf(plan: Plan, { evaluated, observations }: Observed, { fit, data }: Witness): BothSides | undefined {
+  const law = plan.laws.find(({ name }) => name === fit.name)!;
+  if (law.own === undefined) return undefined;
+  const node = (key: Key): number => plan.recipe.keys.indexOf(key);
+  const [scale, ratio] = [node(law.groups[law.own.names.scale]!), node('area_ratio')];
+  const { inside } = law.own;
+  return bothSides(law, fit, data, observations.campaigns, (i) => evaluated[i]!.nodes[scale]! * (inside ? evaluated[i]!.nodes[ratio]! : 1));
 }
 
 /** Response, then groups in the form's order. */

@@ -18,6 +18,7 @@ import { planGroups } from './group-plan.ts';
 import { headerOf } from './header.ts';
 import { planLaws } from './law-plan.ts';
 import { namingsOf } from './namings.ts';
+import { campaignsNamed, planOtherSide } from './other-side-plan.ts';
 import type { Candidate, Plan, PlannedLaw } from './plan.ts';
 import { type PlantBasis, plantBasis } from './plant-basis.ts';
 import { type PlantPlan, planPlant, plantExtras } from './plant-plan.ts';
@@ -54,7 +55,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
     if (curve?.gives.includes(key))
       faults.add('curve-and-column', says.curveAndColumn(key), study.quantities[key]?.place ?? study.trials.file.place);
   const fromCurve = (curve?.gives ?? []).map((key): Input => ({ key, label: `logged curve: ${key}` }));
-  const inputs = [...quantities.inputs, ...groups.inputs, ...fromCurve];
+  const given = [...quantities.inputs, ...groups.inputs, ...fromCurve];
   const base = [
     ...quantities.rules,
     ...formulas,
@@ -64,13 +65,17 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
     ...derivedRulesFor(study.equipment.is),
     ...groupRules,
   ];
-  const canHave = haver(ruleBook(base), inputs);
-  const { laws, rules } = planLaws({ study, groups: groups.keys, dimensions: quantities.dimensions, canHave }, faults);
+  const canHave = haver(ruleBook(base), given);
+  const { laws: written, rules } = planLaws({ study, groups: groups.keys, dimensions: quantities.dimensions, canHave }, faults);
+  const otherSide = planOtherSide(study, coefficient, written, faults);
+  const laws = otherSide?.embed(campaignsNamed(trials, study.trials)) ?? written;
   checkReferences(study, canHave, faults);
   faults.throwIfAny();
+  const inputs = [...given, ...(otherSide?.inputs ?? [])];
   const book = ruleBook([
     ...base,
     ...rules,
+    ...(otherSide?.rules ?? []),
     ...trustRules(keysAsked(asked), groups.onTrust),
     ...unitRules(keysAsked(asked.filter((one) => one.own))),
   ]);
@@ -86,11 +91,12 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
     laws,
     ...settled,
     ...(curve === undefined ? {} : { curve }),
+    ...(otherSide === undefined ? {} : { otherSide }),
     basis,
     ...(plant === undefined ? {} : { plant }),
     ...(rig === undefined ? {} : { rig }),
     tried: resolve(book, inputs, [...new Set([...plantExtras, ...inputs.map(({ key }) => key)])]).recipe,
-    namings: namingsOf(laws, groups, quantities.units),
+    namings: new Map([...namingsOf(laws, groups, quantities.units), ...(otherSide?.namings ?? []).map((one) => [one.key, one] as const)]),
     texts: quantities.texts,
     notes: [
       ...quantities.remarks.map((remark): Note => ({ section: 'method', level: 'note', ...remark })),

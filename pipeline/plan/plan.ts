@@ -7,6 +7,7 @@ import type { SeriesReduction } from '../reduction/series/series.ts';
 import type { RuleBook } from '../rules/resolve.ts';
 import type { Key, Recipe } from '../rules/rule.ts';
 import type { Study } from '../study/study.ts';
+import type { OtherSide, OwnSide } from './other-side-plan.ts';
 import type { PlantBasis } from './plant-basis.ts';
 import type { PlantPlan } from './plant-plan.ts';
 import type { RigPlan } from './rig-plan.ts';
@@ -32,6 +33,8 @@ export interface PlannedLaw {
   /** Names of quantities that enter in a unit of their own -> that unit. */
   readonly units: Readonly<Record<string, string>>;
   readonly place: Place;
+  /** The law of one side that this one of the overall coefficient was made from. */
+  readonly own?: OwnSide;
 }
 
 /** A published correlation as prepared for these trials. */
@@ -70,6 +73,8 @@ export interface Plan {
   readonly coefficient: { readonly key: Key; readonly symbol: string; readonly unit: string } | null;
   /** How a trial's logged curve becomes its readings, where the study has curves. */
   readonly curve?: SeriesReduction;
+  /** Where laws of one side are fitted through overall coefficients. */
+  readonly otherSide?: OtherSide;
   /** What a plant case takes over. */
   readonly basis: PlantBasis;
   /** Absent where the study names no plant. */

@@ -15,8 +15,10 @@ const otherSideNames = {
   resistance: 'other_side_resistance',
 } as const;
 
+export type OtherSideNames = typeof otherSideNames;
+
 /** Number of a trial's campaign, from 1; an input that the observations supply. */
-const campaignNumberKey: Key = 'campaign_number';
+export const campaignNumberKey: Key = 'campaign_number';
 
 /** A law of one side written as a law of the overall coefficient, with what its names mean and the rules for what is new in it. */
 export interface OtherSideLaw {
@@ -25,6 +27,9 @@ export interface OtherSideLaw {
   readonly rules: readonly Rule[];
   /** Names of the resistances, one for each campaign, in m^2 K/W on the outer area. */
   readonly resistances: readonly string[];
+  readonly names: OtherSideNames;
+  /** The own side is inside the tube: its area is the inner one. */
+  readonly inside: boolean;
 }
 
 /**
@@ -55,6 +60,8 @@ export function otherSideLaw(
     },
     rules: [scale],
     resistances,
+    names: otherSideNames,
+    inside: sideOf(settings, context) === 'inside',
   };
 }
 

@@ -14,6 +14,7 @@ import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts'
 import type { TrialsWithCurves } from '../trials/curve-readings.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
 import type { Trials } from '../trials/read-trials.ts';
+import type { BothSides } from './both-sides.ts';
 import type { LawCurve } from './curves.ts';
 import { drawnCurves } from './drawn-curves.ts';
 import { methodOf } from './method.ts';
@@ -35,6 +36,7 @@ export interface Stages {
   readonly forPlant: ForPlant;
   readonly budgets: readonly Budget[];
   readonly curves: readonly LawCurve[];
+  readonly sides: BothSides | null;
   readonly notes: readonly Note[];
   readonly cautions: readonly string[];
   readonly options: FitOptions;
@@ -103,6 +105,7 @@ export function assemble(stages: Stages): StudyResult {
     forPlant: stages.forPlant,
     budgets: stages.budgets,
     curves: stages.curves,
+    sides: stages.sides,
     series: 'curves' in read.value ? drawnCurves(read.value.curves, plan) : [],
     notes: distinct(stages.notes),
     method: methodOf(

@@ -1,5 +1,6 @@
 import { evaluate } from '../algebra/evaluate.ts';
 import type { AuditRow } from '../audit/verdict.ts';
+import { campaignNumberKey } from '../reduction/other-side-plot.ts';
 import type { Fit, FitData } from '../regression/fit.ts';
 import { predictor } from '../regression/predict-ln.ts';
 
@@ -43,6 +44,7 @@ const STEPS = 40;
 /** One curve for each group that varies among the trials. */
 export function lawCurves(fit: Fit, data: FitData, published: readonly AuditRow[]): readonly LawCurve[] {
   return fit.form.groups.flatMap((group, g) => {
+    if (fit.groups[group] === campaignNumberKey) return [];
     const [low, high] = fit.ranges[group]!;
     return high > low * 1.001 || (fit.scale === 'absolute' && high > low) ? [curve(fit, data, group, g, published)] : [];
   });

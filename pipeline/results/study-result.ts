@@ -8,6 +8,7 @@ import type { IntervalRow } from '../regression/intervals.ts';
 import type { RobustRefit } from '../regression/robust.ts';
 import type { ForPlant } from '../scale-up/for-plant.ts';
 import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts';
+import type { BothSides } from './both-sides.ts';
 import type { LawCurve } from './curves.ts';
 
 /** A group or quantity that appears in a law, as the report names it. */
@@ -112,6 +113,8 @@ export interface StudyResult {
   readonly budgets: readonly Budget[];
   /** The chosen law against each group that varies. */
   readonly curves: readonly LawCurve[];
+  /** Both sides of the chosen law, where it was fitted through overall coefficients. */
+  readonly sides: BothSides | null;
   /** Logged curves behind a coefficient, thinned for drawing: t in s. */
   readonly series: readonly {
     readonly trial: string;

@@ -21,6 +21,8 @@ interface Expected {
   /** Words of notes that must be told. */
   readonly notes?: readonly string[];
   readonly series?: number;
+  /** Campaign -> resistance of all else, m^2 K/W. */
+  readonly sides?: Readonly<Record<string, number>>;
   /** Relative, by name; `law` for the law, 1e-9 where nothing is said. */
   readonly tolerance?: Readonly<Record<string, number>>;
 }
@@ -60,6 +62,15 @@ describe.each(studies)('%s', (name) => {
       near(fit.parameters.find((one) => one.name === key)!.standardError, value, 10 * share('law'), `standard error of ${key}`);
     if (read.law?.residual_sd !== undefined)
       near(fit.statistics.residualSd, read.law.residual_sd, 10 * share('law'), 'residual standard deviation');
+  });
+
+  test('both sides are', async () => {
+    const { sides } = await result;
+    expect(sides?.others.map(({ campaign }) => campaign) ?? []).toEqual(Object.keys(read.sides ?? {}));
+    for (const { campaign, resistance, lower, upper } of sides?.others ?? []) {
+      near(resistance, read.sides![campaign]!, share('law'), campaign);
+      expect(lower < resistance && resistance < upper).toBe(true);
+    }
   });
 
   test('rows, refusals, curves and notes are as told', async () => {

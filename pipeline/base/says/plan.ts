@@ -76,6 +76,12 @@ export const noSuchCondition = (name: string, meant: string | undefined): string
 export const correlationLacks = (name: string, definition: string, roots: readonly string[]): string =>
   `${name} (${definition})${roots.length === 0 ? '' : `, for which ${roots.join(' and ')} ${roots.length === 1 ? 'is' : 'are'} missing`}`;
 export const unreadableSetting = (key: string, read: string, wanted: string): string => `"${read}" cannot be read as ${key}: ${wanted}`;
+export const lawWithoutSide = (response: string): string =>
+  `other-side-plot fits a law of one side to overall coefficients; ${response} is none: write the law for Nu or heat_transfer_coefficient`;
+export const otherSideAlone = (key: string): string =>
+  `${key} cannot be had from other-side-plot, whose law is fitted through overall coefficients; leave ${key} out and use the law of the own side by hand`;
+export const sideConductance = (formula: string): string =>
+  `conductance of the own side for a response of 1, on the outer area: ${formula}`;
 export const curveAndColumn = (key: string): string => `${key} comes from the logged curve and is given here too; leave one of them out`;
 export const giveTheCurve = (route: string): string =>
   `${route} reads it from a logged curve: say where it stands under coefficient.series`;

@@ -78,3 +78,21 @@ export const sheetKnown = (): string => 'variance of the sources';
 export const sheetRest = (): string => 'variance of campaign and scatter';
 export const sheetFreedom = (): string => 'degrees of freedom';
 export const sheetHalf = (): string => 'half-width';
+
+const toTenth = (value: number): string => `${Math.round(100 * value)}`;
+const span = (values: readonly number[]): string => `${short(Math.min(...values))} to ${short(Math.max(...values))}`;
+export const bothSides = (
+  law: string,
+  others: readonly { readonly campaign: string; readonly resistance: number; readonly lower: number; readonly upper: number }[],
+  own: readonly number[],
+): string =>
+  `${law}, both sides: ${others
+    .map(
+      ({ campaign, resistance, lower, upper }) =>
+        `${campaign === '' ? 'all else' : `all else in campaign ${campaign}`} resists ${short(resistance)} m^2 K/W (${short(lower)} to ${Number.isFinite(upper) ? short(upper) : 'no upper bound'}) on the outer area`,
+    )
+    .join('; ')}; the law's side has a coefficient of ${span(own)} W/(m^2 K) on its own area`;
+export const ownShare = (low: number, high: number): string =>
+  `the law's side holds ${toTenth(low)} to ${toTenth(high)} % of the whole resistance${low < 0.3 ? '; below 30 % its law rests on a small difference of large numbers' : ''}`;
+export const oneStep = (): string =>
+  'law and resistances are fitted to the overall coefficients in one step (after Wilson 1915); no resistance found here goes back into a reduction. Each campaign has a resistance of its own, so no other difference between campaigns is looked for, and how the own side itself would differ in another campaign is not known';

@@ -144,6 +144,7 @@ export function madeStudy(makings: Makings = {}): StudyResult {
       ],
     })),
     curves: madeCurves(fit, trials, audit),
+    sides: null,
     series: Array.from({ length: makings.series ?? 0 }, (_, k) => ({
       trial: trials[k % n]!.trial,
       quantity: name('bulk_concentration'),
