@@ -32,6 +32,7 @@ import { scaleUp } from './scale-up/scale-up.ts';
 import { standingLaws } from './scale-up/standing-laws.ts';
 import type { TrialsWithCurves } from './trials/curve-readings.ts';
 import type { Trials } from './trials/read-trials.ts';
+import { unlikelyValues } from './trials/unlikely.ts';
 
 /** What a run brings along beside the plan and the trials. */
 export interface RunFacts {
@@ -133,6 +134,7 @@ export function analyse(planned: Plan, read: Staged<Trials | TrialsWithCurves>, 
   const notes: readonly Note[] = [
     ...plan.notes,
     ...read.notes,
+    ...unlikelyValues(read.value, constantsOf(plan)),
     ...observed.notes,
     ...(study.fit.monteCarlo ? sampledCheck(plan, observed.value, options) : []),
     ...contenders.flatMap(({ fit }) => fit.notes.filter(({ code }) => plan.otherSide === undefined || code !== 'one-campaign')),
@@ -224,6 +226,11 @@ function auditOf(
     weight,
   }).value;
 }
+
+const constantsOf = ({ recipe }: Plan): Readonly<Record<Key, number>> =>
+  Object.fromEntries(
+    recipe.inputs.flatMap(({ key, constant }) => (constant === undefined || key.startsWith('factor: ') ? [] : [[key, constant]])),
+  );
 
 /** Draws a trial for the check of first-order propagation. */
 const SAMPLES = 4000;

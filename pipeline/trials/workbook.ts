@@ -16,7 +16,8 @@ export function readWorkbook(bytes: Buffer, file: string, sheet?: string): Grid 
   const name = chosenSheet(book, file, sheet);
   const cells = book.Sheets[name]!;
   const found = textCells(cells, file);
-  const remarks = [...fillMerged(cells, found, file, name), ...hiddenRows(cells, found, file, name)];
+  const commas = commaTexts(cells, found, file, name);
+  const remarks = [...commas, ...fillMerged(cells, found, file, name), ...hiddenRows(cells, found, file, name)];
   return { file, sheet: name, rows: gridRows(found), mayUseComma: false, remarks };
 }
 
@@ -85,6 +86,39 @@ const dateText = (date: Date): string =>
         .toISOString()
         .slice(0, 19)
         .replace(/T00:00:00$/u, '');
+
+const decimalComma = /^[-+−]?\d*,\d+(?:[eE][-+]?\d+)?$/u;
+/** `1,234`: a decimal or a thousand. */
+const eitherWay = /^[-+−]?[1-9]\d{0,2},\d{3}$/u;
+
+/**
+ * Numbers that were stored as text with a decimal comma, as pasted ones are: read as numbers in a column that writes its numbers so and where at least one of
+ * them can be nothing else. A single one among real numbers, and a column in which all might be thousands (`1,234`), stay text and are refused.
+ */
+function commaTexts(sheet: XLSX.WorkSheet, rows: TextCells, file: string, name: string): readonly Message[] {
+  const columns = new Map<number, { readonly r: number; readonly text: string }[]>();
+  const real = new Map<number, number>();
+  for (const [r, row] of rows)
+    for (const [c, text] of row) {
+      const { t } = sheet[XLSX.utils.encode_cell({ r, c })] as XLSX.CellObject;
+      if (t === 'n') real.set(c, (real.get(c) ?? 0) + 1);
+      if (t === 's' && decimalComma.test(text)) columns.set(c, [...(columns.get(c) ?? []), { r, text }]);
+    }
+  const sure = [...columns].filter(([c, texts]) => texts.length > (real.get(c) ?? 0) && texts.some(({ text }) => !eitherWay.test(text)));
+  for (const [c, texts] of sure) for (const { r, text } of texts) put(rows, r, c, text.replace(',', '.'));
+  if (sure.length === 0) return [];
+  const count = sure.reduce((sum, [, texts]) => sum + texts.length, 0);
+  return [
+    {
+      code: 'comma-text',
+      text: says.commaText(
+        count,
+        sure.map(([c]) => XLSX.utils.encode_col(c)),
+      ),
+      place: { file, key: name },
+    },
+  ];
+}
 
 function fillMerged(sheet: XLSX.WorkSheet, rows: TextCells, file: string, name: string): readonly Message[] {
   const downwards = (sheet['!merges'] ?? []).filter(({ s, e }) => e.r > s.r && e.c === s.c && rows.get(s.r)?.has(s.c));

@@ -107,4 +107,8 @@ export const says = {
   noLineFeed: (): string => 'the log has no line feeds; save it with one row a line',
   caseTwice: (name: string, line: number): string =>
     `the case ${quoted(name)} stands in line ${line} already; give each case a name of its own`,
+  commaText: (count: number, columns: readonly string[]): string =>
+    `${count} cells of column${columns.length === 1 ? '' : 's'} ${some(columns, 8)} hold numbers as text with a decimal comma; they are read as numbers`,
+  unlikelyValue: (key: string, value: number, unit: string, [from, to]: readonly [number, number]): string =>
+    `${key} is ${Number(value.toPrecision(4))}${unit === '1' ? '' : ` ${unit}`} in a typical trial, where equipment usually has ${from} to ${to}${unit === '1' ? '' : ` ${unit}`}: is its unit right?`,
 };
