@@ -71,7 +71,7 @@ ${factors.join('\n')}
 
 ## Errors in the group: u(ln ${first.lead}) = 0.1, nothing changed
 
-A fit that took the group for exact would find false trends in 19 % at a range of 3, by attenuation of the slope.
+False trends must stay rare although the group that a trend is sought in is itself read with error.
 
 | range of ${first.lead} ${head}|
 |---|---|---|---|---|
