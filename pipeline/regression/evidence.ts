@@ -1,5 +1,7 @@
 import type { Note } from '../base/message.ts';
 import * as says from '../base/says/evidence.ts';
+import { breakNotes } from './break-notes.ts';
+import { type BreakSearch, breakSearches } from './break-search.ts';
 import type { Contender } from './choose.ts';
 import type { Fit, FitData, FitOptions } from './fit.ts';
 import { subset } from './fit-data.ts';
@@ -8,6 +10,7 @@ import { collinearity, entangled } from './identifiability.ts';
 import { residualNotes } from './residual-checks.ts';
 import { type RobustRefit, robustRefits } from './robust.ts';
 import { robustNotes } from './robust-notes.ts';
+import { roleOf } from './role-of.ts';
 import { whitenedDesign } from './whitened-design.ts';
 
 export interface TheoryTest {
@@ -39,6 +42,8 @@ export interface Evidence {
   readonly influence: readonly InfluenceRow[];
   /** Of the chosen law. */
   readonly robust: readonly RobustRefit[];
+  /** Of the chosen law, one for each Re in it. */
+  readonly breaks: readonly BreakSearch[];
   readonly identifiability: readonly Identifiability[];
   readonly notes: readonly Note[];
 }
@@ -59,15 +64,18 @@ export interface EvidenceSettings {
 export function evidenceOf(witnesses: readonly Witness[], { chosen, order, setting, options }: EvidenceSettings): Evidence {
   const best = witnesses.find(({ fit }) => fit.name === chosen)!;
   const robust = robustRefits(best.law, best.fit, best.data, options);
+  const breaks = breakSearches(best.law, best.fit, best.data, options);
   return {
     theory: witnesses.flatMap(({ fit }) => theoryTests(fit)),
     influence: [...robust.flatMap(robustRow), ...influenceOf(best, options)],
     robust,
+    breaks,
     identifiability: witnesses.map(({ fit, data }) => identifiabilityOf(fit, data)),
     notes: [
       ...witnesses.flatMap(({ fit, data }) => residualNotes(fit, data, order, setting)),
       ...witnesses.flatMap(({ fit, data }) => rangeNotes(fit, data)),
       ...robustNotes(best.fit, robust, best.data.trials),
+      ...breakNotes(breaks),
     ],
   };
 }
@@ -107,21 +115,6 @@ function theoryTests(fit: Fit): readonly TheoryTest[] {
         };
       });
   });
-}
-
-/** What a parameter does in its law: the exponent of a group, an offset standing alone in a sum, or something else. */
-function roleOf({ form }: Fit, name: string): { readonly kind: 'exponent' | 'offset' | 'other'; readonly of: string } {
-  let found: { kind: 'exponent' | 'offset' | 'other'; of: string } = { kind: 'other', of: '' };
-  const walk = (e: Fit['form']['tree'], inSum: boolean): void => {
-    if (e.op === 'constant' && e.name === name && inSum) found = { kind: 'offset', of: '' };
-    if (e.op === '^' && e.of[1].op === 'constant' && e.of[1].name === name && e.of[0].op === 'group')
-      found = { kind: 'exponent', of: e.of[0].name };
-    if (e.op === 'number' || e.op === 'group' || e.op === 'constant') return;
-    for (const part of e.of) walk(part, e.op === '+');
-    if (e.op === 'bands') walk(e.on, false);
-  };
-  walk(form.tree, true);
-  return found;
 }
 
 /** The law without each campaign, and without each of the three most influential trials. */

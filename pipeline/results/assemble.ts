@@ -98,6 +98,7 @@ export function assemble(stages: Stages): StudyResult {
     intervals: stages.intervals,
     influence: evidence.influence,
     robust: evidence.robust,
+    breaks: evidence.breaks,
     identifiability: evidence.identifiability,
     audit: stages.audit,
     plant: stages.plant,

@@ -55,6 +55,7 @@ function lawRecord(fit: Fit, result: StudyResult) {
     },
     ranges: fit.ranges,
     stop: fit.stop,
+    breaks: result.breaks.flatMap((one) => (one.law === fit.name && one.looked ? [breakRecord(one)] : [])),
     robust_refits: result.robust
       .filter((one) => one.law === fit.name)
       .map(({ method, values, scale, weights, stop }) => ({ method, values, scale, weights, stop })),
@@ -67,3 +68,18 @@ function warningsOf(fit: Fit, notes: StudyResult['notes']): readonly { readonly 
   const texts = new Map([...fit.notes, ...notes.filter((note) => note.about === fit.name)].map(({ code, text }) => [text, code]));
   return [...texts].map(([text, code]) => ({ code, text }));
 }
+
+const breakRecord = (one: Extract<StudyResult['breaks'][number], { looked: true }>) => ({
+  group: one.group,
+  at: one.at,
+  lower: one.lower,
+  upper: one.upper,
+  exponent_below: one.below,
+  exponent_above: one.above,
+  change: one.change,
+  change_lower: one.changeLower,
+  change_upper: one.changeUpper,
+  largest_f: one.largestF,
+  chance: one.chance,
+  aicc_difference: one.aicc,
+});

@@ -1,6 +1,7 @@
 import type { AuditResult } from '../audit/verdict.ts';
 import type { Note } from '../base/message.ts';
 import type { Budget } from '../budget/budget.ts';
+import type { BreakSearch } from '../regression/break-search.ts';
 import type { Choice } from '../regression/choose.ts';
 import type { Identifiability, InfluenceRow, TheoryTest } from '../regression/evidence.ts';
 import type { Fit } from '../regression/fit.ts';
@@ -104,6 +105,8 @@ export interface StudyResult {
   readonly influence: readonly InfluenceRow[];
   /** The chosen law with less weight on trials far from it. */
   readonly robust: readonly RobustRefit[];
+  /** Whether one exponent of Re holds for the chosen law. */
+  readonly breaks: readonly BreakSearch[];
   readonly identifiability: readonly Identifiability[];
   readonly audit: AuditResult | null;
   readonly plant: PlantResult | null;

@@ -12,6 +12,8 @@ export const calculatorFine = (confidence: string): string =>
   `By the same formulas as the plant cases, for group values without an uncertainty of their own, at ${confidence}. A law is silent about what lies outside its ranges: there the interval is what the law would say if it went on.`;
 export const noNext = (): string => 'No further trials are proposed by this version.';
 export const refits = (): string => 'The law with less weight on trials far from it, and without a campaign or an influential trial';
+export const breaks = (law: string): string => `One exponent of Re, or two that meet at a break, in ${law}`;
+export const open = (): string => 'open';
 export const comparedLaws = (): string => 'Laws compared; errors on trials that were left out of the fit';
 export const condition = (law: string): string =>
   `What the trials tell of ${law} together: condition indices and the share of each parameter’s variance that hangs on them`;

@@ -22,6 +22,7 @@ export function evidence(result: StudyResult, pictures: Pictures): Markup {
 ${fit?.statedUncertainty !== undefined && html`<p>${says.statedUncertainty(plainNumber(fit.statedUncertainty.chiSquared), plainNumber(fit.statedUncertainty.degreesOfFreedom), plainNumber(fit.statedUncertainty.above, 2))}</p>`}
 ${picturesOf(pictures, 'influence')}
 ${fit !== undefined && influence(result, fit)}
+${breaks(result)}
 ${laws(result)}
 ${own !== undefined && identifiability(own)}
 ${picturesOf(pictures, 'budget')}
@@ -44,6 +45,37 @@ function influence(result: StudyResult, fit: Fit): Markup | false {
     says.refits(),
     columns('refit', ...names.map((name) => `#${name}`)),
     result.influence.map((row) => [refitOf(row.kind, row.left), ...names.map((name) => shown(name, row.values[name] ?? Number.NaN))]),
+  );
+}
+
+function breaks(result: StudyResult): Markup | false {
+  const rows = result.breaks.flatMap((one) => (one.looked ? [one] : []));
+  const place = (value: number): string => (value > 0 && Number.isFinite(value) ? plainNumber(value) : says.open());
+  return (
+    rows.length > 0 &&
+    table(
+      says.breaks(rows[0]!.law),
+      columns(
+        'group',
+        '#best break',
+        '#from',
+        '#to',
+        '#exponent below',
+        '#above',
+        '#change',
+        '#from',
+        '#to',
+        '#AICc by the break',
+        '#chance alone',
+      ),
+      rows.map((one) => [
+        one.group,
+        ...[one.at, one.lower, one.upper].map(place),
+        ...[one.below, one.above, one.change, one.changeLower, one.changeUpper].map((value) => plainNumber(value)),
+        plainNumber(one.aicc),
+        percent(one.chance),
+      ]),
+    )
   );
 }
 

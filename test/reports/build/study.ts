@@ -96,6 +96,25 @@ export function madeStudy(makings: Makings = {}): StudyResult {
       fit.parameters.map((p) => ({ law: lawName, parameter: p.name, method, lower: p.lower, upper: p.upper, note: '' })),
     ),
     robust: [],
+    breaks: [
+      {
+        law: lawName,
+        group: 'Re',
+        looked: true,
+        at: 21000,
+        lower: 0,
+        upper: 48000,
+        range: [8000, 90000],
+        change: 0.02,
+        changeLower: -0.03,
+        changeUpper: 0.07,
+        below: 0.78,
+        above: 0.8,
+        largestF: 1.9,
+        chance: 0.61,
+        aicc: 3.4,
+      },
+    ],
     influence: campaigns.slice(0, 20).map((left) => ({ kind: 'campaign' as const, left, values: { C: 0.0237, a: 0.786, b: 0.415 } })),
     identifiability: [
       {
