@@ -29,10 +29,10 @@ export const found = (one: Found): string =>
   `One exponent of ${one.group} does not hold for ${one.law} over the whole range of the trials (${over(one)}): at ${one.group} ${short(one.at)} (${place(one)}) ${
     Number.isFinite(one.below)
       ? `it goes from ${short(one.below)} to ${short(one.above)}`
-      : `it changes by ${short(one.change, 2)} (${short(one.changeLower, 2)} to ${short(one.changeUpper, 2)})`
+      : `it changes by ${short(one.change, 2)} (${short(one.changeLower, 2)} to ${short(one.changeUpper, 2)}, were the break known)`
   }. Without a break, chance alone does as well in ${share(one.chance)} of studies; ${aicc(one.aicc)}. Do not extrapolate in ${one.group}: fit the two ranges apart, or propose a law that blends them.`;
 export const notFound = (one: Found): string =>
-  `Nothing speaks against one exponent of ${one.group} for ${one.law} over the trials (${over(one)}): the best break, at ${short(one.at)}, would change it by ${short(one.change, 2)} (${short(one.changeLower, 2)} to ${short(one.changeUpper, 2)}), and chance alone does as well in ${share(one.chance)} of studies without a break; ${aicc(one.aicc)}. A change inside that interval would not show in these trials.`;
+  `Nothing speaks against one exponent of ${one.group} for ${one.law} over the trials (${over(one)}): the best break, at ${short(one.at)}, would change it by ${short(one.change, 2)} (${short(one.changeLower, 2)} to ${short(one.changeUpper, 2)}, were the break known), and chance alone does as well in ${share(one.chance)} of studies without a break; ${aicc(one.aicc)}. A change inside that interval would not show in these trials.`;
 export const notLooked = (law: string, group: string, why: string): string =>
   `Whether one exponent of ${group} holds for ${law} over the whole range was not looked at: ${
     why === 'too few trials'
