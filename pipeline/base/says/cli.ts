@@ -78,7 +78,8 @@ export const says = {
   progress: (done: number, of: number, failed: number, left: string | undefined): string =>
     `${done} of ${of} studies${failed === 0 ? '' : `, ${failed} failed`}${left === undefined ? '' : `, about ${left} left`}`,
   indexWritten: (file: string): string => `All of them at a glance: ${file}`,
-  failedStudies: (failed: number, of: number): string => `${failed} of ${of} studies failed; the results of the others are written`,
+  failedStudies: (failed: number, of: number): string =>
+    failed === of ? `all ${of} studies failed` : `${failed} of ${of} studies failed; the results of the others are written`,
 
   noCorrelation: (id: string, known: readonly string[]): string =>
     `no published correlation has the id "${id}"${didYouMean(id, known)}; pilotlaw correlations lists them all`,
