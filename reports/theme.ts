@@ -15,7 +15,9 @@ nav ol{list-style:none;display:flex;flex-wrap:wrap;gap:.2rem 1.4rem;padding:0;ma
 a{color:var(--accent)}
 figure{margin:1.8rem 0;max-width:100%}
 figcaption{max-width:46rem;margin-top:.4rem}
-.picture svg{display:block;max-width:100%;height:auto}
+.range{margin:.5rem 0}
+.range figcaption{margin:0}
+.range svg,.picture svg{display:block;max-width:100%;height:auto}
 .pair{display:flex;flex-wrap:wrap;gap:0 2.5rem}
 .half{flex:1 1 24rem;max-width:28rem}
 .wide{overflow-x:auto;margin:1.4rem 0}

@@ -12,6 +12,7 @@ export const correlationsCommand: Command = {
     { name: 'gives', value: 'NAME', about: says.optionGives },
     { name: 'search', value: 'TEXT', about: says.optionSearch },
     { name: 'at', value: 'TEXT', about: says.optionAt },
+    { name: 'page', value: 'FILE', about: says.optionPage },
     { name: 'json', about: says.optionJson },
   ],
   run: async (given, terminal) => {
@@ -21,6 +22,7 @@ export const correlationsCommand: Command = {
       gives: textOption(given, 'gives'),
       search: textOption(given, 'search'),
       at: textOption(given, 'at'),
+      page: textOption(given, 'page'),
       json: flag(given, 'json'),
     };
     const { showCorrelations } = await import('./show-correlations.ts');

@@ -1,8 +1,10 @@
+import { resolve } from 'node:path';
 import { catalogue } from '../../correlations/catalogue.ts';
 import type { Correlation } from '../../correlations/correlation.ts';
 import { evaluateCorrelation } from '../../correlations/evaluate-correlation.ts';
 
 import { says } from '../base/says/cli.ts';
+import { replaceFile } from '../files/write.ts';
 import { wrongCommandLine } from './arguments.ts';
 import { atValues } from './at-values.ts';
 import { correlationRecord, matching, type Wanted } from './correlation-record.ts';
@@ -15,16 +17,22 @@ import type { Terminal } from './terminal.ts';
 export interface CorrelationsRequest extends Wanted {
   readonly id?: string;
   readonly at?: string;
+  /** File to write the entries to as a page for reference. */
+  readonly page?: string;
   readonly json: boolean;
 }
 
 /** Lists the published correlations, shows one in full, or evaluates one. */
 export async function showCorrelations(asked: CorrelationsRequest, terminal: Terminal): Promise<Exit> {
-  const { id, at, json } = asked;
+  const { id, at, page, json } = asked;
   if (id === undefined && at !== undefined) throw wrongCommandLine(says.atNeedsId);
   const entries = id === undefined ? matching(catalogue, asked) : [byId(id)];
   if (entries.length === 0 && !json) throw wrongCommandLine(says.noneMatch);
-  if (at !== undefined) terminal.out(`${valueAt(entries[0]!, at, json)}\n`);
+  if (page !== undefined) {
+    const { cataloguePage } = await import('../../reports/catalogue-page.ts');
+    replaceFile(resolve(page), cataloguePage(entries));
+    terminal.out(`${says.pageWritten(entries.length, page)}\n`);
+  } else if (at !== undefined) terminal.out(`${valueAt(entries[0]!, at, json)}\n`);
   else if (json) terminal.out(`${JSON.stringify(entries.map(correlationRecord), null, 2)}\n`);
   else terminal.out(`${id === undefined ? listText(entries) : wholeText(entries[0]!)}\n`);
   return EXIT.done;

@@ -29,6 +29,8 @@ export const says = {
   optionFamily: 'Only this family of equipment, such as tube',
   optionGives: 'Only correlations that give this, such as Nu',
   optionSearch: 'Only correlations with this text in id, authors, title or use',
+  optionPage: 'Write them to this file as one HTML page for reference',
+  pageWritten: (entries: number, file: string): string => `${entries} ${entries === 1 ? 'correlation' : 'correlations'} written to ${file}`,
   optionAt: 'Evaluate there, such as "Re=6071, Pr=0.70"',
   optionCount: 'How many trials to propose',
   optionOutFile: 'File to write instead of standard output',
