@@ -32,6 +32,7 @@ import { scaleUp } from './scale-up/scale-up.ts';
 import { standingLaws } from './scale-up/standing-laws.ts';
 import type { TrialsWithCurves } from './trials/curve-readings.ts';
 import type { Trials } from './trials/read-trials.ts';
+import type { SteadyTrials } from './trials/steady.ts';
 import { unlikelyValues } from './trials/unlikely.ts';
 
 /** What a run brings along beside the plan and the trials. */
@@ -50,7 +51,7 @@ const PROPOSALS = 3;
  * The whole program on one page: a plan and the trials read for it -> the result of the study. Pure; the disk stays outside.
  * Throws InputError (exit 3) where the trials cannot carry any of the laws.
  */
-export function analyse(planned: Plan, read: Staged<Trials | TrialsWithCurves>, facts: RunFacts): StudyResult {
+export function analyse(planned: Plan, read: Staged<Trials | TrialsWithCurves | SteadyTrials>, facts: RunFacts): StudyResult {
   const { study } = planned;
   const options = optionsOf(planned, facts.seed);
 

@@ -17,11 +17,12 @@ import { resultFiles, writeResults } from '../results/write-results.ts';
 import { parseOwnCorrelations } from '../study/own-correlations.ts';
 import { parseStudy } from '../study/parse-study.ts';
 import type { Placed, Study } from '../study/study.ts';
-import type { LogSource } from '../trials/log-stream.ts';
+import { type LogSource, readLogHead } from '../trials/log-stream.ts';
 import { readTable } from '../trials/read-table.ts';
 import { readTrials } from '../trials/read-trials.ts';
 import type { Table } from '../trials/table.ts';
 import { SEED } from './seed.ts';
+import { steadyWindowsOf } from './steady-log.ts';
 import { curvesOf } from './study-curves.ts';
 import { type StudySummary, summaryOf } from './summary.ts';
 
@@ -62,11 +63,14 @@ async function loadStudy(path: string): Promise<Loaded> {
   };
   const study = parseStudy(studyText(bytesOf(file, path, undefined, MOST_STUDY), file), file);
   refuseWhatIsNotThere(study);
-  const trials = readTable(inside(study.trials.file), {
-    file: study.trials.file.is,
-    ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),
-    expects: columnsAsked(study),
-  });
+  const trials =
+    study.trials.steady !== undefined
+      ? readLogHead(open(study.trials.file.is, study.trials.file.place), columnsAsked(study))
+      : readTable(inside(study.trials.file), {
+          file: study.trials.file.is,
+          ...(study.trials.sheet === undefined ? {} : { sheet: study.trials.sheet.is }),
+          expects: columnsAsked(study),
+        });
   const tables = new Map<string, Table>();
   for (const entry of [study.fluid?.own, study.fluid?.other, study.plant?.fluid?.own, study.plant?.fluid?.other]) {
     const table = entry?.is.table;
@@ -112,6 +116,7 @@ const columnsAsked = (study: Study): readonly string[] =>
     study.trials.campaign,
     study.trials.setting,
     study.trials.order,
+    study.trials.steady?.time,
     ['uncertainty', 'equal'].includes(study.fit.weights.is) ? undefined : study.fit.weights,
     ...Object.values(study.quantities).map(({ is }) => is.column),
     ...Object.values(study.groups).map(({ is }) => is.column),
@@ -124,7 +129,11 @@ export const computeStudy = async (file: string, seed = SEED, proposals?: number
 const computed = (file: string, seed = SEED, proposals?: number): Promise<{ readonly plan: Plan; readonly result: StudyResult }> =>
   withPlacesFrom(file, async () => {
     const { plan, trials, files, open } = await loadStudy(file);
-    const read = await curvesOf(plan, trials, readTrials(trials, plan.study.trials, plan.columns), open);
+    const { steady } = plan.study.trials;
+    const read =
+      steady === undefined
+        ? await curvesOf(plan, trials, readTrials(trials, plan.study.trials, plan.columns), open)
+        : await steadyWindowsOf(plan, steady, open);
     const facts = { version, node: process.versions.node, seed, files, ...(proposals === undefined ? {} : { proposals }) };
     return { plan, result: analyse(plan, read, facts) };
   });

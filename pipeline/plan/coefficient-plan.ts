@@ -44,6 +44,8 @@ export function planCoefficient(study: Study, quantities: QuantityPlan, faults: 
   const settings = readSettings(route, study, faults);
   const context = contextOf(study, quantities);
   const curve = coefficient.series === undefined ? undefined : route.series?.(settings);
+  if (coefficient.series !== undefined && study.trials.steady !== undefined)
+    faults.add('steady-and-series', says.steadyAndSeries(), study.trials.steady.place);
   if (coefficient.series !== undefined && curve === undefined)
     faults.add(
       'route-without-curve',

@@ -14,9 +14,11 @@ import type { NextTrialsResult, PlantResult } from '../scale-up/plant-result.ts'
 import type { TrialsWithCurves } from '../trials/curve-readings.ts';
 import { foldLedger, sumLedger } from '../trials/ledger.ts';
 import type { Trials } from '../trials/read-trials.ts';
+import type { SteadyTrials } from '../trials/steady.ts';
 import type { BothSides } from './both-sides.ts';
 import type { LawCurve } from './curves.ts';
 import { drawnCurves } from './drawn-curves.ts';
+import { drawnLog } from './drawn-log.ts';
 import { methodOf } from './method.ts';
 import type { StudyResult } from './study-result.ts';
 import { trialRows } from './trial-rows.ts';
@@ -24,7 +26,7 @@ import { trialRows } from './trial-rows.ts';
 /** All that the stages made. */
 export interface Stages {
   readonly plan: Plan;
-  readonly read: Staged<Trials | TrialsWithCurves>;
+  readonly read: Staged<Trials | TrialsWithCurves | SteadyTrials>;
   readonly observed: Staged<Observed>;
   readonly contenders: readonly Contender[];
   readonly choice: Choice;
@@ -107,7 +109,7 @@ export function assemble(stages: Stages): StudyResult {
     budgets: stages.budgets,
     curves: stages.curves,
     sides: stages.sides,
-    series: 'curves' in read.value ? drawnCurves(read.value.curves, plan) : [],
+    series: seriesOf(read.value, plan),
     notes: distinct(stages.notes),
     method: methodOf(
       plan,
@@ -118,6 +120,9 @@ export function assemble(stages: Stages): StudyResult {
     provenance: { version: facts.version, node: facts.node, seed: facts.seed, files: facts.files },
   };
 }
+
+const seriesOf = (read: Stages['read']['value'], plan: Plan): StudyResult['series'] =>
+  'curves' in read ? drawnCurves(read.curves, plan) : 'log' in read ? drawnLog(read, plan) : [];
 
 /** Response first, then every group of every law, each once. */
 function columnsOf({ laws, namings }: Plan): readonly Naming[] {

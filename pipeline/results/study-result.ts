@@ -126,6 +126,8 @@ export interface StudyResult {
     readonly t: readonly number[];
     readonly value: readonly number[];
     readonly fitted: readonly number[];
+    /** Steady windows of a raw log and the mean in each. */
+    readonly windows?: readonly { readonly trial: string; readonly from: number; readonly to: number; readonly level: number }[];
   }[];
   readonly notes: readonly Note[];
   readonly method: {

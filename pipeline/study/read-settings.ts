@@ -4,7 +4,7 @@ import { given } from './given.ts';
 import { checkPath } from './paths.ts';
 import { readFluid } from './read-fluid.ts';
 import { readQuantities } from './read-quantity.ts';
-import type { GroupEntry, Placed, Study } from './study.ts';
+import type { GroupEntry, Placed, SteadyEntry, Study } from './study.ts';
 import type { Tree } from './tree.ts';
 import { child, entriesOf, itemsOf, numberOf, placed, recordOf, shareOf, textAt, truthAt, wordAt, written } from './view.ts';
 
@@ -14,6 +14,7 @@ export function readTrials(tree: Tree, faults: Faults): Study['trials'] {
   checkPath(file, faults);
   return given({
     file,
+    steady: short ? undefined : readSteady(tree, faults),
     sheet: textAt(tree, 'sheet'),
     trial: textAt(tree, 'trial'),
     campaign: textAt(tree, 'campaign'),
@@ -26,6 +27,30 @@ export function readTrials(tree: Tree, faults: Faults): Study['trials'] {
       reason: textAt(item, 'reason')?.is ?? '',
     })),
   });
+}
+
+/** How steady windows are looked for in a raw log; keys that say what its rows are have no meaning there. */
+function readSteady(tree: Tree, faults: Faults): SteadyEntry | undefined {
+  const steady = child(tree, 'steady');
+  if (steady === undefined) return undefined;
+  for (const key of ['trial', 'campaign', 'readings', 'setting', 'order', 'sheet']) {
+    const other = child(tree, key);
+    if (other !== undefined) faults.add('steady-alone', says.steadyAlone(key), other.place);
+  }
+  const within = (key: string, standard: number, from: number, to: number): number => {
+    const given = child(steady, key);
+    const share = given === undefined ? standard : shareOf(given);
+    if (!(share >= from && share <= to)) faults.add('wrong-value', says.notThis(written(given!), says.between(from, to)), given!.place);
+    return share;
+  };
+  const nothing = { is: '', place: steady.place };
+  return {
+    time: textAt(steady, 'time') ?? nothing,
+    window: textAt(steady, 'window') ?? nothing,
+    share: within('share', 0.9, 0.5, 1),
+    significance: within('significance', 0.01, 1e-4, 0.2),
+    place: steady.place,
+  };
 }
 
 export const readGroups = (tree: Tree | undefined, faults: Faults): Readonly<Record<string, Placed<GroupEntry>>> =>

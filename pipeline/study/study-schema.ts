@@ -134,6 +134,15 @@ const trials = fields(
     readings: choice(['average'], 'rows that share a trial are averaged').optional(),
     setting: column.optional(),
     order: column.optional(),
+    steady: fields(
+      {
+        time: text('the column of the log that holds the time'),
+        window: text('the least length of a steady window, such as 5 min'),
+        share: share('the share of samples about one level, from 50 % to 100 %, such as 90 %').optional(),
+        significance: share('the significance of the test of one sample, from 0.0001 to 0.2, such as 0.01').optional(),
+      },
+      'a map with time and window',
+    ).optional(),
     missing: list(text('a mark of a missing value'), 'marks of missing values, such as ["NA", "-9999"]', 50).optional(),
     leave_out: list(
       fields({ trial: text('the trial that is left out'), reason: text('the reason for leaving it out') }, 'a map with trial and reason'),

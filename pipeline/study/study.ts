@@ -66,6 +66,15 @@ export interface OwnCorrelationEntry {
   readonly source?: string;
 }
 
+export interface SteadyEntry {
+  readonly time: Placed<string>;
+  /** Least length, as written. */
+  readonly window: Placed<string>;
+  readonly share: number;
+  readonly significance: number;
+  readonly place: Place;
+}
+
 export interface SeriesEntry {
   readonly file?: Placed<string>;
   readonly files?: Placed<string>;
@@ -91,6 +100,8 @@ export interface Study {
     readonly readings?: Placed<'average'>;
     readonly setting?: Placed<string>;
     readonly order?: Placed<string>;
+    /** The file is a raw log; its steady windows are the trials. */
+    readonly steady?: SteadyEntry;
     readonly missing: readonly string[];
     readonly leaveOut: readonly { readonly trial: Placed<string>; readonly reason: string }[];
   };

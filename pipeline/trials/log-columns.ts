@@ -18,6 +18,8 @@ export interface LogColumn {
   readonly unit?: string;
   /** Checks the dimension where it is known. */
   readonly quantity?: Quantity;
+  /** Position and unit, where they are settled already. */
+  readonly settled?: { readonly index: number; readonly unit: Unit };
   /** Where the study names it. */
   readonly place: Place;
 }
@@ -32,6 +34,11 @@ export interface LogCell {
 
 /** A column of numbers. Faults of name and unit are thrown at the study's place (exit 2). */
 export function valueCell(head: LogHead, column: LogColumn, missing: readonly string[]): LogCell {
+  if (column.settled !== undefined) {
+    const { index, unit } = column.settled;
+    const cell = cellReader({ decimal: head.decimal, missing });
+    return { index, header: head.header[index]!, unit, read: (text) => inSI(cell.read(text), unit) };
+  }
   const { index, header, unit } = located(head, column);
   if (unit === undefined && column.quantity !== undefined && column.quantity.unit !== '1')
     throw stop(fault('unit-missing', says.logUnitMissing(header, column.quantity.unit)), column.place);

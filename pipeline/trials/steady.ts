@@ -36,6 +36,8 @@ export interface SteadyWindow {
 /** A gap longer than this many usual steps ends a window. */
 const gapSteps = 3;
 const leastSamples = 10;
+const standardShare = 0.9;
+const standardSignificance = 0.01;
 /** Fewer independent samples than this leave the uncertainty of their mean uncertain itself. */
 const fewIndependent = 20;
 
@@ -44,7 +46,10 @@ const fewIndependent = 20;
  * As many samples as the test lets pass unsteady, (1 - share) of a window, are taken off both ends, where a ramp would begin.
  * Throws InputError (exit 2) where the window holds fewer than ten samples.
  */
-export function findSteady(log: Log, { window, share = 0.9, significance = 0.01, place }: SteadyOptions): readonly SteadyWindow[] {
+export function findSteady(
+  log: Log,
+  { window, share = standardShare, significance = standardSignificance, place }: SteadyOptions,
+): readonly SteadyWindow[] {
   const step = usualStep(log.time);
   const n = Math.round(window / step);
   if (!(n >= leastSamples))
@@ -110,8 +115,18 @@ function measured({ values }: Log, { from, to }: Span): SteadyWindow {
   };
 }
 
+/** Trials that are steady windows of a log. */
+export interface SteadyTrials extends Trials {
+  readonly log: Log;
+  readonly windows: readonly (Span & { readonly trial: string; readonly mean: Float64Array })[];
+}
+
 /** Each window as one trial, named by its time; rows outside are left out, and the ledger counts every row of the log. */
-export function steadyTrials(log: Log, windows: readonly SteadyWindow[]): Staged<Trials> {
+export function steadyTrials(
+  log: Log,
+  windows: readonly SteadyWindow[],
+  { window, share = standardShare, significance = standardSignificance }: Omit<SteadyOptions, 'place'>,
+): Staged<SteadyTrials> {
   const trials = windows.map((window, k) => steadyTrial(log, window, k + 1));
   const used = windows.map(
     (window, k): LedgerEntry => ({
@@ -138,7 +153,17 @@ export function steadyTrials(log: Log, windows: readonly SteadyWindow[]): Staged
           },
         ];
   const ledger = [...used, ...unused, ...refused].sort((a, b) => a.line - b.line);
-  return { value: { keys: log.keys, trials, ledger }, notes: [criterion(log, windows), ...thinWindows(log, windows, trials)], refused: [] };
+  return {
+    value: {
+      keys: log.keys,
+      trials,
+      ledger,
+      log,
+      windows: windows.map(({ from, to, mean }, k) => ({ from, to, mean, trial: trials[k]!.trial })),
+    },
+    notes: [criterion(log, windows, { window, share, significance }), ...thinWindows(log, windows, trials)],
+    refused: [],
+  };
 }
 
 const entry = (log: Log, { from, to }: Span, trial: string) => ({
@@ -170,13 +195,17 @@ function outside(windows: readonly Span[], length: number): readonly Span[] {
   return edges.flatMap((from, k) => (k % 2 === 0 && edges[k + 1]! > from ? [{ from, to: edges[k + 1]! }] : []));
 }
 
-function criterion(log: Log, windows: readonly SteadyWindow[]): Note {
+function criterion(
+  log: Log,
+  windows: readonly SteadyWindow[],
+  { window, share, significance }: Required<Omit<SteadyOptions, 'place'>>,
+): Note {
   const rows = windows.reduce((sum, { from, to }) => sum + to - from, 0);
   return {
     section: 'trials',
     level: 'note',
     code: 'steady-windows',
-    text: says.steadyCriterion(windows.length, rows, log.rows),
+    text: says.steadyCriterion(windows.length, rows, log.rows, { window, share, significance }),
     place: { file: log.file },
   };
 }

@@ -148,8 +148,12 @@ function evidenceFigures(result: StudyResult, fit: Fit): readonly Figure[] {
       name: `series-${k + 1}`,
       spec: seriesChart(series),
       half: true,
-      caption: says.seriesCaption(series.trial, series.quantity),
-      alternative: says.seriesAlternative(series.trial, series.quantity, series.t.length),
+      ...(series.windows === undefined
+        ? {
+            caption: says.seriesCaption(series.trial, series.quantity),
+            alternative: says.seriesAlternative(series.trial, series.quantity, series.t.length),
+          }
+        : { caption: says.logCaption(series.quantity), alternative: says.logAlternative(series.quantity, series.windows.length) }),
     })),
   ];
 }

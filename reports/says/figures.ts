@@ -74,3 +74,8 @@ export const seriesCaption = (trial: string, quantity: string): string =>
   `Trial ${trial}: ${quantity} as logged (dots) and as fitted (line).`;
 export const seriesAlternative = (trial: string, quantity: string, n: number): string =>
   `${n} logged points of ${quantity} in trial ${trial} with the fitted curve.`;
+
+export const logCaption = (quantity: string): string =>
+  `${quantity} of the raw log (dots, thinned): the steady windows (shaded) and the mean in each (line); the notes on the trials state the criterion.`;
+export const logAlternative = (quantity: string, windows: number): string =>
+  `${quantity} of the raw log over time with ${windows} steady windows shaded.`;

@@ -82,6 +82,8 @@ export const otherSideAlone = (key: string): string =>
   `${key} cannot be had from other-side-plot, whose law is fitted through overall coefficients; leave ${key} out and use the law of the own side by hand`;
 export const sideConductance = (formula: string): string =>
   `conductance of the own side for a response of 1, on the outer area: ${formula}`;
+export const steadyAndSeries = (): string =>
+  'steady windows of a log are trials at rest, coefficient.series reads trials that change with time; use one of them';
 export const curveAndColumn = (key: string): string => `${key} comes from the logged curve and is given here too; leave one of them out`;
 export const giveTheCurve = (route: string): string =>
   `${route} reads it from a logged curve: say where it stands under coefficient.series`;

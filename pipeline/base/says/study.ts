@@ -59,4 +59,6 @@ export const says = {
   needsPlant: 'plant needs a file with cases, or quantities',
   idTwice: (id: string): string => `a second correlation with id "${id}"; ids must differ`,
   ownTooMany: (count: number, most: number): string => `${count} correlations; at most ${most} are read`,
+  steadyAlone: (key: string): string => `${key} has no meaning beside steady, which makes the trials itself; leave it out`,
+  between: (from: number, to: number): string => `a share from ${from} to ${to}`,
 };

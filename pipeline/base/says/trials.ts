@@ -91,8 +91,15 @@ export const says = {
       : `a window of ${window} s holds fewer than ${least} samples of this log, which are ${step} s apart; give a longer one`,
   steadyWindow: (rows: number, first: number, last: number): string => `mean of ${count(rows)} steady rows, lines ${first} to ${last}`,
   notSteady: (rows: number): string => `${count(rows)} row${rows === 1 ? '' : 's'} not steady`,
-  steadyCriterion: (windows: number, used: number, rows: number): string =>
-    `${windows} steady window${windows === 1 ? '' : 's'} with ${count(used)} of ${count(rows)} rows of the log, found by the test of Kelly and Hedengren (2013) on every column; each is one trial, its means with standard uncertainties that count autocorrelation (Geyer 1992, Wolff 2004). A drift smaller than the scatter of a window passes the test`,
+  steadyCriterion: (
+    windows: number,
+    used: number,
+    rows: number,
+    { window, share, significance }: { readonly window: number; readonly share: number; readonly significance: number },
+  ): string =>
+    `${windows} steady window${windows === 1 ? '' : 's'} with ${count(used)} of ${count(rows)} rows of the log, found by the test of Kelly and Hedengren (2013) on every column: at least ${Number(window.toPrecision(6))} s long, ${Number((100 * share).toPrecision(4))} % of samples about one level, each sample tested at ${significance}; each is one trial, its means with standard uncertainties that count autocorrelation (Geyer 1992, Wolff 2004). A drift smaller than the scatter of a window passes the test`,
+  noSteadyWindow: (window: number, rows: number): string =>
+    `no stretch of ${Number(window.toPrecision(6))} s is steady in every column of the log (${count(rows)} rows read): give a shorter window or a smaller share, or state the trials yourself`,
   fewIndependent: (keys: readonly string[], least: number): string =>
     `${keys.map(quoted).join(', ')}: the window is worth only ${Math.max(1, Math.round(least))} independent samples, so the uncertainty of the mean is too small by tens of per cent; log longer`,
   noCurve: (trial: string): string => `trial ${quoted(trial)} has no logged curve`,
