@@ -1,24 +1,13 @@
-import { existsSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
-import { tmpdir } from 'node:os';
+import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
-import { type Browser, chromium, type Page } from 'playwright-core';
 import { afterAll, beforeAll, describe, expect, test } from 'vitest';
 import { computeStudy } from '../../pipeline/batch/run-study.ts';
 import { predictor } from '../../pipeline/regression/predict-ln.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { renderReport } from '../../reports/page.ts';
 import { ugly } from '../reports/build/ugly.ts';
+import { noChromium, type Opened, overflow, Pages } from './pages.ts';
 
-const CHROMIUM = '/usr/bin/chromium';
-const FLAGS = [
-  '--no-sandbox',
-  '--disable-gpu',
-  '--disable-quic',
-  '--no-first-run',
-  '--disable-background-networking',
-  '--disable-component-update',
-  '--disable-sync',
-];
 const root = join(import.meta.dirname, '../..');
 const axe = readFileSync(join(root, 'node_modules/axe-core/axe.min.js'), 'utf8');
 const demo = (name: string) => async (): Promise<StudyResult> => computeStudy(join(root, 'datasets', name, 'study.yaml'));
@@ -28,33 +17,13 @@ const studies: readonly (readonly [string, () => Promise<StudyResult>])[] = [
   ...Object.entries(ugly).map(([name, result]) => [name, async () => result] as const),
 ];
 
-// A machine without Chromium skips these by name; where CI is set it must have one.
-describe.skipIf(!existsSync(CHROMIUM) && process.env.CI === undefined)('reports in Chromium', () => {
-  let browser: Browser;
-  let folder: string;
+describe.skipIf(noChromium)('reports in Chromium', () => {
+  let pages: Pages;
   beforeAll(async () => {
-    browser = await chromium.launch({ executablePath: CHROMIUM, args: FLAGS });
-    folder = mkdtempSync(join(tmpdir(), 'pilotlaw-page-'));
+    pages = await Pages.start();
   });
-  afterAll(async () => {
-    await browser?.close();
-    if (folder !== undefined) rmSync(folder, { recursive: true, force: true });
-  });
-
-  const open = async (html: string, width: number, scripts = true): Promise<{ page: Page; heard: string[] }> => {
-    const file = join(folder, 'report.html');
-    writeFileSync(file, html);
-    const context = await browser.newContext({ viewport: { width, height: 900 }, javaScriptEnabled: scripts, bypassCSP: false });
-    const page = await context.newPage();
-    const heard: string[] = [];
-    page.on('console', (message) => ['error', 'warning'].includes(message.type()) && heard.push(message.text()));
-    page.on('pageerror', (error) => heard.push(error.message));
-    page.on('request', (request) => /^(file|data|blob):/.test(request.url()) || heard.push(`request ${request.url()}`));
-    await page.goto(`file://${file}`);
-    if (scripts) await page.waitForTimeout(400);
-    return { page, heard };
-  };
-  const overflow = (page: Page): Promise<number> => page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
+  afterAll(() => pages?.stop());
+  const open = (html: string, width: number, scripts = true): Promise<Opened> => pages.open(html, width, scripts);
 
   test.each(studies)('%s: silent, asks for nothing, fits every width, readable without scripts', async (_, make) => {
     const result = await make();
