@@ -3,7 +3,7 @@ import { tmpdir } from 'node:os';
 import { join } from 'node:path';
 import { type Browser, type BrowserContext, chromium, type Page } from 'playwright-core';
 
-export const CHROMIUM = '/usr/bin/chromium';
+const CHROMIUM = '/usr/bin/chromium';
 /** A machine without Chromium skips these by name; where CI is set it must have one. */
 export const noChromium = !existsSync(CHROMIUM) && process.env.CI === undefined;
 
