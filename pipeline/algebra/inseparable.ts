@@ -14,19 +14,22 @@ const pointAt = (i: number, share: number): number => (i % 2 === 0 ? 0.5 + 2 * s
 
 /**
  * Parameters that no data could tell apart, such as C and D of `C * D * Re^a`: the columns d f/d parameter are linearly dependent at points without pattern.
- * Empty where all can be told apart. A law that has no value at any such point is left to the data.
+ * One alone where the law does not depend on it. Empty where all can be told apart. A law that has no value at any such point is left to the data.
  */
 export function inseparable(form: Form): readonly string[] {
   const { constants, groups } = form;
   const slopes = constants.map((name) => derivative(form.tree, name));
   const theta = Object.fromEntries(constants.map((name, k) => [name, 0.3 + spread(k + 1)]));
   const columns: number[][] = constants.map(() => []);
+  let flat = 0;
   for (let i = 0; i < POINTS * 4 && columns[0]!.length < POINTS; i++) {
     const at = Object.fromEntries(groups.map((name, k) => [name, pointAt(i, spread(7 * i + 3 * k + 2))]));
     const row = slopes.map((slope) => evaluate(slope, at, theta));
     const size = Math.max(...row.map(Math.abs));
+    if (size === 0 && row.every(Number.isFinite)) flat += 1;
     if (size > 0 && row.every(Number.isFinite)) for (const [k, value] of row.entries()) columns[k]!.push(value / size);
   }
+  if (flat === POINTS * 4) return constants.slice(0, 1);
   if (columns[0]!.length < POINTS) return [];
   const dependent = firstDependent(columns);
   return dependent < 0 ? [] : partnersOf(columns, dependent).map((k) => constants[k]!);

@@ -147,6 +147,8 @@ class Reader {
   #number(token: Token): Expr {
     const value = Number(token.text);
     if (!Number.isFinite(value)) throw new Stopped('law-number', says.numberTooLarge(token.text), token.at);
+    if (value === 0 && /[1-9]/u.test(token.text.split(/[eE]/u)[0]!))
+      throw new Stopped('law-number', says.numberTooSmall(token.text), token.at);
     return num(value);
   }
 

@@ -9,6 +9,7 @@ import { readLaws, type SavedLaws } from '../results/read-laws.ts';
 import type { PlantResult } from '../scale-up/plant-result.ts';
 import { scaleUp } from '../scale-up/scale-up.ts';
 import { standingLaws } from '../scale-up/standing-laws.ts';
+import { caps } from '../trials/caps.ts';
 import { readTable } from '../trials/read-table.ts';
 
 export interface PredictRequest {
@@ -20,7 +21,6 @@ export interface PredictRequest {
 }
 
 const MOST_LAWS = 1 << 26;
-const MOST_TABLE = 1 << 28;
 
 /** Plant cases by the laws of a `laws.json` alone: no study, no trials. Published correlations are not in that file and are not asked. */
 export function predictPlant({ laws: file, plant, law, conservative }: PredictRequest): PlantResult {
@@ -37,7 +37,7 @@ export function predictPlant({ laws: file, plant, law, conservative }: PredictRe
         place: { file: basename(file) },
       },
     ]);
-  const table = readTable(readBytes(plant, { most: MOST_TABLE, name: basename(plant) }), { file: basename(plant) });
+  const table = readTable(readBytes(plant, { most: caps.tableBytes, name: basename(plant) }), { file: basename(plant) });
   const faults = new Faults();
   const plan = planPlant(
     { ...askedOf(saved), settings: { conservative, quantities: {} }, table, place: { file: basename(plant) } },

@@ -17,6 +17,7 @@ import { resultFiles, writeResults } from '../results/write-results.ts';
 import { parseOwnCorrelations } from '../study/own-correlations.ts';
 import { parseStudy } from '../study/parse-study.ts';
 import type { Placed, Study } from '../study/study.ts';
+import { caps } from '../trials/caps.ts';
 import { type LogSource, readLogHead } from '../trials/log-stream.ts';
 import { readTable } from '../trials/read-table.ts';
 import { readTrials } from '../trials/read-trials.ts';
@@ -33,8 +34,6 @@ export interface RunOptions {
 }
 
 const MOST_STUDY = 1 << 20;
-const MOST_TABLE = 1 << 28;
-const MOST_LOG = 2 ** 33;
 
 /** A study read from disk with all it names. */
 interface Loaded {
@@ -50,7 +49,7 @@ async function loadStudy(path: string): Promise<Loaded> {
   const folder = dirname(resolve(path));
   const file = basename(path);
   const files: { file: string; sha256: string }[] = [];
-  const bytesOf = (name: string, path: string, place?: Placed<string>['place'], most = MOST_TABLE): Buffer => {
+  const bytesOf = (name: string, path: string, place?: Placed<string>['place'], most: number = caps.tableBytes): Buffer => {
     const bytes = readBytes(path, { most, name, ...(place === undefined ? {} : { place }) });
     files.push({ file: name, sha256: sha256(bytes) });
     return bytes;
@@ -58,8 +57,9 @@ async function loadStudy(path: string): Promise<Loaded> {
   const inside = ({ is, place }: Placed<string>): Buffer => bytesOf(is, pathInside(folder, is, place), place);
   const open = (name: string, place: Place): LogSource => {
     const path = pathInside(folder, name, place);
-    if (!files.some((one) => one.file === name)) files.push({ file: name, sha256: sha256OfFile(path, { most: MOST_LOG, name, place }) });
-    return { file: name, pieces: readPieces(path, { most: MOST_LOG, name, place }) };
+    if (!files.some((one) => one.file === name))
+      files.push({ file: name, sha256: sha256OfFile(path, { most: caps.logBytes, name, place }) });
+    return { file: name, pieces: readPieces(path, { most: caps.logBytes, name, place }) };
   };
   const study = parseStudy(studyText(bytesOf(file, path, undefined, MOST_STUDY), file), file);
   refuseWhatIsNotThere(study);

@@ -4,6 +4,7 @@ import { says } from '../base/says/cli.ts';
 import { fileExists, readBytes } from '../files/read.ts';
 import { replaceFile } from '../files/write.ts';
 import { beginStudy as begin } from '../study/begin.ts';
+import { caps } from '../trials/caps.ts';
 import { guessColumns } from '../trials/guess-columns.ts';
 import { readTable } from '../trials/read-table.ts';
 import { EXIT, type Exit } from './exit.ts';
@@ -16,13 +17,14 @@ export interface BeginRequest {
   readonly force: boolean;
 }
 
-const MOST = 1 << 28;
-
 /** Writes study.yaml beside the table, guessed from its headers; its open questions are printed. An existing one is only replaced with --force. */
 export async function beginStudy({ trials, sheet, force }: BeginRequest, terminal: Terminal): Promise<Exit> {
   const target = join(dirname(trials), 'study.yaml');
   if (!force && fileExists(target)) throw new InputError([{ code: 'study-exists', text: says.studyExists(), place: { file: target } }]);
-  const table = readTable(readBytes(trials, { most: MOST }), { file: basename(trials), ...(sheet === undefined ? {} : { sheet }) });
+  const table = readTable(readBytes(trials, { most: caps.tableBytes }), {
+    file: basename(trials),
+    ...(sheet === undefined ? {} : { sheet }),
+  });
   const { yaml, questions } = begin(guessColumns(table));
   replaceFile(target, yaml);
   terminal.out(`${says.begun(target, questions.length)}\n`);

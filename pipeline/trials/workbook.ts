@@ -22,7 +22,7 @@ export function readWorkbook(bytes: Buffer, file: string, sheet?: string): Grid 
 }
 
 function opened(bytes: Buffer, file: string): XLSX.WorkBook {
-  const sizes = zipSizes(bytes);
+  const sizes = zipSizes(bytes, { parts: caps.workbookParts, unpacked: caps.workbookBytes });
   if (sizes === undefined) throw stop(file, 'not-a-workbook', says.notAWorkbook(bytes.length >= 8 && bytes.readUInt32BE(0) === 0xd0cf11e0));
   if (sizes.unpacked > caps.workbookBytes || sizes.parts > caps.workbookParts)
     throw stop(file, 'workbook-too-large', says.workbookTooLarge(sizes.unpacked, caps.workbookBytes));

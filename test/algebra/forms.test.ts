@@ -62,3 +62,16 @@ test.each([
 ])('%s is refused', (text, why) => {
   expect(() => form(text)).toThrow(why);
 });
+
+// Found by throwing inputs at the reader (test/strength/fuzz.ts).
+test.each([
+  ['Nu = C^0', 'law-inseparable', /does not depend on the parameter C/],
+  ['Nu = Re^a + 0 * D', 'law-inseparable', /does not depend on the parameter D/],
+  ['Nu = C * Re^a * D^0', 'law-inseparable', /does not depend on the parameter D/],
+  ['Nu = C - C + Re', 'law-inseparable', /does not depend on the parameter C/],
+  ['Nu = C * Re^5e-3242', 'law-number', /5e-3242 is too small for a number/],
+])('%s is refused: %s', (text, code, says) => {
+  const parsed = parseForm(text, { known: ['Re', 'Nu'], needsParameter: true });
+  expect('faults' in parsed ? parsed.faults.map((fault) => fault.code) : []).toEqual([code]);
+  expect('faults' in parsed ? parsed.faults[0]!.text : '').toMatch(says);
+});

@@ -1,3 +1,4 @@
+import { deflateRawSync } from 'node:zlib';
 import * as XLSX from '@e965/xlsx';
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
@@ -22,6 +23,42 @@ const fault = (act: () => unknown): InputError => {
 };
 const read = (text: string | Buffer, file = 'trials.csv', sheet?: string) =>
   readTable(typeof text === 'string' ? Buffer.from(text) : text, { file, ...(sheet === undefined ? {} : { sheet }) });
+
+/** A ZIP archive of one packed part whose headers say that it unpacks to 10 bytes. */
+function lyingBomb(unpacked: number): Buffer {
+  return archive([{ name: 'xl/workbook.xml', packed: deflateRawSync(Buffer.alloc(unpacked)), size: 10 }]);
+}
+
+const bytesWithParts = (count: number): Buffer =>
+  archive(Array.from({ length: count }, (_, k) => ({ name: String(k), packed: deflateRawSync(Buffer.from('x')), size: 1 })));
+
+/** Local headers, then the directory, then its end: APPNOTE 6.3.10, sections 4.3.7, 4.3.12 and 4.3.16. */
+function archive(parts: readonly { readonly name: string; readonly packed: Buffer; readonly size: number }[]): Buffer {
+  const local: Buffer[] = [];
+  const listed: Buffer[] = [];
+  let at = 0;
+  for (const { name, packed, size } of parts) {
+    const sizes = Buffer.alloc(18);
+    sizes.writeUInt16LE(8, 0);
+    sizes.writeUInt32LE(packed.length, 10);
+    sizes.writeUInt32LE(size, 14);
+    const names = Buffer.alloc(4);
+    names.writeUInt16LE(name.length, 0);
+    local.push(Buffer.from('PK\x03\x04\x14\0\0\0', 'latin1'), sizes, names, Buffer.from(name), packed);
+    const where = Buffer.alloc(14);
+    where.writeUInt32LE(at, 10);
+    listed.push(Buffer.from('PK\x01\x02\x14\0\x14\0\0\0', 'latin1'), sizes, names, where, Buffer.from(name));
+    at += 30 + name.length + packed.length;
+  }
+  const directory = Buffer.concat(listed);
+  const end = Buffer.alloc(22);
+  end.write('PK\x05\x06', 'latin1');
+  end.writeUInt16LE(parts.length, 8);
+  end.writeUInt16LE(parts.length, 10);
+  end.writeUInt32LE(directory.length, 12);
+  end.writeUInt32LE(at, 16);
+  return Buffer.concat([...local, directory, end]);
+}
 
 describe('files that stop with place and remedy (exit 3)', () => {
   const empty = workbook([]);
@@ -96,7 +133,15 @@ describe('files that stop with place and remedy (exit 3)', () => {
     const directory = bytes.readUInt32LE(bytes.length - 22 + 16);
     bytes.writeUInt32LE(caps.workbookBytes + 1, directory + 24);
     expect(fault(() => read(bytes, 'trials.xlsx')).messages[0]!.code).toBe('workbook-too-large');
-    expect(zipSizes(workbook([['run']]))!.parts).toBeGreaterThan(5);
+    const most = { parts: caps.workbookParts, unpacked: caps.workbookBytes };
+    expect(zipSizes(workbook([['run']]), most)!.parts).toBeGreaterThan(5);
+    expect(fault(() => read(bytesWithParts(caps.workbookParts + 1), 'trials.xlsx')).messages[0]!.code).toBe('workbook-too-large');
+  });
+
+  test('a directory that lies about the size is found out without unpacking the whole', () => {
+    const most = { parts: 10, unpacked: 1_000_000 };
+    expect(zipSizes(lyingBomb(20_000_000), most)!.unpacked).toBe(most.unpacked + 1);
+    expect(zipSizes(lyingBomb(999_999), most)!.unpacked).toBe(999_999);
   });
 
   test('a sheet that claims a million rows is read by its cells, at once', () => {

@@ -10,6 +10,7 @@ export const missingSign = (sign: string, read: string): string =>
   `"${sign}" is missing here${read === '' ? ' at the end' : ` before "${read}"`}`;
 export const endsEarly = (): string => 'the expression ends where a number or a name is expected';
 export const numberTooLarge = (text: string): string => `${text} is too large for a number`;
+export const numberTooSmall = (text: string): string => `${text} is too small for a number; write 0 if that is meant`;
 export const functionNeedsArgument = (name: string): string => `${name} is a function and needs its argument in parentheses: ${name}(...)`;
 export const unknownFunction = (name: string, known: readonly string[]): string =>
   `"${name}" is no function${didYouMean(name, known)}; write * between a name and a parenthesis, or use one of ${known.filter((one) => one !== 'pi').join(', ')}`;
@@ -26,7 +27,9 @@ export const notListed = (name: string, parameters: readonly string[]): string =
   `"${name}" is neither a group or quantity known here nor one of the parameters listed${didYouMean(name, parameters)}`;
 export const unusedParameter = (name: string): string => `the parameter "${name}" does not stand in the law`;
 export const knownAsParameter = (name: string): string => `"${name}" is a group or quantity and cannot be a parameter as well`;
-export const inseparable = (names: readonly string[]): string =>
+export const inseparable = (names: readonly string[]): string => (names.length === 1 ? withoutEffect(names[0]!) : together(names));
+const withoutEffect = (name: string): string => `the law does not depend on the parameter ${name}, whatever its value; drop it`;
+const together = (names: readonly string[]): string =>
   `no data could tell the parameters ${names.join(' and ')} apart: the law depends on them only together; drop one of them`;
 export const unknownName = (name: string, known: readonly string[]): string => `"${name}" is not known here${didYouMean(name, known)}`;
 export const limitShape = (): string =>
