@@ -79,7 +79,7 @@ function readProblem(name: string): Problem {
 }
 
 /** Correct digits, as NIST counts them: -log10 of the relative error; 11 at most, the digits that are certified. */
-const digits = (found: number, certified: number): number =>
+export const digits = (found: number, certified: number): number =>
   Math.max(0, Math.min(11, -Math.log10(Math.abs(found - certified) / Math.abs(certified))));
 
 interface Answer {
