@@ -23,10 +23,10 @@ export interface Report {
 }
 
 /**
- * One study's result as one page: complete without scripts, alive with them, no request to anywhere. The script stands in the page (`inline`), or is one file
- * beside the index of a batch (`shared`, see `sharedScript`), one folder up.
+ * One study's result as one page: complete without scripts, alive with them, no request to anywhere. The script stands in the page, or is the file
+ * `script` that the reports of a batch share, named from the page (see `sharedScript`).
  */
-export async function renderReport(result: StudyResult): Promise<Report> {
+export async function renderReport(result: StudyResult, script?: string): Promise<Report> {
   startReport();
   const figures = figuresOf(result);
   const pictures = new Map<string, Markup>();
@@ -39,7 +39,7 @@ export async function renderReport(result: StudyResult): Promise<Report> {
   const body = html`${head(result)}
 ${main(result, pictures)}`;
   return {
-    html: dress({ title: result.study.title, body, data: liveData(result, live) }),
+    html: dress({ title: result.study.title, body, data: liveData(result, live), ...(script === undefined ? {} : { script }) }),
     charts: Object.fromEntries(figures.map(({ name, spec }) => [name, spec])),
   };
 }

@@ -9,6 +9,8 @@ export interface Task {
   /** Folder of the results; what the study file says where left out. */
   readonly out?: string;
   readonly seed?: number;
+  /** Folder of the batch's index, where there is one. */
+  readonly index?: string;
 }
 
 /** What became of it. */

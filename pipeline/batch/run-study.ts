@@ -1,13 +1,13 @@
-import { basename, dirname, join, resolve } from 'node:path';
+import { basename, dirname, join, relative, resolve, sep } from 'node:path';
 import { analyse, type RunFacts } from '../analyse.ts';
 import { InputError } from '../base/input-error.ts';
 import type { Place } from '../base/place.ts';
-import * as says from '../base/says/analyse.ts';
 import { version } from '../base/version.ts';
 import { decodeText } from '../files/decode.ts';
 import { sha256, sha256OfFile } from '../files/hash.ts';
 import { newPathInside, pathInside } from '../files/inside.ts';
-import { readBytes, readPieces } from '../files/read.ts';
+import { fileExists, readBytes, readPieces } from '../files/read.ts';
+import { makeFolder, replaceFile } from '../files/write.ts';
 import { explain } from '../plan/explain.ts';
 import { makePlan } from '../plan/make-plan.ts';
 import { ownCorrelations } from '../plan/own-correlations.ts';
@@ -31,6 +31,8 @@ export interface RunOptions {
   /** Folder of the results; what the study file says where left out. */
   readonly out?: string;
   readonly seed?: number;
+  /** Folder of the batch's index, where there is one: shared assets stand there. */
+  readonly index?: string;
 }
 
 const MOST_STUDY = 1 << 20;
@@ -62,7 +64,6 @@ async function loadStudy(path: string): Promise<Loaded> {
     return { file: name, pieces: readPieces(path, { most: caps.logBytes, name, place }) };
   };
   const study = parseStudy(studyText(bytesOf(file, path, undefined, MOST_STUDY), file), file);
-  refuseWhatIsNotThere(study);
   const trials =
     study.trials.steady !== undefined
       ? readLogHead(open(study.trials.file.is, study.trials.file.place), columnsAsked(study))
@@ -89,16 +90,6 @@ async function loadStudy(path: string): Promise<Loaded> {
       ? []
       : ownCorrelations(parseOwnCorrelations(decodeText(inside(study.audit.own), study.audit.own.is), study.audit.own.is), study);
   return { plan: makePlan(study, { trials, tables, catalogue, own, ...(plant === undefined ? {} : { plant }) }), trials, files, open };
-}
-
-/** Settings of the format that this version does not carry out are refused, all at once; none is passed over. */
-function refuseWhatIsNotThere(study: Study): void {
-  const asked = [
-    ...(study.output.assets === 'shared'
-      ? [{ code: 'not-there-yet', text: says.settingNotYet('output.assets: shared'), place: study.output.folder.place }]
-      : []),
-  ];
-  if (asked.length > 0) throw new InputError(asked);
 }
 
 /** A study file that is no text is a wrong study file (exit 2), not data that cannot be used. */
@@ -139,18 +130,29 @@ const computed = (file: string, seed = SEED, proposals?: number): Promise<{ read
   });
 
 /** The main job: one study file to its results on disk. */
-export async function runStudy(file: string, { out, seed }: RunOptions = {}): Promise<StudySummary> {
+export async function runStudy(file: string, { out, seed, index }: RunOptions = {}): Promise<StudySummary> {
   const { plan, result } = await computed(file, seed);
+  const { is, place } = plan.study.output.folder;
+  const folder = out ?? newPathInside(dirname(resolve(file)), is, place);
+  const script = plan.study.output.assets === 'shared' ? await shareScript(index ?? folder, folder) : undefined;
   const { renderReport } = await import('../../reports/page.ts');
-  const { html, charts } = await renderReport(result);
+  const { html, charts } = await renderReport(result, script);
   const written = new Map(resultFiles(result));
   written.set('report.html', html);
   for (const [name, spec] of Object.entries(charts)) written.set(`charts/${name}.vl.json`, `${JSON.stringify(spec, null, 2)}\n`);
-  const { is, place } = plan.study.output.folder;
-  const folder = out ?? newPathInside(dirname(resolve(file)), is, place);
   const summary = summaryOf(result);
   writeResults(folder, written, result, summary);
   return { study: file, folder, ...summary };
+}
+
+/** Puts the script that reports share beside the index (or the report, where there is none) and returns how a report names it. */
+async function shareScript(home: string, folder: string): Promise<string> {
+  const { SHARED_SCRIPT, sharedScript } = await import('../../reports/dress.ts');
+  const path = join(resolve(home), SHARED_SCRIPT);
+  const text = sharedScript();
+  makeFolder(home);
+  if (!(fileExists(path) && readBytes(path, { most: MOST_TABLE, name: SHARED_SCRIPT }).toString('utf8') === text)) replaceFile(path, text);
+  return relative(resolve(folder), path).split(sep).map(encodeURIComponent).join('/');
 }
 
 /** What is given, what is derived from what, what is missing; computes nothing. */

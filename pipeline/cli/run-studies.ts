@@ -87,6 +87,7 @@ async function tasksOf({ studies: given, out, seed }: RunRequest): Promise<reado
       ...(own === undefined ? {} : { out: own }),
       ...(folder === undefined ? {} : { folder }),
       ...(seed === undefined ? {} : { seed }),
+      ...(out === undefined || studies.length === 1 ? {} : { index: resolve(out) }),
     });
   }
   refuseShared(tasks);

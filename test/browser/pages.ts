@@ -43,6 +43,11 @@ export class Pages {
     rmSync(this.#folder, { recursive: true, force: true });
   }
 
+  /** A file beside the page. */
+  put(name: string, text: string): void {
+    writeFileSync(join(this.#folder, name), text);
+  }
+
   async open(html: string, width: number, scripts = true): Promise<Opened> {
     const file = join(this.#folder, 'report.html');
     writeFileSync(file, html);

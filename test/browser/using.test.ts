@@ -8,6 +8,7 @@ import { catalogue } from '../../correlations/catalogue.ts';
 import { computeStudy } from '../../pipeline/batch/run-study.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 import { cataloguePage } from '../../reports/catalogue-page.ts';
+import { SHARED_SCRIPT, sharedScript } from '../../reports/dress.ts';
 import { renderReport } from '../../reports/page.ts';
 import { ugly } from '../reports/build/ugly.ts';
 import { noChromium, overflow, Pages } from './pages.ts';
@@ -131,6 +132,34 @@ describe.skipIf(noChromium)('using a report', () => {
     expect(await page.locator('#controls summary').textContent()).toMatch(/linear/u);
     expect(heard).toEqual([]);
     await context.close();
+  });
+});
+
+describe.skipIf(noChromium)('a report that shares its script', () => {
+  test('comes alive by the file beside it under a strict policy, and stays complete without it', async () => {
+    const pages = await Pages.start();
+    const result = await computeStudy(join(datasets, 'stack-loss', 'study.yaml'));
+    const { html } = await renderReport(result, SHARED_SCRIPT);
+    expect(html).toContain("'strict-dynamic'");
+    expect(html.length).toBeLessThan(100_000);
+    const still = await pages.open(html, 1280);
+    expect(await still.page.evaluate(() => document.documentElement.dataset.live)).toBeUndefined();
+    expect((await still.page.locator('#trials').textContent())!.length).toBeGreaterThan(200);
+    await still.context.close();
+    pages.put(SHARED_SCRIPT, sharedScript());
+    const { page, context, heard } = await pages.open(html, 1280);
+    await page.waitForFunction(() => document.documentElement.dataset.live === '1');
+    await page.locator('#ledger .pick').first().click();
+    expect(await page.locator('#ledger .pick[aria-pressed=true]').count()).toBe(1);
+    expect(heard).toEqual([]);
+    // A script written into the markup is not trusted.
+    const injected = html.replace('</main>', '<script src="evil.js"></script><script>window.evil = 1</script></main>');
+    pages.put('evil.js', 'window.evil = 2');
+    const bad = await pages.open(injected, 1280);
+    expect(await bad.page.evaluate(() => 'evil' in window)).toBe(false);
+    await bad.context.close();
+    await context.close();
+    await pages.stop();
   });
 });
 

@@ -177,12 +177,6 @@ export const broken: readonly Broken[] = [
   { what: 'confidence of 95', study: (good) => `${good}fit: {confidence: 95}\n`, exit: 2, says: /study\.yaml:23:\d+.*95/ },
   { what: 'too many resamples', study: (good) => `${good}fit: {resamples: 100000000}\n`, exit: 2, says: /study\.yaml:23:\d+/ },
   {
-    what: 'a setting that is not carried out',
-    study: (good) => `${good}output: {assets: shared}\n`,
-    exit: 2,
-    says: /shared/,
-  },
-  {
     what: 'unknown correlation',
     study: swap('audit: none', 'audit: {against: [nobody-1900]}'),
     exit: 2,
