@@ -75,7 +75,7 @@ const accuracySource = (property: string, fluid: Fluid, source: string): string 
   `property: ${property.replaceAll('_', ' ')} of ${fluid.title} (${source.split(',')[0]})`;
 
 /** The pressure given, else the ambient pressure given, else the standard atmosphere, which is said. */
-function pressureRules(fluid: Fluid, stream: Stream, at: Conditions): readonly Rule[] {
+export function pressureRules(fluid: Pick<Fluid, 'title'>, stream: Stream, at: Conditions): readonly Rule[] {
   const gives = pressureKey(stream);
   const same = (from: Key): Rule => ({ gives, from: [from], of: (p) => p!, formula: `p = ${from}`, source: 'definition' });
   return [

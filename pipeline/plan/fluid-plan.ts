@@ -1,6 +1,8 @@
 import type { Place } from '../base/place.ts';
 import * as says from '../base/says/plan.ts';
+import { diffusivityRules } from '../fluids/diffusivity/diffusivity-rules.ts';
 import { fluidNames, fluidRules } from '../fluids/fluid-rules.ts';
+import { type Conditions, pressureRules } from '../fluids/property-rules.ts';
 import { tableRules } from '../fluids/table-rules.ts';
 import { readDecimal } from '../quantities/decimal.ts';
 import { isFault } from '../quantities/fault.ts';
@@ -16,11 +18,16 @@ import type { Faults } from './faults.ts';
 type Stream = 'own' | 'other';
 
 /** Rules for the properties of the study's stream or streams. `tables`: the property tables the study names, by file. */
-export function planFluids(fluid: Study['fluid'], tables: ReadonlyMap<string, Table>, faults: Faults): readonly Rule[] {
-  if (fluid === undefined) return [];
+export function planFluids(
+  fluid: Study['fluid'],
+  tables: ReadonlyMap<string, Table>,
+  faults: Faults,
+  given: readonly string[] = [],
+): readonly Rule[] {
+  if (fluid === undefined) return estimates(given, {});
   return (['own', 'other'] as const).flatMap((stream) => {
     const entry = fluid[stream];
-    return entry === undefined ? [] : streamRules(entry, stream, tables, faults);
+    return entry === undefined ? [] : streamRules(entry, stream, tables, faults, given);
   });
 }
 
@@ -29,6 +36,7 @@ function streamRules(
   stream: Stream,
   tables: ReadonlyMap<string, Table>,
   faults: Faults,
+  given: readonly string[],
 ): readonly Rule[] {
   const at = Object.fromEntries(Object.entries(entry.at).map(([condition, held]) => [condition, held.is]));
   if (entry.name !== undefined) {
@@ -42,8 +50,16 @@ function streamRules(
   const columns = numericColumns(table, entry.table!.place, faults);
   const made = tableRules({ file: file!, stream, by: (entry.by ?? []).map(({ is }) => is), columns, at });
   for (const text of made.faults) faults.add('property-table', `${file}: ${text}`, place);
-  return made.rules;
+  return stream === 'own' ? [...made.rules, ...estimates(given, at)] : made.rules;
 }
+
+/** What estimators of the diffusivity start from: a study without a fluid by name that gives one of them wants an estimate. */
+const estimated = new Set(['solute_molar_volume', 'solute_radius', 'diffusion_volume']);
+
+const estimates = (given: readonly string[], at: Conditions): readonly Rule[] =>
+  given.some((key) => estimated.has(key))
+    ? [...diffusivityRules('own', 'liquid', at), ...diffusivityRules('own', 'gas', at), ...pressureRules({ title: 'the gas' }, 'own', at)]
+    : [];
 
 /** A property table's columns in SI by quantity name; every cell must be a number. */
 function numericColumns(table: Table, place: Place, faults: Faults): Readonly<Record<string, readonly number[]>> {

@@ -3,6 +3,7 @@ import type { Note } from '../base/message.ts';
 import { nearest } from '../base/nearest.ts';
 import * as says from '../base/says/plan.ts';
 import { groupRules } from '../groups/groups.ts';
+import { quantityOf } from '../quantities/vocabulary.ts';
 import { derivedRulesFor } from '../rules/derived/derived-rules.ts';
 import { type RuleBook, resolve, rootsOfMissing, ruleBook } from '../rules/resolve.ts';
 import type { Input, Key, Missing, Recipe, Rule } from '../rules/rule.ts';
@@ -48,7 +49,7 @@ export function makePlan(study: Study, { trials, tables, catalogue, own, plant: 
   const weights = planWeights(study, header, faults);
   const groups = planGroups(study.groups, header, quantities.dimensions, faults);
   const coefficient = planCoefficient(study, quantities, faults);
-  const fluids = planFluids(study.fluid, tables, faults);
+  const fluids = planFluids(study.fluid, tables, faults, Object.keys(study.quantities));
   const asked = applicable(study, catalogue, own, faults);
   const curve = coefficient?.curve;
   for (const { key } of quantities.inputs)
@@ -200,13 +201,40 @@ function sentenceOf(
     if (coefficient.route.gives(coefficient.settings, coefficient.context) !== result)
       return says.coefficientIsOverall(coefficient.route.gives(coefficient.settings, coefficient.context), name);
   }
-  const curve = coefficient?.route.series?.(coefficient.settings).gives ?? [];
-  if (roots.length > 0 && roots.every((root) => curve.includes(root)))
-    return [says.cannotHave(name, roots), says.giveTheCurve(coefficient!.route.name)].join('; ');
-  return [says.cannotHave(name, roots), ...lack.ways.slice(0, 3).map((way) => says.wayTo(lack.key, way.rule.formula, way.lacks))].join(
-    '; ',
-  );
+  return [
+    `${says.cannotHave(name, roots)}${instead(lack, roots)}`,
+    ...lack.ways.slice(0, 3).map((way) => says.wayTo(lack.key, way.rule.formula, way.lacks)),
+    ...quantitiesLacked(lack)
+      .slice(0, 3)
+      .flatMap((key) => waysOf(key, book, have)),
+    ...(coefficient?.route.series === undefined ||
+    coefficient.curve !== undefined ||
+    have(coefficient.route.gives(coefficient.settings, coefficient.context))
+      ? []
+      : [says.giveTheCurve(coefficient.route.name)]),
+  ].join('; ');
 }
+
+/** Quantities that the ways to a key lack, each once. */
+const quantitiesLacked = ({ ways }: Missing): readonly Key[] => [
+  ...new Set(ways.flatMap(({ lacks }) => lacks.filter((key) => quantityOf(key) !== undefined))),
+];
+
+/** What stands nearer than the roots and may be given in their place. */
+function instead({ ways }: Missing, roots: readonly Key[]): string {
+  const near = ways.find(({ lacks }) => lacks.length > 0 && lacks.every((key) => quantityOf(key) !== undefined))?.lacks ?? [];
+  return near.length === 0 || near.every((key) => roots.includes(key)) ? '' : says.orGive(near);
+}
+
+/** From what a quantity that is lacking could be had, the ways that lack least first. */
+const waysOf = (key: Key, book: RuleBook, have: (key: Key) => boolean): readonly string[] =>
+  book
+    .waysTo(key)
+    .map((rule) => ({ rule, lacks: rule.from.filter((need) => !have(need)) }))
+    .filter(({ lacks }) => lacks.length > 0 && lacks.every((need) => quantityOf(need) !== undefined))
+    .sort((a, b) => a.lacks.length - b.lacks.length)
+    .slice(0, 2)
+    .map(({ rule, lacks }) => says.wayTo(key, rule.formula, lacks));
 
 const coefficients: Readonly<Record<string, { readonly key: Key; readonly symbol: string; readonly unit: string }>> = {
   heat: { key: 'heat_transfer_coefficient', symbol: 'h', unit: 'W/(m^2 K)' },

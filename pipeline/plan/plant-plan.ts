@@ -113,7 +113,7 @@ function plantBook({ basis, settings, table, keys, others }: PlantAsked, found: 
     ...found.rules,
     ...formulas,
     ...groups.rules,
-    ...planFluids(settings.fluid ?? basis.fluid, new Map(Object.entries(basis.tables)), faults),
+    ...planFluids(settings.fluid ?? basis.fluid, new Map(Object.entries(basis.tables)), faults, basis.stated),
     ...derivedRulesFor(basis.equipment),
     ...groupRules.filter(sameLength(basis)),
     ...unitRules(asked),

@@ -92,6 +92,18 @@ const list: readonly Quantity[] = [
   number('flow_index', 'm', 'flow index of a power-law liquid'),
   quantity('consistency', 'Pa s', 'K', 'consistency of a power-law liquid: its viscosity at 1 1/s'),
   number('shear_constant', 'k_s', 'mean shear rate over rotation speed'),
+  // for estimates of the diffusivity
+  quantity('solute_molar_volume', 'm^3/mol', 'V_A', 'molar volume of the solute at its normal boiling point', { friendly: ['cm^3/mol'] }),
+  quantity('solvent_molar_mass', 'kg/mol', 'M_B', 'molar mass of the solvent', { friendly: ['g/mol'] }),
+  number(
+    'association_factor',
+    'φ_B',
+    'association factor of the solvent: 2.6 water, 1.9 methanol, 1.5 ethanol, 1 others (Wilke and Chang 1955)',
+  ),
+  size('solute_radius', 'r_A', 'radius of the solute in the liquid'),
+  quantity('carrier_molar_mass', 'kg/mol', 'M_C', 'molar mass of the gas that the solute moves in', { friendly: ['g/mol'] }),
+  number('diffusion_volume', 'Σv_A', 'sum of diffusion volumes of the solute, cm^3/mol (Fuller, Schettler and Giddings 1966)'),
+  number('carrier_diffusion_volume', 'Σv_C', 'sum of diffusion volumes of the gas that the solute moves in, cm^3/mol'),
   // flow
   speed('velocity', 'v', 'velocity (superficial in beds, largest in tube banks)'),
   quantity('volume_flow', 'm^3/s', 'q_V', 'volume flow rate', { friendly: ['L/min', 'm^3/h', 'mL/min'] }),
@@ -125,7 +137,7 @@ const list: readonly Quantity[] = [
     revolutions: true,
     friendly: ['rpm'],
   }),
-  number('suspension_constant', 'S', 'constant of impeller and vessel in the just-suspended speed'),
+  number('suspension_constant', 'S_Z', 'constant of impeller and vessel in the just-suspended speed'),
   number('solids_loading', 'X', 'mass of solids per mass of liquid'),
   quantity('power', 'W', 'P', 'shaft power, net, as gassed', { friendly: ['W', 'kW'] }),
   quantity('power_ungassed', 'W', 'P_0', 'shaft power without gas', { friendly: ['W', 'kW'] }),

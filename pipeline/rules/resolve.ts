@@ -1,3 +1,4 @@
+import { quantityOf } from '../quantities/vocabulary.ts';
 import { uncertainOf } from './evaluate.ts';
 import type { Input, Key, Missing, Recipe, Rule } from './rule.ts';
 
@@ -105,14 +106,22 @@ function missing(book: RuleBook, given: ReadonlySet<Key>, chosen: ReadonlyMap<Ke
   return { key, ways: book.waysTo(key).map((rule) => ({ rule, lacks: rule.from.filter((need) => !have(need)) })) };
 }
 
-/** The keys that nothing gives and that stand at the bottom of why `key` cannot be had, nearest way first. */
-export function rootsOfMissing(book: RuleBook, have: (key: Key) => boolean, key: Key, seen: ReadonlySet<Key> = new Set()): readonly Key[] {
-  if (have(key) || seen.has(key)) return [];
-  const ways = book.waysTo(key);
-  if (ways.length === 0) return [key];
+/**
+ * The keys that nothing gives and that stand at the bottom of why `key` cannot be had, nearest way first. A quantity that would take several others is asked
+ * for itself; a way that leads in a circle is none.
+ */
+export function rootsOfMissing(book: RuleBook, have: (key: Key) => boolean, key: Key): readonly Key[] {
+  return have(key) ? [] : rootsBelow(book, have, key, new Set());
+}
+
+function rootsBelow(book: RuleBook, have: (key: Key) => boolean, key: Key, seen: ReadonlySet<Key>): readonly Key[] {
   const deeper = new Set([...seen, key]);
-  const options = ways
-    .map((rule) => [...new Set(rule.from.flatMap((need) => rootsOfMissing(book, have, need, deeper)))])
-    .filter((roots) => roots.length > 0);
-  return options.length === 0 ? [key] : options.reduce((best, option) => (option.length < best.length ? option : best));
+  const options = book
+    .waysTo(key)
+    .map((rule) => rule.from.filter((need) => !have(need)))
+    .filter((lacks) => lacks.length > 0 && !lacks.some((need) => deeper.has(need)))
+    .map((lacks) => [...new Set(lacks.flatMap((need) => rootsBelow(book, have, need, deeper)))]);
+  if (options.length === 0) return [key];
+  const best = options.reduce((one, option) => (option.length < one.length ? option : one));
+  return best.length > 1 && quantityOf(key) !== undefined ? [key] : best;
 }

@@ -45,6 +45,8 @@ export const groupDimension = (group: string, formula: string, found: string): s
 
 export const cannotHave = (what: string, missing: readonly string[]): string =>
   `${what} cannot be computed: ${missing.length === 0 ? 'nothing gives it' : `${missing.join(' and ')} ${missing.length === 1 ? 'is' : 'are'} not given and cannot be derived from what is`}`;
+export const orGive = (keys: readonly string[]): string =>
+  ` (or give ${keys.join(' and ')} ${keys.length === 1 ? 'itself' : 'themselves'})`;
 export const wayTo = (gives: string, formula: string, lacks: readonly string[]): string =>
   `${gives} by ${formula}${lacks.length === 0 ? '' : `, which lacks ${lacks.join(', ')}`}`;
 export const noCoefficient = (response: string): string =>
@@ -85,7 +87,6 @@ export const sideConductance = (formula: string): string =>
 export const steadyAndSeries = (): string =>
   'steady windows of a log are trials at rest, coefficient.series reads trials that change with time; use one of them';
 export const curveAndColumn = (key: string): string => `${key} comes from the logged curve and is given here too; leave one of them out`;
-export const giveTheCurve = (route: string): string =>
-  `${route} reads it from a logged curve: say where it stands under coefficient.series`;
+export const giveTheCurve = (route: string): string => `${route} can read a logged curve: say where it stands under coefficient.series`;
 export const routeWithoutCurve = (route: string, able: readonly string[]): string =>
   `the route ${route} takes no logged curve; routes that do are ${able.join(', ')}`;
