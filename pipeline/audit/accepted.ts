@@ -37,8 +37,9 @@ export function acceptedCorrelations(
   });
 }
 
-/** Authors and year; the identifier too where one publication gives more than one line. */
+/** Authors and year; what the identifier adds where one publication gives more than one line. */
 function labelOf({ authors, year, id }: AuditRow, rows: readonly AuditRow[]): string {
   const same = rows.filter((other) => other.authors === authors && other.year === year);
-  return same.length > 1 ? `${authors} ${year} (${id})` : `${authors} ${year}`;
+  const variant = /-\d{4}-(.+)$/u.exec(id)?.[1]?.replaceAll('-', ' ') ?? id;
+  return same.length > 1 ? `${authors} ${year}, ${variant}` : `${authors} ${year}`;
 }

@@ -145,13 +145,15 @@ export async function runStudy(file: string, { out, seed, index }: RunOptions = 
   return { study: file, folder, ...summary };
 }
 
+const MOST_SCRIPT = 1 << 24;
+
 /** Puts the script that reports share beside the index (or the report, where there is none) and returns how a report names it. */
 async function shareScript(home: string, folder: string): Promise<string> {
   const { SHARED_SCRIPT, sharedScript } = await import('../../reports/dress.ts');
   const path = join(resolve(home), SHARED_SCRIPT);
   const text = sharedScript();
   makeFolder(home);
-  if (!(fileExists(path) && readBytes(path, { most: MOST_TABLE, name: SHARED_SCRIPT }).toString('utf8') === text)) replaceFile(path, text);
+  if (!(fileExists(path) && readBytes(path, { most: MOST_SCRIPT, name: SHARED_SCRIPT }).toString('utf8') === text)) replaceFile(path, text);
   return relative(resolve(folder), path).split(sep).map(encodeURIComponent).join('/');
 }
 

@@ -15,7 +15,7 @@ export function plantCharts(result: StudyResult): readonly Spec[] {
   const marks = plant.cases.flatMap((one) =>
     one.predictions.map(
       (by, k): IntervalMark => ({
-        name: `${several ? `${cut(one.name, 14)} · ` : ''}${cut(by.by, 24)}`,
+        name: `${several ? `${cut(one.name, 14)} · ` : ''}${cut(by.by, 34)}`,
         value: by.coefficient,
         lower: by.lawLower,
         upper: by.lawUpper,

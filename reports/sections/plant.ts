@@ -15,7 +15,7 @@ export function plant(result: StudyResult, pictures: Pictures): Markup {
   if (found === null) return section('plant', says.noPlant(), html`${notesOf(result, 'plant')}${calculator(result)}`);
   return section(
     'plant',
-    found.says,
+    prettyUnit(found.says),
     html`${picturesOf(pictures, 'plant-intervals')}
 ${designs(found)}
 ${predictions(found, result.options.confidence)}
@@ -71,7 +71,7 @@ const predictions = ({ cases, coefficient }: PlantResult, confidence: number): M
       '#to',
       '#degrees of freedom',
       'in range',
-      'largest sources',
+      '~largest sources',
       'the wider one',
     ),
     cases.flatMap((one) =>
