@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
+import { linearAnswer, linearProblems } from './nist-linear.ts';
 import { answer, models } from './nist-problems.ts';
 
 // Certified values: NIST/ITL Statistical Reference Datasets, nonlinear regression; files in datasets/nist-strd.
@@ -47,4 +48,36 @@ test('every exception is one', () => {
 test('the committed table holds every problem from both starts', () => {
   const text = readFileSync(join(import.meta.dirname, '../strength/nist-table.md'), 'utf8');
   for (const name of Object.keys(models)) for (const start of [1, 2]) expect(text).toContain(`| ${name} | ${start} |`);
+});
+
+// Certified values: NIST/ITL Statistical Reference Datasets, linear regression.
+describe('linear problems', () => {
+  /** May only shrink. */
+  const linearExceptions: Readonly<Record<string, { readonly parameters: number; readonly why: string }>> = {
+    Wampler5: { parameters: 5.5, why: 'every parameter is 1, up to twenty million times smaller than its certified standard error' },
+  };
+  const fitted = Object.keys(linearProblems).filter((name) => name !== 'Filip');
+
+  test.each(fitted)('%s: certified parameters, standard errors and residual deviation, solved directly', (name) => {
+    const found = linearAnswer(name);
+    expect(found.stop).toBe('direct solution');
+    expect(found.parameters).toBeGreaterThanOrEqual(linearExceptions[name]?.parameters ?? 8);
+    if (linearProblems[name]!.residualSd === 0) expect(found.residualShare).toBeLessThan(1e-14);
+    else expect(Math.min(found.errors, found.residualSd)).toBeGreaterThanOrEqual(10);
+  });
+
+  test('Filip is refused by name: eleven powers of one x cannot be told apart, and the fit says so instead of printing them', () => {
+    const found = linearAnswer('Filip');
+    expect(found.stop).toBe('rank deficient');
+    expect(found.codes).toContain('not-identified');
+  });
+
+  test('every exception is one', () => {
+    for (const name of Object.keys(linearExceptions)) expect(linearAnswer(name).parameters).toBeLessThan(8);
+  });
+
+  test('the committed table holds every linear problem', () => {
+    const text = readFileSync(join(import.meta.dirname, '../strength/nist-table.md'), 'utf8');
+    for (const name of Object.keys(linearProblems)) expect(text).toContain(`| ${name} | - |`);
+  });
 });
