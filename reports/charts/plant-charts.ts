@@ -62,11 +62,13 @@ export function proposalMap(result: StudyResult): Spec | undefined {
     const one = { row, trial: trial.trial, campaign: trial.campaign, x: group(first), y: place(second, group, 0) };
     return Number.isFinite(one.x) && Number.isFinite(one.y) ? [one] : [];
   });
-  const proposed = nextTrials.proposals.flatMap((proposal, k) => {
-    const group = (name: string): number => proposal.groups[name] ?? Number.NaN;
-    const one = { number: String(k + 1), x: group(first), y: place(second, group, 1) };
-    return Number.isFinite(one.x) && Number.isFinite(one.y) ? [one] : [];
-  });
+  const proposed = together(
+    nextTrials.proposals.flatMap((proposal, k) => {
+      const group = (name: string): number => proposal.groups[name] ?? Number.NaN;
+      const one = { number: String(k + 1), x: group(first), y: place(second, group, 1) };
+      return Number.isFinite(one.x) && Number.isFinite(one.y) ? [one] : [];
+    }),
+  );
   const all = [...done, ...proposed];
   const x = axisOver(
     all.map((one) => one.x),
@@ -97,11 +99,28 @@ export function proposalMap(result: StudyResult): Spec | undefined {
       { data: { name: 'proposed' }, mark: { type: 'point', filled: false, stroke: palette.warm, strokeWidth: 2, size: 190 }, encoding: at },
       {
         data: { name: 'proposed' },
-        mark: { type: 'text', fontSize: 11, fontWeight: 'bold', color: palette.warm },
+        mark: { type: 'text', fontSize: 11, fontWeight: 'bold', color: palette.warm, align: 'left', dx: 11 },
         encoding: { ...at, text: { field: 'number', type: 'nominal' } },
       },
     ],
   };
+}
+
+interface Proposed {
+  readonly number: string;
+  readonly x: number;
+  readonly y: number;
+}
+
+/** Proposals at one place get one ring with all their numbers. */
+function together(proposed: readonly Proposed[]): readonly Proposed[] {
+  const places = new Map<string, Proposed>();
+  for (const one of proposed) {
+    const at = `${one.x.toPrecision(6)} ${one.y.toPrecision(6)}`;
+    const there = places.get(at);
+    places.set(at, there === undefined ? one : { ...there, number: `${there.number}, ${one.number}` });
+  }
+  return [...places.values()];
 }
 
 /** Interval of each case now, after the proposals, and the floor that no trial can pass, in % of half-width. */

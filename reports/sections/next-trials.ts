@@ -35,7 +35,7 @@ ${
       one.campaign,
       ...settings.map((name) => plainNumber(one.settings[name]?.value ?? Number.NaN)),
       ...groups.map((name) => plainNumber(one.groups[name] ?? Number.NaN)),
-      plainNumber(one.gain, 2),
+      percent(one.gain),
     ]),
   )
 }
@@ -45,7 +45,7 @@ ${
   table(
     'Half-width of the prediction interval',
     columns('case', '#now', '#after these trials', '#floor no trial can pass'),
-    found.cases.map((one) => [one.name, `±${percent(one.now)}`, `±${percent(one.after)}`, `±${percent(one.floor)}`]),
+    found.cases.map((one) => [one.name, ...[one.now, one.after, one.floor].map((half) => `±${plainNumber(100 * half)} %`)]),
   )
 }
 ${found.notes.map((note) => html`<p class="fine">${note.text}</p>`)}
