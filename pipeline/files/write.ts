@@ -1,4 +1,4 @@
-import { closeSync, fsyncSync, mkdirSync, openSync, renameSync, rmSync, writeSync } from 'node:fs';
+import { closeSync, fsyncSync, mkdirSync, openSync, renameSync, rmSync, statSync, writeSync } from 'node:fs';
 import { basename, dirname, join } from 'node:path';
 import { InputError } from '../base/input-error.ts';
 import { says } from '../base/says/files.ts';
@@ -60,9 +60,20 @@ function remove(path: string): void {
 /** Makes a folder and those above it. */
 export function makeFolder(path: string): void {
   try {
-    mkdirSync(path, { recursive: true });
+    made(path);
   } catch (error) {
     throw new InputError([{ code: 'folder-not-made', text: says.folderNotMade(path, causeOf(error)), place: { file: path } }]);
+  }
+}
+
+/** One folder after another: the recursive way of the system tells a read-only disk as a missing folder. */
+function made(path: string): void {
+  if (statSync(path, { throwIfNoEntry: false })?.isDirectory()) return;
+  if (dirname(path) !== path) made(dirname(path));
+  try {
+    mkdirSync(path);
+  } catch (error) {
+    if (!statSync(path, { throwIfNoEntry: false })?.isDirectory()) throw error;
   }
 }
 

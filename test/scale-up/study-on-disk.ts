@@ -1,7 +1,7 @@
 import { mkdtempSync, rmSync, writeFileSync } from 'node:fs';
 import { tmpdir } from 'node:os';
 import { join } from 'node:path';
-import { computeStudy } from '../../pipeline/index.ts';
+import { computeStudy } from '../../pipeline/batch/run-study.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 
 /** A study of these files, computed through the same door as the command line's. `study.yaml` is one of them. */

@@ -1,8 +1,7 @@
 import { existsSync, readdirSync, readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
-import { checkStudy } from '../../pipeline/batch/run-study.ts';
-import { computeStudy } from '../../pipeline/index.ts';
+import { checkStudy, computeStudy } from '../../pipeline/batch/run-study.ts';
 import type { StudyResult } from '../../pipeline/results/study-result.ts';
 
 /** What the script beside a study computed without this project; `made_by` and versions stand in the file. */
