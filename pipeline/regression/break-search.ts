@@ -1,4 +1,5 @@
 import { constant, divide, group, max, mul, num, pow } from '../algebra/build.ts';
+import { evaluate } from '../algebra/evaluate.ts';
 import type { Expr } from '../algebra/form.ts';
 import { studentQuantile } from '../numerics/distributions.ts';
 import { seedFor } from '../numerics/random.ts';
@@ -7,7 +8,6 @@ import { whiten } from './campaign-variance.ts';
 import type { Fit, FitData, FitOptions, Parameter } from './fit.ts';
 import { fitLaw } from './fit-law.ts';
 import { chanceOf, type Directions, directions, dot, largestF, without } from './largest-f.ts';
-import { roleOf } from './role-of.ts';
 import { type LawToFit, type Solved, solveLaw } from './solve-law.ts';
 
 /** Whether one exponent holds for a law over its range in Re, against two that meet at a break. */
@@ -208,18 +208,22 @@ function fitBroken({ law, fit, data, options, name }: Search, b: number): Fit {
   return fitLaw(broken, data, options, 'values');
 }
 
-/** Of a plain product with one exponent of the group; NaN for any other law. */
+/** Of a plain product; NaN for any other law, which has no single exponent of the group. */
 function exponents({ form }: LawToFit, broken: Fit, name: string): { readonly below: number; readonly above: number } {
-  const own = form.constants.find((one) => {
-    const role = roleOf({ form }, one);
-    return role.kind === 'exponent' && role.of === name;
-  });
-  const below = own === undefined || !isProduct(form.tree) ? Number.NaN : broken.values[own]!;
+  const below = exponentIn(form.tree, name, broken.values);
   return { below, above: below + broken.values[CHANGE]! };
 }
 
-const isProduct = (e: Expr): boolean =>
-  e.op === 'number' || e.op === 'group' || e.op === 'constant' || ((e.op === '*' || e.op === '^') && e.of.every(isProduct));
+function exponentIn(e: Expr, name: string, values: Readonly<Record<string, number>>): number {
+  if (e.op === 'group') return e.name === name ? 1 : 0;
+  if (e.op === 'number' || e.op === 'constant') return 0;
+  if (e.op === '*') return e.of.reduce((sum, part) => sum + exponentIn(part, name, values), 0);
+  if (e.op !== '^' || holdsGroup(e.of[1])) return Number.NaN;
+  return exponentIn(e.of[0], name, values) * evaluate(e.of[1], {}, values);
+}
+
+const holdsGroup = (e: Expr): boolean =>
+  e.op === 'group' || (e.op !== 'number' && e.op !== 'constant' && (e.of.some(holdsGroup) || (e.op === 'bands' && holdsGroup(e.on))));
 
 /** AICc of the same likelihood with one parameter more: the break. */
 function withOneMore({ statistics: { aicc, n }, residualDegreesOfFreedom, campaigns }: Fit, { scatter }: FitOptions): number {

@@ -104,6 +104,13 @@ describe('other laws and few trials', () => {
     expect(got.upper).toBeGreaterThan(Math.exp(5));
   });
 
+  test('an exponent that is held has its value below the break', () => {
+    const { x, y } = straight(30, 40, (v) => 0.3 * Math.max(v - 8.5, 0));
+    const got = one(law('Sh = C * (Re / 100)^(3/5)', ['Re']), data({ y, x: [x] }));
+    expect(got.below).toBeCloseTo(0.6, 12);
+    expect(got.above - 0.6).toBeCloseTo(got.change, 12);
+  });
+
   test('values instead of logarithms', () => {
     const { x, y } = straight(8, 30, (v) => 0.3 * Math.max(v - 8.5, 0));
     const got = one(
