@@ -31,7 +31,7 @@ test('small uncertainties: first order holds, and that is told', async () => {
   expect(sampled(result)).toMatchObject({ level: 'note', section: 'method' });
 });
 
-// ln of a normal reading with 30 %: standard deviation 0.355 by quadrature of its density above 0 (scipy.integrate.quad 1.10), against 0.30 to first order
+// ln of a normal reading with 30 %: standard deviation 0.355 by quadrature of its density above 0 (scipy 1.17.1, integrate.quad), against 0.30 to first order
 test('large ones: a warning that stands in the report', async () => {
   const result = await study('30 %', ', monte_carlo: true');
   const note = sampled(result)!;
