@@ -11,6 +11,8 @@ export interface ColumnGuess {
   readonly unit?: string;
   /** What must be settled before the guess may be used; its line is then written as a comment. */
   readonly question?: string;
+  /** A number without a unit, so that it may stand in a law as it is. */
+  readonly unitless?: true;
   /** Said beside a guess that is used. */
   readonly remark?: string;
 }
@@ -250,16 +252,20 @@ function write(draft: Draft, response: string, groups: readonly string[]): void 
   draft.add('laws:', `  - ${quoted(`${response} = C${groups.map((group, k) => ` * ${group}^${'abdegh'[k] ?? `x${k}`}`).join('')}`)}`);
 }
 
-/** No coefficient to be seen: the last column of numbers against the others, as a start. */
+/** No coefficient to be seen: the last of what may stand in a law against the first, as a start. */
 function plainNumbers(draft: Draft, columns: readonly ColumnGuess[]): void {
-  const numbers = columns.filter(({ is }) => is === 'number' || is === 'quantity' || is === 'group');
-  const named = numbers.map(({ header }, k) => ({ header, name: `column_${k + 1}` }));
+  const named = columns.flatMap(({ header, is, key, question, unitless }, k): readonly { name: string; header?: string }[] => {
+    if (unitless === true) return [{ name: `column_${k + 1}`, header }];
+    if (question !== undefined || key === undefined) return [];
+    return is === 'quantity' ? [{ name: key }] : [{ name: key, header }];
+  });
   draft.ask(says.whichResponse());
   if (named.length === 0) {
     draft.add('laws:', '  - "Nu = C * Re^a"');
     return;
   }
-  draft.add('groups:', ...named.map(({ name, header }) => `  ${name}: {column: ${quoted(header)}}`), '');
+  const groups = named.flatMap(({ name, header }) => (header === undefined ? [] : [`  ${name}: {column: ${quoted(header)}}`]));
+  if (groups.length > 0) draft.add('groups:', ...groups, '');
   const response = named.at(-1)!.name;
   draft.add('laws:', `  - ${quoted(`${response} = C${named.length > 1 ? ` * ${named[0]!.name}^a` : ''}`)}`);
 }

@@ -17,6 +17,8 @@ interface Column {
   readonly name: string;
   readonly unit?: string;
   readonly cells: readonly string[];
+  /** What the units row says where the header says another unit. */
+  readonly below?: string;
   /** Share of its filled cells that are numbers. */
   readonly numeric: number;
 }
@@ -24,7 +26,7 @@ interface Column {
 /** What the columns of a table seem to be, by names and units in English and German; doubt becomes a question, never a silent choice. */
 export function guessColumns(table: Table): BeginInput {
   const columns = columnsOf(table);
-  const guesses = settleTwice(columns.map((column) => guess(column, table.decimal)));
+  const guesses = settleTwice(columns.map((column) => unclear(guess(column, table.decimal), column, columns)));
   const trial = guesses.findIndex(({ is }) => is === 'trial');
   const names = trial < 0 ? [] : columns[trial]!.cells;
   return {
@@ -42,18 +44,28 @@ function columnsOf({ header, unitsRow, rows, decimal }: Table): readonly Column[
     const cells = rows.map((row) => row.cells[k]!.trim()).filter((cell) => cell !== '');
     if (text === '') return [];
     const split = splitHeader(text);
-    const unit = split.unit ?? (unitsRow?.[k] === '' ? undefined : unitsRow?.[k]);
+    const below = unitsRow?.[k] === '' ? undefined : unitsRow?.[k];
+    const unit = split.unit ?? below;
     const numbers = cells.filter((cell) => typeof read(cell) === 'number').length;
     return [
       {
         header: text,
         name: split.name,
         ...(unit === undefined ? {} : { unit }),
+        ...(split.unit === undefined || below === undefined || below === split.unit ? {} : { below }),
         cells,
         numeric: cells.length === 0 ? 0 : numbers / cells.length,
       },
     ];
   });
+}
+
+/** A header that stands twice, or one whose unit its units row contradicts, cannot be named in a study: a question, or nothing. */
+function unclear(one: ColumnGuess, { header, unit, below }: Column, columns: readonly Column[]): ColumnGuess {
+  const twice = columns.filter((other) => other.header === header).length > 1;
+  if (!twice && below === undefined) return one;
+  const question = twice ? says.sameHeader(header) : says.unitsDiffer(header, unit!, below!);
+  return one.is === 'quantity' ? { ...one, question } : { header, is: 'text' };
 }
 
 function guess(column: Column, decimal: '.' | ','): ColumnGuess {
@@ -81,9 +93,16 @@ function quantityGuess({ header, name, unit }: Column, words: string): ColumnGue
   if (inName !== undefined && found !== undefined)
     return { ...streamed(header, plainWords(inName.name), found), unit: inName.unit, remark: says.unitFromName(inName.unit) };
   const known = byExactName(name) ?? plainNumber(words) ?? match(words, undefined);
-  if (known === undefined) return { header, is: 'number' };
+  if (known === undefined) return { header, is: 'number', unitless: true };
   if (known.unit === '1') return { header, is: 'quantity', key: known.name };
-  return { header, is: 'quantity', key: known.name, unit: known.unit, question: says.unitAsked(header, known.unit, known.says) };
+  return {
+    header,
+    is: 'quantity',
+    key: known.name,
+    unit: known.unit,
+    unitless: true,
+    question: says.unitAsked(header, known.unit, known.says),
+  };
 }
 
 function withUnit(header: string, words: string, unit: string): ColumnGuess {

@@ -27,7 +27,7 @@ export const says = {
     'do these lengths and velocities define the groups? Re: pipe, hydraulic, plate, particle, cylinder, tube-bank, impeller, film ...',
   whichLaw: (): string => 'which laws are to be fitted? This one is the plainest',
   whichResponse: (): string =>
-    'what is to be described by what? No coefficient was recognised, so the last column stands against the first',
+    'what is to be described by what? No coefficient was recognised, so the last quantity stands against the first',
   unitAsked: (header: string, unit: string, words: string): string =>
     `${JSON.stringify(header)} may be the ${words}, in which unit? (SI: ${unit})`,
   wrongUnit: (header: string, unit: string): string =>
@@ -36,6 +36,9 @@ export const says = {
   unitFromName: (unit: string): string => `unit ${unit} read from the name: check it`,
   twoColumns: (key: string, header: string, other: string): string =>
     `both ${JSON.stringify(other)} and ${JSON.stringify(header)} look like ${key}: which one is it?`,
+  sameHeader: (header: string): string => `${JSON.stringify(header)} stands above more than one column: give each a name of its own`,
+  unitsDiffer: (header: string, unit: string, below: string): string =>
+    `${JSON.stringify(header)} has the unit ${JSON.stringify(unit)}, and ${JSON.stringify(below)} stands below it: which one is right? Give it once`,
   conditionAsked: (header: string): string =>
     `${JSON.stringify(header)}: at which reference temperature and pressure does this gas volume count?`,
 };
