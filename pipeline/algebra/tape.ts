@@ -16,6 +16,22 @@ export interface Tape {
 type Ref = { readonly kind: 'scalar' | 'column'; readonly at: number; readonly open: boolean };
 type Step = () => void;
 
+/** Loops of their own for what most laws are made of: a function called through a variable is not inlined. */
+const loops: Readonly<Record<string, (out: Float64Array, x: Float64Array) => Step>> = {
+  exp: (out, x) => () => {
+    for (let i = 0; i < out.length; i++) out[i] = Math.exp(x[i]!);
+  },
+  ln: (out, x) => () => {
+    for (let i = 0; i < out.length; i++) out[i] = Math.log(x[i]!);
+  },
+  inverse: (out, x) => () => {
+    for (let i = 0; i < out.length; i++) out[i] = 1 / x[i]!;
+  },
+  square: (out, x) => () => {
+    for (let i = 0; i < out.length; i++) out[i] = x[i]! * x[i]!;
+  },
+};
+
 class Builder {
   readonly scalars: number[] = [];
   readonly columns: Float64Array[];
@@ -162,8 +178,16 @@ class Builder {
     return this.#step('^', [a, b, ln], (to) => {
       const [out, x, logs] = [this.columns[to]!, this.columns[a.at]!, this.columns[ln.at]!];
       const s = this.scalars;
+      let sound = false;
+      this.hoisted.push(() => {
+        sound = logs.every(Number.isFinite);
+      });
       return () => {
         const power = s[b.at]!;
+        if (sound) {
+          for (let i = 0; i < out.length; i++) out[i] = Math.exp(power * logs[i]!);
+          return;
+        }
         for (let i = 0; i < out.length; i++) {
           const l = logs[i]!;
           out[i] = Number.isFinite(l) ? Math.exp(power * l) : x[i]! ** power;
@@ -189,9 +213,12 @@ class Builder {
           s[to] = fn(s[a.at]!);
         };
       const [out, x] = [this.columns[to]!, this.columns[a.at]!];
-      return () => {
-        for (let i = 0; i < out.length; i++) out[i] = fn(x[i]!);
-      };
+      return (
+        loops[key]?.(out, x) ??
+        (() => {
+          for (let i = 0; i < out.length; i++) out[i] = fn(x[i]!);
+        })
+      );
     });
   }
 

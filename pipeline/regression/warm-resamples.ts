@@ -72,6 +72,16 @@ export function resampler(
     return false;
   };
 
+  /** A law that is linear in its coordinates is solved by the stored rows alone. */
+  const solved = (copies: Float64Array, out: Float64Array): boolean => {
+    gather(stored, copies, sums.all);
+    if (!solveUpper(sums.all, p, sums.work, sums.step)) return false;
+    out.set(theta);
+    move(out, back, sums.step);
+    return true;
+  };
+  if (model.linear) return { fit: solved };
+
   return {
     fit: (copies, out) => {
       gather(stored, copies, sums.all);

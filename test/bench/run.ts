@@ -1,3 +1,5 @@
 import { commandLine } from './command-line.ts';
+import { refitBench } from './refits.ts';
+import { auditBench, wholeStudy } from './whole-study.ts';
 
-for (const line of commandLine()) console.log(line);
+for (const part of [commandLine, wholeStudy, auditBench, refitBench]) for (const line of part()) console.log(line);
