@@ -39,3 +39,8 @@ export const rounding = (): string =>
 export const fullText = (): string => 'The laws at full precision';
 export const inputLead = (version: string, seed: number): string =>
   `pilotlaw ${version} computed this from the files below with seed ${seed}; the same files, version and seed give the same numbers.`;
+
+export const otherSides = (): string =>
+  'All but the law’s side, one resistance for each campaign, on the outer area, in m² K/W, with its interval';
+export const ownSide = (): string =>
+  'The law’s side at each trial: coefficient on its own area in W/(m² K) with the interval of the law, and its share of the whole resistance';

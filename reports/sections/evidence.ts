@@ -24,6 +24,7 @@ ${picturesOf(pictures, 'influence')}
 ${fit !== undefined && influence(result, fit)}
 ${breaks(result)}
 ${laws(result)}
+${sides(result)}
 ${own !== undefined && identifiability(own)}
 ${picturesOf(pictures, 'budget')}
 ${budgets(result)}
@@ -77,6 +78,23 @@ function breaks(result: StudyResult): Markup | false {
       ]),
     )
   );
+}
+
+/** Both sides of a law that was fitted through overall coefficients. */
+function sides({ sides: both }: StudyResult): Markup | false {
+  if (both === null) return false;
+  const bounded = (value: number, lower: number, upper: number): readonly string[] =>
+    [value, lower, upper].map((one) => plainNumber(one, 4));
+  return html`${table(
+    says.otherSides(),
+    columns('campaign', '#resistance', '#lower', '#upper'),
+    both.others.map(({ campaign, resistance, lower, upper }) => [campaign, ...bounded(resistance, lower, upper)]),
+  )}
+${table(
+  says.ownSide(),
+  columns('trial', '#coefficient', '#lower', '#upper', '#share of the whole resistance'),
+  both.own.map(({ trial, coefficient, lower, upper, share }) => [trial, ...bounded(coefficient, lower, upper), percent(share)]),
+)}`;
 }
 
 function laws(result: StudyResult): Markup {

@@ -2,6 +2,7 @@ import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { describe, expect, test } from 'vitest';
 import { InputError } from '../../pipeline/base/input-error.ts';
+import { renderReport } from '../../reports/page.ts';
 import { studyOf } from '../scale-up/study-on-disk.ts';
 
 const folder = join(import.meta.dirname, 'other-side-plot');
@@ -36,6 +37,13 @@ describe('the law of one side through overall coefficients', () => {
       expect(upper).toBeGreaterThan(h);
       expect(Math.abs(share - (1.25 * U) / h)).toBeLessThan(0.2);
     });
+  });
+
+  test('the report shows both sides with their intervals', async () => {
+    const { html } = await renderReport(await studyOf({ 'study.yaml': study, 'trials.csv': trials }));
+    expect(html).toContain('All but the law’s side, one resistance for each campaign');
+    expect(html).toContain('share of the whole resistance');
+    expect(html).toContain('after Wilson 1915');
   });
 
   test('one campaign: one resistance without a number', async () => {
