@@ -1,3 +1,5 @@
+import { readFileSync } from 'node:fs';
+import { join } from 'node:path';
 import { deflateRawSync } from 'node:zlib';
 import * as XLSX from '@e965/xlsx';
 import fc from 'fast-check';
@@ -142,6 +144,12 @@ describe('files that stop with place and remedy (exit 3)', () => {
     const most = { parts: 10, unpacked: 1_000_000 };
     expect(zipSizes(lyingBomb(20_000_000), most)!.unpacked).toBe(most.unpacked + 1);
     expect(zipSizes(lyingBomb(999_999), most)!.unpacked).toBe(999_999);
+  });
+
+  // Found by throwing bytes at the reader (test/strength/fuzz.ts): unpacked by the workbook library alone, this one never ends.
+  test('a part that does not unpack stops the file at once', () => {
+    const bytes = readFileSync(join(import.meta.dirname, 'fixtures/damaged-part.xlsx'));
+    expect(fault(() => read(bytes, 'trials.xlsx')).messages[0]!.code).toBe('not-a-workbook');
   });
 
   test('a sheet that claims a million rows is read by its cells, at once', () => {
