@@ -6,11 +6,11 @@ export const measuredOver = (): string =>
   'Bias is measured over predicted, over the trials in range; errors on left-out trials use the same left-out trials for all three.';
 export const notCompared = (): string => 'What could not be compared';
 export const noPlant = (): string =>
-  'No plant case is computed by this version. Apply the law inside its ranges only, in the same kind of equipment; the calculator below gives its value and interval at one condition.';
+  'The study names no plant cases (plant: plant.csv). Apply the law inside its ranges only, in the same kind of equipment; the calculator below gives its value and interval at one condition.';
 export const calculator = (): string => 'Try your own values';
 export const calculatorFine = (confidence: string): string =>
   `By the same formulas as the plant cases, for group values without an uncertainty of their own, at ${confidence}. A law is silent about what lies outside its ranges: there the interval is what the law would say if it went on.`;
-export const noNext = (): string => 'No further trials are proposed by this version.';
+export const noNext = (): string => 'Nothing is proposed: the study does not say what the rig can set (rig: ...).';
 export const refits = (): string => 'The law with less weight on trials far from it, and without a campaign or an influential trial';
 export const breaks = (law: string): string => `One exponent of Re, or two that meet at a break, in ${law}`;
 export const open = (): string => 'open';
