@@ -221,13 +221,15 @@ describe('vessels', () => {
     expect(by('tip speed').rotationSpeed).toBeCloseTo(middle / 10, 12);
     // Power by its definition (Rushton, Costich, Everett 1950): N_P rho N^3 d^5.
     expect(by('tip speed').power).toBeCloseTo(1.3 * 1000 * (middle / 10) ** 3, 9);
+    // Equal tip speed, similar vessels, turbulent: P2/P1 = (d2/d1)^2 (examination question with solution, bioreactor scale-up; stored page). Rig: d = 0.1 m.
+    expect(by('tip speed').power / (1.3 * 1000 * middle ** 3 * 0.1 ** 5)).toBeCloseTo(100, 9);
     const coefficients = rows.map((row) => Math.log(row.coefficient));
     const mean = Math.exp(coefficients.reduce((sum, one) => sum + one, 0) / coefficients.length);
     expect(by('coefficient').coefficient).toBeCloseTo(mean, 12);
     expect(by('power per volume').rotationSpeed).toBeCloseTo(middle * 10 ** (-2 / 3), 12);
   });
 
-  // A 10 L vessel at 450 rpm to 10 000 L, ten times the diameter, equal tip speed: 45 rpm (examination question, GATE BT 2012; stored page).
+  // A 10 L vessel at 450 rpm to 10 000 L, ten times the diameter, equal tip speed: 45 rpm (examination question GATE BT 2013, 23; stored page).
   test('equal tip speed as published; equal power per volume by its two thirds', () => {
     expect(similarSpeed(450, 1, 10, 1)).toBeCloseTo(45, 12);
     expect(similarSpeed(450, 1, 10, 2 / 3)).toBeCloseTo(450 / Math.cbrt(100), 10);
@@ -236,7 +238,7 @@ describe('vessels', () => {
   test('the just-suspended speed is told beside the case that turns slower', async () => {
     const { plant } = await studyOf({ 'study.yaml': vessel('plant: plant.csv'), 'trials.csv': runs, 'plant.csv': table });
     const note = plant!.notes.find((one) => one.code === 'just-suspended')!;
-    // Zwietering 1958 by hand: S nu^0.1 d_p^0.2 (g drho/rho)^0.45 X^0.13/d^0.85, X in % by mass, d = 1 m.
+    // Zwietering 1958 by hand, in the form that a stored reference sheet prints: S nu^0.1 d_p^0.2 (g drho/rho)^0.45 X^0.13/d^0.85, X in % by mass, d = 1 m.
     const needed = 5 * 1e-6 ** 0.1 * 0.003 ** 0.2 * (9.80665 * 0.2) ** 0.45 * 5 ** 0.13;
     expect(note.text).toContain(`${Number((60 * needed).toPrecision(3))} rpm`);
   });
