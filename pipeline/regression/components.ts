@@ -39,13 +39,13 @@ export function estimateComponents(
   return { scatter: phi[0], campaign: phi[1], criterion: now.criterion, iterations, settled: iterations < SCORING.iterations };
 }
 
-/** sigma^2 stays above this where some trial has no measurement variance of its own to stand on. */
-function scatterFloor({ measured, r }: Equations): number {
+/** sigma^2 stays above this where some trial has no measurement variance of its own to stand on; exact data keep the scatter of their own rounding. */
+function scatterFloor({ measured, r, problem: { y } }: Equations): number {
   let least = Number.POSITIVE_INFINITY;
   let square = 0;
   for (let i = 0; i < r.length; i++) {
     least = Math.min(least, measured[i]!);
-    square += r[i]! * r[i]!;
+    square += r[i]! * r[i]! + 1e-18 * y[i]! * y[i]!;
   }
   return least > 0 ? 0 : (1e-12 * square) / r.length + Number.MIN_VALUE * 1e20;
 }

@@ -60,7 +60,9 @@ function attempt(law: LawToFit, prepared: Prepared, data: FitData, options: FitO
   eq.evaluate(start.theta, { scatter: 1, campaign: 0 });
   if (problem.estimate.scatter === false) refuseExact(eq.measured, data.trials, options);
   const entangled = failed(start.stop) ? [] : entangledOf(eq, search.free);
-  const spread = start.q / Math.max(1, problem.n - search.free.length);
+  // exact data leave the rounding of their own values
+  const rounding = (1e-30 * problem.y.reduce((sum, y) => sum + y * y, 0)) / problem.n;
+  const spread = Math.max(start.q / Math.max(1, problem.n - search.free.length), rounding);
   const short = entangled.length > 0;
   const settled: Settled =
     failed(start.stop) || short || problem.n <= search.free.length
