@@ -3,6 +3,8 @@ import { type CellObject, utils, type WorkSheet } from '@e965/xlsx';
 /** A reference such as `B7`. */
 export type Ref = string;
 
+const NO_NUMBER = 0x24; // #NUM!, as the workbook library numbers errors
+
 /** Fills a sheet from the top; formulas carry the value computed here, so that the file reads right even where nothing recalculates. */
 export class SheetBuilder {
   readonly #sheet: WorkSheet = {};
@@ -15,11 +17,11 @@ export class SheetBuilder {
     return cells.map((cell, k) => this.#put(k, typeof cell === 'number' ? { t: 'n', v: cell } : { t: 's', v: cell }));
   }
 
-  /** A label and a formula (without the leading `=`) with its value now. Returns the formula's cell. */
+  /** A label and a formula (without the leading `=`) with its value now, `#NUM!` where that is no number. Returns the formula's cell. */
   formula(label: string, formula: string, value: number, remark = ''): Ref {
     this.#rows += 1;
     this.#put(0, { t: 's', v: label });
-    const at = this.#put(1, { t: 'n', f: formula, v: value });
+    const at = this.#put(1, Number.isFinite(value) ? { t: 'n', f: formula, v: value } : { t: 'e', f: formula, v: NO_NUMBER });
     if (remark !== '') this.#put(2, { t: 's', v: remark });
     return at;
   }
