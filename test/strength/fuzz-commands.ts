@@ -53,7 +53,7 @@ export async function fuzzCommands(studies: number, seed: number, atOnce: number
       const lines = out.split('\n').filter((line) => line !== '');
       done += lines.length;
       if (exit === 1 || exit === null || /This is a defect|\n\s+at .*:\d+:\d+/u.test(err))
-        faults.push(`exit ${exit}: ${err.slice(Math.max(0, err.search(/This is a defect|\n\s+at /u)), 2000)}`);
+        faults.push(`exit ${exit}: ${err.slice(Math.max(0, err.search(/This is a defect|\n\s+at /u))).slice(0, 2000)}`);
       for (let k = 0; k < some.length; k += 1)
         if (!`${out}${err}`.includes(join(root, `s${k}`, '/'))) faults.push(`nothing is told of study ${from + k}`);
     } finally {
