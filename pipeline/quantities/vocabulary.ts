@@ -128,6 +128,11 @@ const list: readonly Quantity[] = [
   quantity('interfacial_area', '1/m', 'a_i', 'interface per volume of clear liquid'),
   size('wall_thickness', 's', 'thickness of the wall or layer'),
   size('gap', 'δ', 'width of the gap'),
+  size('coil_diameter', 'D_c', 'mean diameter of curvature of a coil'),
+  size('transverse_pitch', 's_T', 'pitch of a tube bank across the flow'),
+  size('longitudinal_pitch', 's_L', 'pitch of a tube bank along the flow'),
+  size('nozzle_distance', 'H_n', 'distance from the nozzle to the plate'),
+  size('target_radius', 'r_t', 'radius of the disk around the axis of a jet'),
   number('particle_count', 'N_p', 'number of particles'),
   number('sphericity', 'ψ', 'sphericity'),
   // agitation
