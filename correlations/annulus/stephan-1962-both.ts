@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const stephan1962Both = published({
+  id: 'stephan-1962-both',
+  authors: 'Stephan',
+  year: 1962,
+  title: 'Developed laminar flow in a concentric annulus, both walls at one temperature',
+  family: 'annulus',
+  transfer: 'heat',
+  average: 'fully developed',
+  reads: 'mean line',
+  form: 'Nu = A + (B - D / (d_i / d_a + E)) * (d_i / d_a)^a',
+  values: { A: 3.66, B: 4, D: 0.102, E: 0.02, a: 0.04 },
+  groups: { Nu: 'Nu@hydraulic', Re: 'Re@hydraulic', Gz_heat: 'Gz_heat@hydraulic', d_i: 'outer_diameter', d_a: 'diameter' },
+  limits: ['Re <= 2300', 'Gz_heat <= 12', 'd_i / d_a <= 1'],
+  accuracy: 'within 2 % of the exact solution',
+  source: 'K. Stephan, Chem. Ing. Tech. 34 (1962) 207-212; VDI-Waermeatlas',
+  where: 'section Gd',
+  constantsFrom: 'page read',
+  use: 'On the hydraulic diameter; d_i outer diameter of the inner tube, d_a bore of the outer.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { d_i: 0.5, d_a: 1 },
+      value: 7.359829781,
+      tolerance: 7.4e-6,
+      source: 'open model code of an annular gap',
+      where: 'laminar branch: 3.66, 4, 0.102, 0.02, 0.04',
+    },
+    {
+      kind: 'analytic limit',
+      at: { d_i: 1, d_a: 1 },
+      value: 7.5407,
+      tolerance: 0.03,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'narrow gap: parallel plates (memory); the fit is good to 0.3 % there',
+    },
+  ],
+});

@@ -1,0 +1,48 @@
+import { published } from '../published.ts';
+
+export const stephan1962Outer = published({
+  id: 'stephan-1962-outer',
+  authors: 'Stephan',
+  year: 1962,
+  title: 'Developed laminar flow in a concentric annulus, outer wall heated, inner insulated',
+  family: 'annulus',
+  transfer: 'heat',
+  average: 'fully developed',
+  reads: 'mean line',
+  form: 'Nu = A + B * (d_i / d_a)^a',
+  values: { A: 3.66, B: 1.2, a: 0.5 },
+  groups: { Nu: 'Nu@hydraulic', Re: 'Re@hydraulic', Gz_heat: 'Gz_heat@hydraulic', d_i: 'outer_diameter', d_a: 'diameter' },
+  limits: ['Re <= 2300', 'Gz_heat <= 12', 'd_i / d_a <= 1'],
+  accuracy: 'within 2 % of the exact solution',
+  source: 'K. Stephan, Chem. Ing. Tech. 34 (1962) 207-212; VDI-Waermeatlas',
+  where: 'section Gd',
+  constantsFrom: 'memory',
+  use: 'On the hydraulic diameter; d_i outer diameter of the inner tube, d_a bore of the outer.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'analytic limit',
+      at: { d_i: 1, d_a: 1 },
+      value: 4.8608,
+      tolerance: 0.005,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'narrow gap: parallel plates, one insulated (memory)',
+    },
+    {
+      kind: 'analytic limit',
+      at: { d_i: 1e-12, d_a: 1 },
+      value: 3.6567935,
+      tolerance: 0.005,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'no core: tube (memory)',
+    },
+    {
+      kind: 'table',
+      at: { d_i: 0.5, d_a: 1 },
+      value: 4.43,
+      tolerance: 0.09,
+      source: 'Incropera, DeWitt, Bergman and Lavine, Fundamentals of Heat and Mass Transfer, 6th ed., Wiley 2007',
+      where: 'table 8.2, ratio 0.5 (memory); the fit is good to 2 % there',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const gnielinski1986CoilLaminar = published({
+  id: 'gnielinski-1986-coil-laminar',
+  authors: 'Gnielinski',
+  year: 1986,
+  title: 'Laminar flow in a helical coil, mean',
+  family: 'coil',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = A + B * (1 + E * (d / D)^0.9) * Re^(F + G * (d / D)^0.194) * Pr^(1/3)',
+  values: { A: 3.66, B: 0.08, E: 0.8, F: 0.5, G: 0.2903 },
+  groups: { Nu: 'Nu@pipe', Re: 'Re@pipe', Pr: 'Pr', d: 'diameter', D: 'coil_diameter' },
+  limits: ['Re / (2300 * (1 + 8.6 * (d / D)^0.45)) <= 1'],
+  accuracy: 'not stated',
+  source: 'V. Gnielinski, Proc. 8th Int. Heat Transfer Conf. 6 (1986) 2847-2854; VDI-Waermeatlas, 9th ed., Springer 2002',
+  where: 'p. Gc 2, eq. 5',
+  constantsFrom: 'page read',
+  use: 'D is the mean diameter of curvature; the limit is the critical Re of the coil.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Re: 1000, Pr: 5, d: 0.01, D: 0.2 },
+      value: 17.65436143,
+      tolerance: 1.8e-5,
+      source: 'Modelica Association, documentation of the library functions of heat transfer',
+      where: 'helical pipe, laminar',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Re: 1e-9, Pr: 1, d: 0.01, D: 0.2 },
+      value: 3.6567935,
+      tolerance: 0.005,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'no flow: first Graetz eigenvalue of the straight tube (memory)',
+    },
+  ],
+});

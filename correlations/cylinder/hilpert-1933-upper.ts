@@ -1,0 +1,32 @@
+import { published } from '../published.ts';
+
+export const hilpert1933Upper = published({
+  id: 'hilpert-1933-upper',
+  authors: 'Hilpert',
+  year: 1933,
+  title: 'Circular cylinder in cross flow, Re 4000 to 40000',
+  family: 'cylinder',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = C * Re^a * Pr^b',
+  values: { C: 0.193, a: 0.618, b: 1 / 3 },
+  groups: { Nu: 'Nu@cylinder,film', Re: 'Re@cylinder,film', Pr: 'Pr@film' },
+  limits: ['4000 <= Re <= 40000', 'Pr >= 0.7'],
+  accuracy: 'not stated',
+  source: 'R. Hilpert, Forsch. Geb. Ingenieurwes. 4 (1933) 215-224, doi 10.1007/BF02719754; Pr^(1/3) after J. D. Knudsen, D. L. Katz 1958',
+  where: 'table of bands as textbooks print it',
+  constantsFrom: 'page read',
+  use: 'One band of the table.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Re: 12649.11064, Pr: 1 },
+      value: 66.16531488,
+      tolerance: 6.6e-5,
+      source: 'open code of heat loss of a body, Nu_cylinder',
+      where: 'bands of Re; exponent of Pr printed .3333, hence taken at Pr 1',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const churchill1983Sphere = published({
+  id: 'churchill-1983-sphere',
+  authors: 'Churchill',
+  year: 1983,
+  title: 'Sphere, free convection',
+  family: 'natural-convection',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = A + B * Ra^0.25 / (1 + (D / Pr)^(9/16))^(4/9)',
+  values: { A: 2, B: 0.589, D: 0.469 },
+  groups: { Nu: 'Nu@particle,film', Ra: 'Ra@particle,film', Pr: 'Pr@film' },
+  limits: ['Ra <= 1e11', 'Pr >= 0.7'],
+  accuracy: 'not stated',
+  source: 'S. W. Churchill, Free Convection around Immersed Bodies, sec. 2.5.7 of Heat Exchanger Design Handbook, Hemisphere 1983',
+  where: 'sphere',
+  constantsFrom: 'page read',
+  use: 'Isothermal spheres in a fluid at rest.',
+  analogy: false,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Ra: 1000000, Pr: 0.7 },
+      value: 16.34970734,
+      tolerance: 1.6e-5,
+      source: 'open classroom code of convection after the tables of Incropera and DeWitt',
+      where: 'sphere: 2, 0.589, 0.469',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Ra: 0, Pr: 1 },
+      value: 2,
+      tolerance: 1e-9,
+      source: 'conduction from a sphere into an infinite medium at rest',
+      where: 'Nu = 2',
+    },
+  ],
+});

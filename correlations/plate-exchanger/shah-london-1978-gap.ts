@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const shahLondon1978Gap = published({
+  id: 'shah-london-1978-gap',
+  authors: 'Shah and London',
+  year: 1978,
+  title: 'Laminar flow between smooth parallel plates at one temperature, mean',
+  family: 'plate-exchanger',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = (A^3 + (B * Gz_heat^(1/3))^3)^(1/3)',
+  values: { A: 7.541, B: 1.841 },
+  groups: { Nu: 'Nu@hydraulic', Gz_heat: 'Gz_heat@hydraulic', Re: 'Re@hydraulic' },
+  limits: ['Re <= 2200'],
+  accuracy: 'not stated',
+  source: 'K. Stephan and others, VDI-Waermeatlas, section Gb/G2, after Shah and London 1978',
+  where: 'developed profile, equal wall temperatures',
+  constantsFrom: 'page read',
+  use: 'Smooth gaps only, not corrugated plates; the hydraulic diameter is twice the gap.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Gz_heat: 50 },
+      value: 9.048360895,
+      tolerance: 9e-6,
+      source: 'two open codes of plate gaps after the VDI heat atlas',
+      where: '7.541 and 1.841',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Gz_heat: 1e-9 },
+      value: 7.5407,
+      tolerance: 0.001,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'long gap (memory)',
+    },
+  ],
+});

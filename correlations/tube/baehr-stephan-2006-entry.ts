@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const baehrStephan2006Entry = published({
+  id: 'baehr-stephan-2006-entry',
+  authors: 'Baehr and Stephan',
+  year: 2006,
+  title: 'Laminar flow with velocity and temperature developing together, mean',
+  family: 'tube',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = (A / tanh(B * Gz_heat^(-1/3) + D * Gz_heat^(-2/3)) + E * Gz_heat * tanh(1 / Gz_heat)) / tanh(F * Pr^(1/6) * Gz_heat^(-1/6))',
+  values: { A: 3.66, B: 2.264, D: 1.7, E: 0.0499, F: 2.432 },
+  groups: { Nu: 'Nu@pipe', Gz_heat: 'Gz_heat@pipe', Re: 'Re@pipe', Pr: 'Pr' },
+  limits: ['Re <= 2300', 'Pr >= 0.1'],
+  accuracy: 'not stated',
+  source: 'H. D. Baehr, K. Stephan, Heat and Mass Transfer, 2nd ed., Springer 2006; as in Incropera and DeWitt',
+  where: 'combined entry, constant wall temperature',
+  constantsFrom: 'page read',
+  use: 'Flat velocity profile at the inlet.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Gz_heat: 50, Pr: 0.7 },
+      value: 7.055096906,
+      tolerance: 7.1e-6,
+      source: 'open classroom code of convection after the tables of Incropera and DeWitt',
+      where: 'combined entry: 3.66, 2.264, 1.7, 0.0499, 2.432',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Gz_heat: 0.001, Pr: 1 },
+      value: 3.6567935,
+      tolerance: 0.005,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'long tube: first Graetz eigenvalue (memory)',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const gnielinski2002WallFlux = published({
+  id: 'gnielinski-2002-wall-flux',
+  authors: 'Gnielinski',
+  year: 2002,
+  title: 'Laminar flow, developed profile, constant wall flux, mean',
+  family: 'tube',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = (A^3 + B^3 + (D * Gz_heat^(1/3) - B)^3)^(1/3)',
+  values: { A: 4.364, B: 0.6, D: 1.953 },
+  groups: { Nu: 'Nu@pipe', Gz_heat: 'Gz_heat@pipe', Re: 'Re@pipe', Pr: 'Pr' },
+  limits: ['Re <= 2300', '0.6 <= Pr <= 1000'],
+  accuracy: 'not stated',
+  source: 'V. Gnielinski, in VDI-Waermeatlas, 9th ed., Springer 2002',
+  where: 'p. Ga 4, eq. 19',
+  constantsFrom: 'page read',
+  use: 'All lengths with a developed velocity profile.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Gz_heat: 50 },
+      value: 7.180076032,
+      tolerance: 7.2e-6,
+      source: 'Modelica Association, documentation of the library functions of heat transfer',
+      where: 'straight pipe, laminar, eq. Nu_qD',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Gz_heat: 1000000000 },
+      value: 1952.976016,
+      tolerance: 1,
+      source: 'closed form 3/2 (8/9)^(1/3) Gamma(2/3)',
+      where: 'short tube: Leveque, constant flux',
+    },
+  ],
+});

@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const hausen1943Laminar = published({
+  id: 'hausen-1943-laminar',
+  authors: 'Hausen',
+  year: 1943,
+  title: 'Laminar flow with thermal entry, constant wall temperature, mean',
+  family: 'tube',
+  transfer: 'heat',
+  average: 'mean',
+  reads: 'mean line',
+  form: 'Nu = A + B * Gz_heat / (1 + D * Gz_heat^(2/3))',
+  values: { A: 3.66, B: 0.0668, D: 0.04 },
+  groups: { Nu: 'Nu@pipe', Gz_heat: 'Gz_heat@pipe', Re: 'Re@pipe' },
+  limits: ['Re <= 2300'],
+  accuracy: 'not stated',
+  source: 'H. Hausen, Z. VDI Beih. Verfahrenstech. 4 (1943) 91-98',
+  where: 'laminar tube',
+  constantsFrom: 'page read',
+  use: 'Developed velocity profile at the inlet; some books print 0.065.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Gz_heat: 50 },
+      value: 5.8247778,
+      tolerance: 5.8e-6,
+      source: 'open classroom code of convection after the tables of Incropera and DeWitt',
+      where: 'laminar tube, thermal entry: 3.66, 0.0668, 0.04',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Gz_heat: 1e-9 },
+      value: 3.6567935,
+      tolerance: 0.005,
+      source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+      where: 'long tube: first Graetz eigenvalue (memory)',
+    },
+  ],
+});

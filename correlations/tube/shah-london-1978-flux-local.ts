@@ -1,0 +1,40 @@
+import { published } from '../published.ts';
+
+export const shahLondon1978FluxLocal = published({
+  id: 'shah-london-1978-flux-local',
+  authors: 'Shah and London',
+  year: 1978,
+  title: 'Laminar tube, constant wall flux, local at the length',
+  family: 'tube',
+  transfer: 'heat',
+  average: 'local',
+  reads: 'mean line',
+  form: 'Nu = A + B * Gz_heat^a * exp(-D / Gz_heat)',
+  values: { A: 4.364, B: 0.263, a: 0.506, D: 41 },
+  groups: { Nu: 'Nu@pipe', Gz_heat: 'Gz_heat@pipe', Re: 'Re@pipe' },
+  limits: ['Re <= 2300', 'Gz_heat <= 667'],
+  accuracy: 'within 1 % of the exact solution (memory)',
+  source: 'R. K. Shah, A. L. London, Laminar Flow Forced Convection in Ducts, Academic Press 1978',
+  where: 'long branch of three, with Gz = 1/x*',
+  constantsFrom: 'page read',
+  use: 'Local value at the distance given as length.',
+  analogy: true,
+  printed: [
+    {
+      kind: 'constants on a page',
+      at: { Gz_heat: 100 },
+      value: 6.158299809,
+      tolerance: 6.2e-6,
+      source: 'open code of a heated air duct, three branches in Gz',
+      where: 'first branch: 4.364, 0.263, 0.506, 41',
+    },
+    {
+      kind: 'analytic limit',
+      at: { Gz_heat: 0.01 },
+      value: 4.363636364,
+      tolerance: 0.0005,
+      source: 'closed form 48/11',
+      where: 'long tube, constant flux',
+    },
+  ],
+});
